@@ -1,0 +1,130 @@
+using ClubBench.Calculation.Filters;
+using ClubBench.Calculation.Quantities;
+using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
+
+namespace ClubBench.Calculation.Tests.Filters;
+
+public class LowPassPrototypeTests
+{
+    public static TheoryData<ReferenceRow> Chebyshev => ReferenceTable.Theory("chebyshev_prototype");
+
+    public static TheoryData<ReferenceRow> Ripple => ReferenceTable.Theory("passband_ripple");
+
+    public static TheoryData<ReferenceRow> HalfWaveLoss => ReferenceTable.Theory("half_wave_filter");
+
+    [Theory]
+    [MemberData(nameof(Chebyshev))]
+    public void Chebyshev_OrderAndRipple_MatchesTheRow(ReferenceRow row)
+    {
+        var ripple = PassBandRipple.FromRipple(Decibels.FromDb(row.Number("ripple_db")));
+
+        var prototype = LowPassPrototype.Chebyshev((int)row.Number("order"), ripple);
+
+        for (var k = 1; k <= 4 && row.Has($"g{k}"); k++) Assert.Equal(row.Number($"g{k}"), prototype.Values[k - 1], row.Number("tolerance"));
+        Assert.Equal(row.Number("half_power_ratio"), prototype.HalfPowerRatio, row.Number("tolerance"));
+        Assert.Equal(row.Number("return_loss_db"), ripple.ReturnLoss.Db, 5e-4);
+    }
+
+    [Fact]
+    public void Chebyshev_EvenOrder_EndsInAnotherResistance() =>
+        Assert.Equal(1.355361, LowPassPrototype.Chebyshev(4, PassBandRipple.FromRipple(Decibels.FromDb(0.1))).LoadRatio, 2e-6);
+
+    [Theory]
+    [InlineData(LowPassForm.ShuntCapacitorFirst)]
+    [InlineData(LowPassForm.SeriesInductorFirst)]
+    public void Denormalise_EvenOrder_HasItsRippleBetweenTheToldResistances(LowPassForm form)
+    {
+        var prototype = LowPassPrototype.Chebyshev(4, PassBandRipple.FromRipple(Decibels.FromDb(0.1)));
+
+        var design = prototype.Denormalise(Frequency.FromMegahertz(8), FiftyOhm, form);
+
+        foreach (var megahertz in new[] { 0.001, 3.0, 8.0, 16.0 })
+        {
+            var ideal = prototype.Attenuation(megahertz / 8);
+            Assert.Equal(ideal.Db, design.ToLadder().Loss(Frequency.FromMegahertz(megahertz), design.Source, design.Load).Db, 1e-4);
+        }
+    }
+
+    [Theory]
+    [InlineData(5, 0.618034, 1.618034, 2.0)]
+    [InlineData(7, 0.445042, 1.246980, 1.801938)]
+    public void Butterworth_Order_MatchesPublishedFigures(int order, double g1, double g2, double g3)
+    {
+        var values = LowPassPrototype.Butterworth(order).Values;
+
+        Assert.Equal([g1, g2, g3], values.Take(3).Select(g => Math.Round(g, 6)));
+        Assert.Equal(values.Reverse().Select(g => Math.Round(g, 9)), values.Select(g => Math.Round(g, 9)));
+    }
+
+    [Theory]
+    [InlineData(5, 30.1072)]
+    [InlineData(7, 42.1445)]
+    public void Attenuation_ButterworthAtTwiceTheEdge_MatchesPublishedFigures(int order, double db) =>
+        Assert.Equal(db, LowPassPrototype.Butterworth(order).Attenuation(2).Db, 1e-4);
+
+    [Theory]
+    [InlineData(5, 0.1, 2, 34.8478)]
+    [InlineData(7, 0.01, 2, 47.6793)]
+    [InlineData(5, 0.1, 3, 54.2068)]
+    public void Attenuation_Chebyshev_MatchesPublishedFigures(int order, double rippleDb, double multiple, double db) =>
+        Assert.Equal(db, LowPassPrototype.Chebyshev(order, PassBandRipple.FromRipple(Decibels.FromDb(rippleDb))).Attenuation(multiple).Db, 1e-3);
+
+    [Fact]
+    public void Denormalise_ChebyshevFiveAndSeven_MatchPublishedParts()
+    {
+        Parts([387.23, 717.46, 387.23], F7.Capacitors.Select(c => c.Picofarad));
+        Parts([1.36503, 1.36503], F7.Coils.Select(l => l.Microhenry));
+        Parts([163.66, 359.00, 359.00, 163.66], F14.Capacitors.Select(c => c.Picofarad));
+        Parts([0.71487, 0.83845, 0.71487], F14.Coils.Select(l => l.Microhenry));
+    }
+
+    [Fact]
+    public void Denormalise_Ladder_HasTheAttenuationOfThePrototype()
+    {
+        var prototype = LowPassPrototype.Chebyshev(7, PassBandRipple.FromRipple(Decibels.FromDb(0.01)));
+
+        foreach (var multiple in new[] { 0.3, 0.8, 1.0, 1.3, 2.0, 3.0 })
+            Assert.Equal(prototype.Attenuation(multiple).Db, F14.ToLadder().Loss(Frequency.FromMegahertz(15.5) * multiple, FiftyOhm, FiftyOhm).Db, 1e-6);
+    }
+
+    [Theory]
+    [MemberData(nameof(Ripple))]
+    public void PassBandRipple_FromEachDress_IsOneFigure(ReferenceRow row)
+    {
+        var ripple = PassBandRipple.FromReflection(row.Number("reflection"));
+
+        Assert.Equal(row.Number("ripple_db"), ripple.Ripple.Db, row.Number("ripple_tolerance"));
+        Assert.Equal(row.Number("return_loss_db"), ripple.ReturnLoss.Db, 1e-3);
+        Assert.Equal(row.Number("swr"), ripple.StandingWaveRatio, 1e-4);
+        Assert.Equal(ripple.Reflection, PassBandRipple.FromRipple(ripple.Ripple).Reflection, 1e-12);
+        Assert.Equal(ripple.Reflection, PassBandRipple.FromReturnLoss(ripple.ReturnLoss).Reflection, 1e-12);
+        Assert.Equal(ripple.Reflection, PassBandRipple.FromStandingWaveRatio(ripple.StandingWaveRatio).Reflection, 1e-12);
+    }
+
+    [Theory]
+    [MemberData(nameof(HalfWaveLoss))]
+    public void HalfWave_MultipleOfTheDesignFrequency_MatchesTheRow(ReferenceRow row)
+    {
+        var design = Frequency.FromMegahertz(7.1);
+
+        var loss = LowPassDesign.HalfWave(design, FiftyOhm).ToLadder().Loss(design * row.Number("multiple"), FiftyOhm, FiftyOhm);
+
+        Assert.Equal(row.Number("loss_db"), loss.Db, row.Number("tolerance"));
+    }
+
+    [Theory]
+    [InlineData(0)]
+    [InlineData(1)]
+    [InlineData(double.NaN)]
+    public void FromReflection_OutsideItsRange_Throws(double reflection) =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => PassBandRipple.FromReflection(reflection));
+
+    [Fact]
+    public void Chebyshev_RippleAboveThreeDecibels_Throws() =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => LowPassPrototype.Chebyshev(5, PassBandRipple.FromRipple(Decibels.FromDb(3.5))));
+
+    private static void Parts(double[] expected, IEnumerable<double> actual)
+    {
+        foreach (var (e, a) in expected.Zip(actual)) Assert.Equal(e, a, e * 5e-5);
+    }
+}

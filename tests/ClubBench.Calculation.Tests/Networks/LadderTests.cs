@@ -1,0 +1,156 @@
+using System.Globalization;
+using System.Numerics;
+using ClubBench.Calculation.Filters;
+using ClubBench.Calculation.Networks;
+using ClubBench.Calculation.Quantities;
+using ClubBench.Calculation.Tests.Filters;
+using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
+
+namespace ClubBench.Calculation.Tests.Networks;
+
+public class LadderTests
+{
+    public static TheoryData<ReferenceRow> Nodal => ReferenceTable.Theory("ladder_nodal");
+
+    public static TheoryData<ReferenceRow> Chebyshev5 => ReferenceTable.Theory("ladder_chebyshev5");
+
+    public static TheoryData<ReferenceRow> KeptFilter => ReferenceTable.Theory("kept_filter");
+
+    [Theory]
+    [MemberData(nameof(Nodal))]
+    public void At_SameNetworkByNodalAnalysis_AgreesToRounding(ReferenceRow row)
+    {
+        var ladder = new Ladder(row["elements"].Split(';').Select(Element));
+        var (source, load) = (Resistance.FromOhm(row.Number("source_ohm")), Resistance.FromOhm(row.Number("load_ohm")));
+
+        var chain = ladder.At(Frequency.FromMegahertz(row.Number("frequency_mhz")));
+
+        Close(new(row.Number("s21_re"), row.Number("s21_im")), chain.S21(source, load), row.Number("tolerance"));
+        Close(new(row.Number("s11_re"), row.Number("s11_im")), chain.S11(source, load), row.Number("tolerance"));
+    }
+
+    [Theory]
+    [MemberData(nameof(Chebyshev5))]
+    public void Loss_PublishedFilter_MatchesTheRow(ReferenceRow row)
+    {
+        var f = Frequency.FromMegahertz(row.Number("frequency_mhz"));
+
+        var chain = F7.ToLadder().At(f);
+
+        Close(new(row.Number("s21_re"), row.Number("s21_im")), chain.S21(FiftyOhm, FiftyOhm), row.Number("tolerance"));
+        Assert.Equal(row.Number("loss_db"), chain.Loss(FiftyOhm, FiftyOhm).Db, row.Number("db_tolerance"));
+        Assert.Equal(row.Number("return_loss_db"), chain.ReturnLoss(FiftyOhm, FiftyOhm).Db, row.Number("db_tolerance"));
+        Assert.Equal(row.Number("lossy_loss_db"), F7.ToLadder(150, 1000).Loss(f, FiftyOhm, FiftyOhm).Db, row.Number("db_tolerance"));
+    }
+
+    [Theory]
+    [MemberData(nameof(KeptFilter))]
+    public void Loss_OldFilterOnANewBand_MatchesTheRow(ReferenceRow row)
+    {
+        var ladder = (row["filter"] == "f7" ? F7 : F14).ToLadder();
+        var f = Frequency.FromMegahertz(row.Number("frequency_mhz"));
+
+        Assert.Equal(row.Number("loss_db"), ladder.Loss(f, FiftyOhm, FiftyOhm).Db, row.Number("tolerance"));
+        Assert.Equal(row.Number("return_loss_db"), ladder.ReturnLoss(f, FiftyOhm, FiftyOhm).Db, row.Number("return_loss_tolerance"));
+        foreach (var (column, n) in new[] { ("second_db", 2), ("third_db", 3), ("fourth_db", 4) })
+            Assert.Equal(row.Number(column), ladder.Loss(f.Harmonic(n), FiftyOhm, FiftyOhm).Db, Math.Max(row.Number("tolerance"), PrintedHalfUnit(row[column])));
+    }
+
+    [Theory]
+    [InlineData(25, 0, 24.823, -4.153)]
+    [InlineData(50, 20, 52.895, 12.836)]
+    [InlineData(50, 0, 49.378, -7.301)]
+    public void InputImpedance_ChebyshevFive_MatchesPublishedFigures(double loadOhm, double loadReactanceOhm, double ohm, double reactanceOhm)
+    {
+        var z = F7.ToLadder().At(Frequency.FromMegahertz(7.1)).InputImpedance(new Complex(loadOhm, loadReactanceOhm));
+
+        Close(new Complex(ohm, reactanceOhm), z, 1e-3);
+    }
+
+    [Theory]
+    [InlineData(50, 25, 0.5352, 9.357)]
+    [InlineData(50, 100, 0.5402, 9.320)]
+    [InlineData(12.5, 50, 1.9658, 4.388)]
+    public void Loss_UnequalEnds_MatchesPublishedFigures(double sourceOhm, double loadOhm, double lossDb, double returnLossDb)
+    {
+        var chain = F7.ToLadder().At(Frequency.FromMegahertz(7.1));
+
+        Assert.Equal(lossDb, chain.Loss(Resistance.FromOhm(sourceOhm), Resistance.FromOhm(loadOhm)).Db, 1e-3);
+        Assert.Equal(returnLossDb, chain.ReturnLoss(Resistance.FromOhm(sourceOhm), Resistance.FromOhm(loadOhm)).Db, 1e-3);
+    }
+
+    [Fact]
+    public void At_AnyPassiveLadder_IsReciprocalAndLosslessOnesKeepTheEnergy()
+    {
+        foreach (var f in FrequencyRange.FromMegahertz(1, 60).Points(40))
+        {
+            var chain = Seven20.ToLadder().At(f);
+            var (s21, s11) = (chain.S21(FiftyOhm, FiftyOhm).Magnitude, chain.S11(FiftyOhm, FiftyOhm).Magnitude);
+
+            var lossy = Seven20.ToLadder(150, 1000).At(f);
+
+            Close(Complex.One, lossy.Determinant, 1e-14 * (lossy.A * lossy.D).Magnitude);
+            Assert.Equal(1, (s21 * s21) + (s11 * s11), 1e-12);
+        }
+    }
+
+    [Fact]
+    public void S22_ReversedLadder_IsItsS11()
+    {
+        var ladder = new Ladder(F7.ToLadder(150).Elements.Take(4));
+        var f = Frequency.FromMegahertz(9);
+        var reversed = new Ladder(ladder.Elements.Reverse());
+
+        Close(reversed.At(f).S11(FiftyOhm, FiftyOhm), ladder.At(f).S22(FiftyOhm, FiftyOhm), 1e-12);
+        Close(reversed.At(f).InputImpedance(75), ladder.At(f).OutputImpedance(75), 1e-9);
+    }
+
+    [Fact]
+    public void Loss_AtAnUnmovedNotchWithoutLosses_StaysFinite()
+    {
+        var (coil, capacitor) = (Inductance.FromMicrohenry(1), Capacitance.FromPicofarad(100));
+        var notch = Frequency.FromHertz(1 / (2 * Math.PI * Math.Sqrt(coil.Henry * capacitor.Farad)));
+        var ladder = new Ladder([LadderElement.ShuntTrap(coil, capacitor, 200, 1000)]);
+
+        var loss = ladder.Loss(notch, FiftyOhm, FiftyOhm);
+
+        // 100 ohm reactance: 0.5 ohm of the coil and 0.1 ohm of the capacitor are left across 25 ohm.
+        Assert.Equal(20 * Math.Log10((25 + 0.6) / 0.6), loss.Db, 1e-6);
+    }
+
+    [Fact]
+    public void CutOff3dB_Chebyshev_IsTheClosedForm()
+    {
+        var prototype = LowPassPrototype.Chebyshev(5, PassBandRipple.FromReflection(0.1));
+
+        var found = F7.ToLadder().CutOff3dB(Frequency.FromMegahertz(0.001), FiftyOhm, FiftyOhm);
+
+        Assert.Equal(8.0 * prototype.HalfPowerRatio, found!.Value.Megahertz, 1e-6);
+    }
+
+    [Fact]
+    public void CutOff3dB_FrequencyAlreadyInTheStopBand_IsNull() =>
+        Assert.Null(F7.ToLadder().CutOff3dB(Frequency.FromMegahertz(14), FiftyOhm, FiftyOhm));
+
+    private static double PrintedHalfUnit(string text) => text.Contains('.', StringComparison.Ordinal) ? 0.5 * Math.Pow(10, -(text.Length - text.IndexOf('.', StringComparison.Ordinal) - 1)) : 0.5;
+
+    private static LadderElement Element(string text)
+    {
+        var parts = text.Split(':');
+        double At(int k) => double.Parse(parts[k], CultureInfo.InvariantCulture);
+        double? Q(int k) => parts.Length > k ? At(k) : null;
+        return parts[0] switch
+        {
+            "C" => LadderElement.ShuntCapacitor(Capacitance.FromFarad(At(1)), Q(2)),
+            "L" => LadderElement.SeriesInductor(Inductance.FromHenry(At(1)), Q(2)),
+            "LT" => LadderElement.SeriesTrap(Inductance.FromHenry(At(1)), Capacitance.FromFarad(At(2)), Q(3), Q(4)),
+            _ => LadderElement.ShuntTrap(Inductance.FromHenry(At(1)), Capacitance.FromFarad(At(2)), Q(3), Q(4)),
+        };
+    }
+
+    private static void Close(Complex expected, Complex actual, double tolerance)
+    {
+        Assert.Equal(expected.Real, actual.Real, tolerance);
+        Assert.Equal(expected.Imaginary, actual.Imaginary, tolerance);
+    }
+}
