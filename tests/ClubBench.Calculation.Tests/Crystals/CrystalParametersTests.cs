@@ -1,0 +1,131 @@
+using ClubBench.Calculation.Crystals;
+using ClubBench.Calculation.Quantities;
+using CsCheck;
+
+namespace ClubBench.Calculation.Tests.Crystals;
+
+public class CrystalParametersTests
+{
+    private static readonly CrystalParameters FortyMetres = Quartz(7.03, 18, 4.5, 20);
+
+    public static TheoryData<ReferenceRow> Published => ReferenceTable.Theory("crystals");
+
+    [Theory]
+    [MemberData(nameof(Published))]
+    public void Crystal_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    {
+        var crystal = Quartz(row.Number("fs_hz") * 1e-6, row.Number("cm_ff"), row.Number("c0_pf"), row.Number("rm_ohm"));
+
+        Assert.Equal(row.Number("expected"), Figure(crystal, row), row.Number("tolerance"));
+    }
+
+    [Fact]
+    public void FromMarkedFrequency_14060At30Picofarad_FindsTheHiddenSeriesResonance()
+    {
+        var crystal = CrystalParameters.FromMarkedFrequency(
+            Frequency.FromMegahertz(14.06), Pf(30), Capacitance.FromFarad(24e-15), Pf(5.5), Resistance.FromOhm(12));
+
+        Assert.Equal(14_055_249.7, crystal.SeriesResonance.Hertz, 1.0);
+    }
+
+    [Fact]
+    public void FromMarkedFrequency_AnyCrystal_ComesBackAtItsLoad() =>
+        Gen.Select(Gen.Double[3, 25], Gen.Double[10, 28], Gen.Double[3, 7], Gen.Double[8, 60]).Sample((mhz, cmFf, c0Pf, loadPf) =>
+        {
+            var marked = Frequency.FromMegahertz(mhz);
+            var crystal = CrystalParameters.FromMarkedFrequency(marked, Pf(loadPf), Capacitance.FromFarad(cmFf * 1e-15), Pf(c0Pf), default);
+            Assert.Equal(marked.Hertz, crystal.LoadedFrequency(Pf(loadPf)).Hertz, 1e-6);
+        });
+
+    [Fact]
+    public void LoadedFrequency_NoLoad_IsTheParallelResonance() =>
+        Assert.Equal(FortyMetres.ParallelResonance, FortyMetres.LoadedFrequency(default));
+
+    [Fact]
+    public void LoadedFrequency_HugeLoad_IsTheSeriesResonance() =>
+        Assert.Equal(7_030_000, FortyMetres.LoadedFrequency(Capacitance.FromMicrofarad(1)).Hertz, 0.1);
+
+    [Fact]
+    public void LoadedSlope_AnyLoad_IsTheDifferenceQuotient()
+    {
+        var rise = FortyMetres.LoadedFrequency(Pf(30.001)).Hertz - FortyMetres.LoadedFrequency(Pf(29.999)).Hertz;
+
+        Assert.Equal(rise / 0.002, FortyMetres.LoadedSlopeHertzPerPicofarad(Pf(30)), 1e-3);
+    }
+
+    [Fact]
+    public void Issues_OrdinaryCrystal_AreNone() => Assert.Empty(FortyMetres.Issues());
+
+    [Fact]
+    public void Issues_LossyCrystal_IsNeverInductive() =>
+        Assert.Contains(CrystalIssue.NeverInductive, (FortyMetres with { MotionalResistance = Resistance.FromOhm(3000) }).Issues());
+
+    [Fact]
+    public void Issues_RatioOf140_IsBelowQuartzButFineForCeramic()
+    {
+        var crystal = FortyMetres with { StaticCapacitance = Capacitance.FromFarad(140 * 18e-15) };
+
+        Assert.Equal([CrystalIssue.RatioBelowQuartzLimit], crystal.Issues());
+        Assert.Empty((crystal with { Kind = ResonatorKind.Ceramic }).Issues());
+    }
+
+    [Theory]
+    [InlineData(0.4, true)]
+    [InlineData(2000, false)]
+    public void Issues_QOutsideHabit_Warns(double rm, bool tooGood)
+    {
+        var crystal = Quartz(7.03, 18, 4.5, tooGood ? rm : 300);
+
+        Assert.Contains(CrystalIssue.UnusualQ, crystal.Issues());
+    }
+
+    [Fact]
+    public void UnloadedQ_ResistanceNotStated_IsNotGiven() =>
+        Assert.Null(Quartz(7.03, 18, 4.5, 0).UnloadedQ);
+
+    [Fact]
+    public void Crystal_WithoutMotionalCapacitance_IsRefused() =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => Quartz(7.03, 0, 4.5, 20));
+
+    [Fact]
+    public void InParallel_TwoEqual_KeepBothResonances()
+    {
+        var pair = ParallelCrystals.Of(FortyMetres, 2);
+
+        Assert.Equal(FortyMetres.SeriesResonance, pair.SeriesResonance);
+        Assert.Equal(FortyMetres.ParallelResonance.Hertz, pair.ParallelResonance.Hertz, 1e-6);
+        Assert.Equal(10, pair.MotionalResistance.Ohm, 1e-12);
+        Assert.Equal(FortyMetres.MotionalInductance.Henry / 2, pair.MotionalInductance.Henry, 1e-12);
+    }
+
+    [Theory]
+    [InlineData(0, PairMatch.Matched)]
+    [InlineData(111, PairMatch.Matched)]
+    [InlineData(113, PairMatch.Loose)]
+    [InlineData(1117, PairMatch.Loose)]
+    [InlineData(1119, PairMatch.DeadGap)]
+    public void Judge_DifferenceInHertz_FollowsSeriesResonanceOverQ(double differenceHz, PairMatch expected) =>
+        Assert.Equal(expected, ParallelCrystals.Judge(FortyMetres, differenceHz));
+
+    private static double Figure(CrystalParameters crystal, ReferenceRow row) => row["quantity"] switch
+    {
+        "lm_mh" => crystal.MotionalInductance.Henry * 1e3,
+        "fp_hz" => crystal.ParallelResonance.Hertz,
+        "q" => crystal.UnloadedQ!.Value,
+        "ratio" => crystal.CapacitanceRatio,
+        "merit" => crystal.FigureOfMerit!.Value,
+        "loaded_hz" => crystal.LoadedFrequency(Pf(row.Number("load_pf"))).Hertz,
+        "slope_hz_per_pf" => crystal.LoadedSlopeHertzPerPicofarad(Pf(row.Number("load_pf"))),
+        "resistance_ohm" => crystal.EffectiveResistance(Pf(row.Number("load_pf"))).Ohm,
+        "overtone3_lm_mh" => crystal.OnOvertone(3).MotionalInductance.Henry * 1e3,
+        "overtone3_cm_ff" => crystal.OnOvertone(3).MotionalCapacitance.Farad * 1e15,
+        "overtone3_ratio" => crystal.OnOvertone(3).CapacitanceRatio,
+        "midway300_ohm" => ParallelCrystals.MidwayResistance(crystal, 300).Ohm,
+        var other => throw new InvalidOperationException(other),
+    };
+
+    private static Capacitance Pf(double picofarad) => Capacitance.FromPicofarad(picofarad);
+
+    private static CrystalParameters Quartz(double mhz, double cmFf, double c0Pf, double rmOhm) =>
+        new(Frequency.FromMegahertz(mhz), Capacitance.FromFarad(cmFf * 1e-15), Pf(c0Pf), Resistance.FromOhm(rmOhm));
+}
