@@ -1,0 +1,83 @@
+using ClubBench.Calculation.Oscillators;
+using ClubBench.Calculation.Quantities;
+using static ClubBench.Calculation.Tests.Oscillators.PulledCrystals;
+
+namespace ClubBench.Calculation.Tests.Oscillators;
+
+public class PulledCrystalDesignTests
+{
+    private static readonly FrequencyRange TwentyMetresCw = FrequencyRange.FromMegahertz(14.05, 14.06);
+    private static readonly FrequencyRange TwentyMetres = FrequencyRange.FromMegahertz(14.0, 14.35);
+
+    public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("series-inductance");
+
+    [Theory]
+    [MemberData(nameof(Rows))]
+    public void Inductance_ReferenceRow_IsFound(ReferenceRow row)
+    {
+        var loop = Plain(row) with { CrystalCount = (int)row.Number("crystals"), HolderCapacitance = Pf(row.Number("holder_pf")) };
+
+        var inductance = row.Has("span_hz") ? PulledCrystalDesign.ForSpan(loop, row.Number("span_hz")).Inductance : PulledCrystalDesign.LargestSafe(loop);
+
+        Assert.Equal(row.Number("expected_uh"), inductance.Microhenry, row.Number("tolerance_uh"));
+    }
+
+    [Fact]
+    public void ForSpan_WithinReach_ComesBackWithTheSpan()
+    {
+        var solution = PulledCrystalDesign.ForSpan(KitA30, 10_000);
+
+        Assert.True(solution.IsFound);
+        Assert.Equal(10_000, KitA30.WithInductance(solution.Inductance).Range().SpanHertz, 0.1);
+    }
+
+    [Fact]
+    public void ForSpan_BeyondTheCrystal_ReturnsTheNearestAndTheReason()
+    {
+        var solution = PulledCrystalDesign.ForSpan(Plain(7.03, 18, 4.5, 0), 2_000_000);
+
+        Assert.Equal(SpanShortfall.InductorTakesOver, solution.Shortfall);
+        Assert.InRange(solution.Range.SpanHertz, 50_000, 2_000_000);
+    }
+
+    [Fact]
+    public void ForSpan_LessThanWithoutInductor_SaysSo()
+    {
+        var solution = PulledCrystalDesign.ForSpan(Plain(7.03, 18, 4.5, 0), 1000);
+
+        Assert.Equal(SpanShortfall.AlreadyWider, solution.Shortfall);
+        Assert.Equal(0, solution.Inductance.Henry);
+    }
+
+    [Fact]
+    public void LargestSafe_JustBelowAndJustAbove_ChangesTheState()
+    {
+        var safe = PulledCrystalDesign.LargestSafe(KitA30);
+
+        Assert.Equal(CrystalControlState.CrystalControlled, KitA30.WithInductance(safe * 0.999).Range().State);
+        Assert.NotEqual(CrystalControlState.CrystalControlled, KitA30.WithInductance(safe * 1.001).Range().State);
+    }
+
+    [Fact]
+    public void Candidates_20MetresFromChokes_PutACrystalControlledCoilThatStaysInsideFirst()
+    {
+        var candidates = PulledCrystalDesign.Candidates(KitA20, PulledCrystalDesign.MouldedChokes, TwentyMetresCw, TwentyMetres);
+
+        Assert.True(candidates[0].LiesInside);
+        Assert.Equal(10_000, candidates[0].CoveredHertz, 1e-6);
+        Assert.False(candidates.Single(c => c.Inductance == Inductance.FromMicrohenry(10)).LiesInside);
+    }
+
+    [Fact]
+    public void Candidates_DialOutsideTheWindow_CoverNothing()
+    {
+        var candidates = PulledCrystalDesign.Candidates(KitA30, PulledCrystalDesign.MouldedChokes, TwentyMetresCw, TwentyMetres);
+
+        Assert.All(candidates, c => Assert.Equal(0, c.CoveredHertz));
+        Assert.All(candidates, c => Assert.False(c.LiesInside));
+    }
+
+    [Fact]
+    public void Scaled_TwiceTheFrequency_IsAQuarter() =>
+        Assert.Equal(5.5, PulledCrystalDesign.Scaled(Inductance.FromMicrohenry(22), Frequency.FromMegahertz(7.03), Frequency.FromMegahertz(14.06)).Microhenry, 1e-9);
+}
