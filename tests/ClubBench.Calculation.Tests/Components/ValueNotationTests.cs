@@ -1,0 +1,118 @@
+using System.Globalization;
+using ClubBench.Calculation.Components;
+using ClubBench.Calculation.Quantities;
+using CsCheck;
+
+namespace ClubBench.Calculation.Tests.Components;
+
+public class ValueNotationTests
+{
+    public static TheoryData<ReferenceRow> Texts => ReferenceTable.Theory("value-notation");
+
+    public static TheoryData<ReferenceRow> Formats => ReferenceTable.Theory("value-format");
+
+    public static TheoryData<ReferenceRow> Markings => ReferenceTable.Theory("markings");
+
+    [Theory]
+    [MemberData(nameof(Texts))]
+    public void Parse_Text_GivesValueOrRefusal(ReferenceRow row)
+    {
+        var read = ValueNotation.Parse(row["text"], Enum.Parse<PartKind>(row["kind"]));
+
+        Assert.Equal(row["refusal"], read.Refusal.ToString());
+        Assert.Equal(row.Has("value") ? row.Number("value") : null, read.Si);
+    }
+
+    [Theory]
+    [MemberData(nameof(Formats))]
+    public void Format_Value_GivesTheText(ReferenceRow row) =>
+        Assert.Equal(row["text"], ValueNotation.Format(row.Number("value"), Enum.Parse<PartKind>(row["kind"])));
+
+    [Theory]
+    [InlineData("en-US")]
+    [InlineData("de-DE")]
+    [InlineData("")]
+    public void Parse_AnyCulture_ReadsCommaAsDecimalMark(string culture)
+    {
+        var before = CultureInfo.CurrentCulture;
+        try
+        {
+            CultureInfo.CurrentCulture = CultureInfo.GetCultureInfo(culture);
+
+            Assert.Equal(4.7e-9, ValueNotation.Parse("4,7n", PartKind.Capacitor).Si);
+            Assert.Equal("4n7", ValueNotation.Format(Capacitance.FromNanofarad(4.7)));
+        }
+        finally
+        {
+            CultureInfo.CurrentCulture = before;
+        }
+    }
+
+    [Fact]
+    public void Parse_OfWhatFormatWrote_GivesTheValueToThreeDigits() =>
+        Gen.Select(Gen.Double[-12, 0], Gen.Enum<PartKind>()).Sample((exponent, kind) =>
+        {
+            var value = Math.Pow(10, kind == PartKind.Resistor ? exponent + 9 : exponent);
+            var read = ValueNotation.Parse(ValueNotation.Format(value, kind), kind);
+            return read.IsUnderstood && Math.Abs((read.Si!.Value / value) - 1) <= 0.0051;
+        });
+
+    [Fact]
+    public void Parse_ROnACoil_WarnsThatItWasReadAsMicrohenry()
+    {
+        Assert.True(ValueNotation.Parse("2R2", PartKind.Inductor).WasReadAsMicrohenry);
+        Assert.False(ValueNotation.Parse("2u2", PartKind.Inductor).WasReadAsMicrohenry);
+        Assert.False(ValueNotation.Parse("2R2", PartKind.Resistor).WasReadAsMicrohenry);
+    }
+
+    [Fact]
+    public void Parse_AnyTextOfPrintableCharacters_NeverThrows() =>
+        Gen.Select(Gen.String[Gen.Char[' ', '~'], 0, 12], Gen.Enum<PartKind>())
+            .Sample((text, kind) => ValueNotation.Parse(text, kind).IsUnderstood == ValueNotation.Parse(text, kind).Si.HasValue);
+
+    [Theory]
+    [MemberData(nameof(Markings))]
+    public void Marking_BothWays_Agree(ReferenceRow row)
+    {
+        var (kind, value) = (Enum.Parse<PartKind>(row["kind"]), row.Number("value"));
+        var written = kind switch
+        {
+            PartKind.Capacitor => PartMarking.Of(Capacitance.FromFarad(value)),
+            PartKind.Resistor => PartMarking.Of(Resistance.FromOhm(value)),
+            _ => PartMarking.Of(Inductance.FromHenry(value)),
+        };
+
+        Assert.Equal(row["marking"], written);
+        Assert.Equal(value, PartMarking.Parse(row["marking"], kind).Si!.Value, value * 1e-12);
+    }
+
+    [Fact]
+    public void MarkingParse_ToleranceLetterBehindTheCode_IsKept()
+    {
+        var read = PartMarking.Parse("104K", PartKind.Capacitor);
+
+        Assert.Equal((100e-9, 'K'), (read.Si, read.ToleranceLetter));
+    }
+
+    [Fact]
+    public void MarkingParse_EveryTwoFigureCapacitor_ComesBack() =>
+        Gen.Select(Gen.Int[0, 23], Gen.Int[-1, 6]).Sample((member, zeros) =>
+        {
+            var value = Capacitance.FromPicofarad(PreferredValues.Mantissas(ESeries.E24)[member] * Math.Pow(10, zeros));
+            return Math.Abs((PartMarking.Parse(PartMarking.Of(value), PartKind.Capacitor).Si!.Value / value.Farad) - 1) < 1e-9;
+        });
+
+    [Fact]
+    public void ToleranceLetter_BelowTenPicofarad_MeansPicofarad()
+    {
+        Assert.Equal(0.25 / 4.7, ToleranceLetter.Read('C', Capacitance.FromPicofarad(4.7))!.Value.Above, 12);
+        Assert.Equal(0.02, ToleranceLetter.Read('G', Capacitance.FromPicofarad(470))!.Value.Above, 12);
+    }
+
+    [Fact]
+    public void ToleranceLetter_LopsidedAndUnknown_AreToldApart()
+    {
+        Assert.Equal((-0.2, 0.8), (ToleranceLetter.Read('Z')!.Value.Below, ToleranceLetter.Read('Z')!.Value.Above));
+        Assert.Null(ToleranceLetter.Read('X'));
+    }
+}
