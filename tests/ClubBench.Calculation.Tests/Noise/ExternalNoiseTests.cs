@@ -1,0 +1,70 @@
+using ClubBench.Calculation.Noise;
+using ClubBench.Calculation.Quantities;
+
+namespace ClubBench.Calculation.Tests.Noise;
+
+public class ExternalNoiseTests
+{
+    public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("external-noise-figures");
+
+    [Theory]
+    [MemberData(nameof(Rows))]
+    public void Noise_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    {
+        var frequency = Frequency.FromMegahertz(row.Number("f_mhz"));
+
+        var figure = (row["site"], row["kind"]) switch
+        {
+            ("Galactic", _) => ExternalNoise.Galactic(frequency),
+            (var site, "median") => ExternalNoise.ManMade(Enum.Parse<NoiseSite>(site), frequency),
+            (var site, _) => ExternalNoise.At(Enum.Parse<NoiseSite>(site), frequency, NoiseHour.Quiet).Figure,
+        };
+
+        Assert.Equal(row.Number("expected_db"), figure.Db, row.Number("tolerance_db"));
+    }
+
+    [Fact]
+    public void At_BelowTheCriticalFrequency_LeavesGalacticNoiseOut()
+    {
+        var f = Frequency.FromMegahertz(7.03);
+
+        Assert.False(ExternalNoise.At(NoiseSite.QuietRural, f, NoiseHour.Median).CountsGalactic);
+        Assert.True(ExternalNoise.At(NoiseSite.QuietRural, f, NoiseHour.Median, Frequency.FromMegahertz(5)).CountsGalactic);
+    }
+
+    [Fact]
+    public void ManMade_OneOctaveUp_FallsBy8Decibels() =>
+        Assert.Equal(
+            -8.34,
+            (ExternalNoise.ManMade(NoiseSite.Rural, Frequency.FromMegahertz(14)) - ExternalNoise.ManMade(NoiseSite.Rural, Frequency.FromMegahertz(7))).Db,
+            0.005);
+
+    [Fact]
+    public void At_QuietRuralAbove30Megahertz_SaysItIsExtrapolated()
+    {
+        Assert.True(ExternalNoise.At(NoiseSite.QuietRural, Frequency.FromMegahertz(50.1), NoiseHour.Quiet).IsExtrapolated);
+        Assert.False(ExternalNoise.At(NoiseSite.QuietRural, Frequency.FromMegahertz(28), NoiseHour.Quiet).IsExtrapolated);
+    }
+
+    [Theory]
+    [InlineData(0.29)]
+    [InlineData(251)]
+    public void ManMade_OutsideTheModel_Throws(double mhz) =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => ExternalNoise.ManMade(NoiseSite.City, Frequency.FromMegahertz(mhz)));
+
+    [Fact]
+    public void FromMeasuredRise_TenDecibelsOverNoiseFigure15_Gives24Point56() =>
+        Assert.Equal(24.56, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.FromDb(10)).Db, 0.01);
+
+    [Fact]
+    public void FromMeasuredRise_NoRise_IsNoMoreThanTheLoadItself() =>
+        Assert.Equal(0, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.Zero).Db, 1e-12);
+
+    [Fact]
+    public void FromMeasuredRise_NoiseThatFalls_Throws() =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.FromDb(-1)));
+
+    [Fact]
+    public void At_UnknownSite_Throws() =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => ExternalNoise.At(NoiseSite.Unknown, Frequency.FromMegahertz(7), NoiseHour.Median));
+}

@@ -1,0 +1,92 @@
+using ClubBench.Calculation.Noise;
+using ClubBench.Calculation.Quantities;
+
+namespace ClubBench.Calculation.Tests.Noise;
+
+public class PreamplifierNeedTests
+{
+    public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("preamplifier-need");
+
+    [Theory]
+    [MemberData(nameof(Rows))]
+    public void Need_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    {
+        var site = Enum.Parse<NoiseSite>(row["site"]);
+        var frequency = Frequency.FromMegahertz(row.Number("f_mhz"));
+        var own = Decibels.FromDb(row.Has("noise_figure_and_loss_db") ? row.Number("noise_figure_and_loss_db") : 15);
+
+        var judgement = PreamplifierNeed.Judge(own, site, frequency);
+
+        var figure = row["quantity"] == "limit_db" ? judgement.LargestNoiseFigureAndLoss : judgement.AtQuietHour;
+        Assert.Equal(row.Number("expected"), figure.Db, row.Number("tolerance"));
+    }
+
+    [Theory]
+    [InlineData(7.03, 29, PreamplifierVerdict.NotNeeded)]
+    [InlineData(14.06, 29, PreamplifierVerdict.Marginal)]
+    [InlineData(28.06, 29, PreamplifierVerdict.Needed)]
+    public void Judge_RuralSiteLossyDirectConversionSet_FollowsTheTradesExpectation(double mhz, double ownDb, PreamplifierVerdict expected) =>
+        Assert.Equal(expected, PreamplifierNeed.Judge(Decibels.FromDb(ownDb), NoiseSite.Rural, Frequency.FromMegahertz(mhz)).Verdict);
+
+    [Fact]
+    public void Judge_SameSetWithTheDirectConversionCredit_IsAdequateAt14Megahertz()
+    {
+        var own = Decibels.FromDb(29) - PreamplifierNeed.DirectConversionCredit;
+
+        var judgement = PreamplifierNeed.Judge(own, NoiseSite.Rural, Frequency.FromMegahertz(14.06));
+
+        Assert.Equal(PreamplifierVerdict.Adequate, judgement.Verdict);
+        Assert.Equal(0.98, judgement.AtQuietHour.Db, 0.01);
+    }
+
+    [Theory]
+    [InlineData(false, 0.27)]
+    [InlineData(true, 0.13)]
+    public void Degradation_QuietRuralMedian_IsHalfForDirectConversion(bool direct, double expectedDb)
+    {
+        var own = Decibels.FromDb(15) - (direct ? PreamplifierNeed.DirectConversionCredit : Decibels.Zero);
+
+        Assert.Equal(expectedDb, PreamplifierNeed.Degradation(own, Decibels.FromDb(26.83)).Db, 0.01);
+    }
+
+    [Fact]
+    public void Degradation_NoiselessReceiver_IsNone() =>
+        Assert.Equal(0, PreamplifierNeed.Degradation(Decibels.Zero, Decibels.FromDb(20)).Db, 1e-12);
+
+    [Fact]
+    public void LargestFor_GoesBackToTheSameDegradation()
+    {
+        var own = PreamplifierNeed.LargestFor(Decibels.FromDb(0.7), Decibels.FromDb(22));
+
+        Assert.Equal(0.7, PreamplifierNeed.Degradation(own, Decibels.FromDb(22)).Db, 1e-12);
+    }
+
+    [Theory]
+    [InlineData(1, 7.07)]
+    [InlineData(0, 5.71)]
+    public void RequiredGain_QuietSiteAt28Megahertz_GivesThePrintedGain(double lossDb, double expectedDb) =>
+        Assert.Equal(expectedDb, Gain(15, 4, lossDb, 19.02)!.Value.Db, 0.02);
+
+    [Fact]
+    public void RequiredGain_Applied_LeavesTheWantedDegradation()
+    {
+        var gain = Gain(15, 4, 1, 19.02)!.Value;
+        var chain = new[]
+        {
+            ReceiverStage.Loss(Decibels.FromDb(1), Temperature.FromCelsius(16.85)),
+            new ReceiverStage(gain, Decibels.FromDb(4)),
+            new ReceiverStage(Decibels.Zero, Decibels.FromDb(15)),
+        };
+
+        Assert.Equal(0.5, PreamplifierNeed.Degradation(Cascade.NoiseFigure(chain), Decibels.FromDb(19.02)).Db, 1e-9);
+    }
+
+    [Fact]
+    public void RequiredGain_LossEatsEverything_HasNoSolution() => Assert.Null(Gain(15, 6, 10, 5));
+
+    [Fact]
+    public void RequiredGain_NoneNeeded_IsZero() => Assert.Equal(Decibels.Zero, Gain(15, 4, 0, 40));
+
+    private static Decibels? Gain(double receiverDb, double preamplifierDb, double lossDb, double externalDb) => PreamplifierNeed.RequiredGain(
+        Decibels.FromDb(receiverDb), Decibels.FromDb(preamplifierDb), Decibels.FromDb(lossDb), Decibels.FromDb(externalDb), Decibels.FromDb(0.5));
+}
