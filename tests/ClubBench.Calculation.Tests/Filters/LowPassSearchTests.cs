@@ -1,0 +1,143 @@
+using ClubBench.Calculation.Filters;
+using ClubBench.Calculation.Quantities;
+using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
+
+namespace ClubBench.Calculation.Tests.Filters;
+
+public class LowPassSearchTests
+{
+    private static readonly double[] E12 = [10, 12, 15, 18, 22, 27, 33, 39, 47, 56, 68, 82];
+    private static readonly double[] E24 = [10, 11, 12, 13, 15, 16, 18, 20, 22, 24, 27, 30, 33, 36, 39, 43, 47, 51, 56, 62, 68, 75, 82, 91];
+
+    [Fact]
+    public void Run_FiveElementsE12Pairs_FindsThePublishedOptimumOfTheWholeWindow()
+    {
+        var result = LowPassSearch.Run(Question(F7, E12, 0.12, true, 4.0, Band40m));
+
+        Assert.Equal((161_700, true), (result.Tried, result.Exhausted));
+        Assert.Equal(4.0743, result.Best.Max(c => c.LosslessMargin.Db), 1e-4);
+        var optimum = result.Best.MaxBy(c => c.LosslessMargin)!;
+        Assert.Equal([430, 780, 430], optimum.Capacitors.Select(c => Math.Round(c.Value.Picofarad)));
+        Assert.Equal([19, 19], optimum.Coils.Select(l => l.Turns));
+    }
+
+    [Theory]
+    [InlineData("f7", "e12", 0.15, 4.0, 32, 0.7462, "390 820 390", "18 18")]
+    [InlineData("f14", "e12", 0.15, 3.0, 128, 1.1636, "180 390 390 180", "15 16 15")]
+    [InlineData("f14", "e24", 0.12, 3.0, 648, 4.1781, "160 390 390 160", "16 17 16")]
+    public void Run_SingleParts_FindsThePublishedOptimum(
+        string filter, string series, double window, double factor, long tried, double marginDb, string picofarads, string turns)
+    {
+        var (design, requirement) = filter == "f7" ? (F7, Band40m) : (F14, Band20m);
+
+        var result = LowPassSearch.Run(Question(design, series == "e12" ? E12 : E24, window, false, factor, requirement));
+
+        var optimum = result.Best.MaxBy(c => c.LosslessMargin)!;
+        Assert.Equal(tried, result.Tried);
+        Assert.Equal(marginDb, optimum.LosslessMargin.Db, 1e-4);
+        Assert.Equal(picofarads, string.Join(' ', optimum.Capacitors.Select(c => (int)Math.Round(c.Value.Picofarad))));
+        Assert.Equal(turns, string.Join(' ', optimum.Coils.Select(l => l.Turns)));
+    }
+
+    [Fact]
+    public void Run_LosslessParts_RankingMarginIsTheMarginOfTheAnalysedLadder()
+    {
+        var result = LowPassSearch.Run(Question(F14, E24, 0.12, false, 3.0, Band20m));
+
+        Assert.All(result.Best, c => Assert.Equal(c.LosslessMargin.Db, c.Figures.Margin.Db, 1e-6));
+    }
+
+    [Fact]
+    public void Run_EveryCombinationByHand_HasNoneBetter()
+    {
+        var question = Question(F7, E12, 0.15, false, 4.0, Band40m);
+        var byHand =
+            from a in question.Capacitors[0] from b in question.Capacitors[1] from c in question.Capacitors[2]
+            from l in question.Coils[0] from m in question.Coils[1]
+            select LowPassFigures.Of(F7 with { Capacitors = [a.Value, b.Value, c.Value], Coils = [l.Value, m.Value] }, Band40m).Margin.Db;
+
+        Assert.Equal(byHand.Max(), LowPassSearch.Run(question).Best.Max(c => c.LosslessMargin.Db), 1e-6);
+    }
+
+    [Fact]
+    public void Run_SymmetricSevenElementPairs_MeetsTheKitRequirementOn20m()
+    {
+        var requirement = new LowPassRequirement(FrequencyRange.FromMegahertz(14.0, 14.1), Decibels.FromDb(24), [new(2, Decibels.FromDb(40)), new(3, Decibels.FromDb(60))]);
+        var question = Question(F14, E24, 0.12, true, 3.0, requirement) with { Symmetric = true, CoilQ = 150, CapacitorQ = 1000 };
+
+        var result = LowPassSearch.Run(question);
+
+        Assert.Equal(LowPassSearchEnding.Met, result.Ending);
+        Assert.All(result.Best, c => Assert.Equal(c.Design.Capacitors.Reverse(), c.Design.Capacitors));
+        Assert.True(result.Best[0].Figures.WorstPassLoss.Db > 0.1);
+    }
+
+    [Fact]
+    public void Run_MoreThanAllowed_ThinsAndSaysSo()
+    {
+        var full = Question(F7, E12, 0.12, true, 4.0, Band40m);
+
+        var result = LowPassSearch.Run(full with { MostCombinations = 5000 });
+
+        Assert.False(result.Exhausted);
+        Assert.InRange(result.Tried, 1000, 5000);
+        Assert.True(result.Best.Max(c => c.LosslessMargin) <= LowPassSearch.Run(full).Best.Max(c => c.LosslessMargin));
+    }
+
+    [Fact]
+    public void Run_PlaceWithoutCandidate_NamesThePlace()
+    {
+        var question = Question(F7, E12, 0.12, false, 4.0, Band40m);
+
+        var result = LowPassSearch.Run(question with { Capacitors = [question.Capacitors[0], [], question.Capacitors[2]] });
+
+        Assert.Equal((LowPassSearchEnding.PlaceWithoutCandidate, 2), (result.Ending, result.EmptyPlace));
+        Assert.Empty(result.Best);
+    }
+
+    [Fact]
+    public void Run_RequirementOutOfReach_GivesTheNearestAttempt()
+    {
+        var harder = Band40m with { Harmonics = [new(2, Decibels.FromDb(43))] };
+
+        var result = LowPassSearch.Run(Question(F7, E12, 0.12, true, 4.0, harder));
+
+        Assert.Equal(LowPassSearchEnding.FallsShort, result.Ending);
+        Assert.True(result.Best[0].Figures.Margin < Decibels.Zero);
+    }
+
+    [Fact]
+    public void Run_NearlyEqualMargins_PrefersFewerCapacitors()
+    {
+        var result = LowPassSearch.Run(Question(F7, E12, 0.12, true, 4.0, Band40m));
+        var first = result.Best[0];
+
+        var rivals = result.Best.Where(c => first.Figures.Margin - c.Figures.Margin < Decibels.Zero);
+
+        Assert.All(rivals, c => Assert.True(c.Capacitors.Sum(p => p.Parts) >= first.Capacitors.Sum(p => p.Parts)));
+    }
+
+    [Fact]
+    public void Capacitors_EqualSums_KeepTheSinglePart()
+    {
+        var choices = LowPassCandidates.Capacitors(Capacitance.FromPicofarad(220), Values(E12), 0.01, pairs: true);
+
+        var choice = Assert.Single(choices, c => Math.Abs(c.Value.Picofarad - 220) < 1e-6);
+        Assert.Null(choice.Second);
+    }
+
+    private static LowPassRequirement Band40m =>
+        new(FrequencyRange.FromMegahertz(7.0, 7.3), Decibels.FromDb(20), [new(2, Decibels.FromDb(24)), new(3, Decibels.FromDb(44))]);
+
+    private static LowPassRequirement Band20m =>
+        new(FrequencyRange.FromMegahertz(14.0, 14.35), Decibels.FromDb(24), [new(2, Decibels.FromDb(40)), new(3, Decibels.FromDb(60))]);
+
+    private static LowPassSearchInput Question(LowPassDesign exact, double[] series, double window, bool pairs, double factor, LowPassRequirement requirement) => new(
+        exact,
+        [.. exact.Capacitors.Select(c => LowPassCandidates.Capacitors(c, Values(series), window, pairs))],
+        [.. exact.Coils.Select(l => LowPassCandidates.Coils(l, InductanceFactor.FromNanohenryPerTurnSquared(factor)))],
+        requirement);
+
+    private static IEnumerable<(Capacitance Value, int StockRank)> Values(double[] series) =>
+        new[] { 0.1, 1.0, 10.0, 100.0 }.SelectMany(d => series.Select(v => (Capacitance.FromPicofarad(v * d), 0)));
+}
