@@ -1,0 +1,22 @@
+using ClubBench.Web.Components;
+using ClubBench.Web.State;
+using MudBlazor.Services;
+
+namespace ClubBench.Web.Hosting;
+
+/// <summary>The pages: Blazor circuits for planning, static islands where a page says so.</summary>
+internal static class PagesFeature
+{
+    public static void AddPages(this WebApplicationBuilder builder)
+    {
+        var services = builder.Services;
+        services.AddLocalization();
+        services.AddMudServices();
+        services.AddCascadingAuthenticationState();
+        services.AddScoped<OpenPlace>();
+        services.AddRazorComponents().AddInteractiveServerComponents(options => options.DetailedErrors = builder.Environment.IsDevelopment());
+    }
+
+    public static void MapPages(this WebApplication app) =>
+        app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
+}

@@ -1,0 +1,18 @@
+namespace ClubBench.Web.Hosting;
+
+/// <summary>The web server itself: what it says of itself, and what a person sees when something breaks outside a page.</summary>
+internal static class ServerFeature
+{
+    public static void AddServer(this WebApplicationBuilder builder)
+    {
+        builder.WebHost.ConfigureKestrel(options => options.AddServerHeader = false);
+        builder.Services.AddSingleton(TimeProvider.System);
+        builder.Services.AddProblemDetails();
+    }
+
+    public static void UseProblemPages(this WebApplication app)
+    {
+        if (!app.Environment.IsDevelopment()) app.UseExceptionHandler("/problem", createScopeForErrors: true);
+        app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
+    }
+}

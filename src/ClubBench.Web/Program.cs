@@ -1,0 +1,11 @@
+using ClubBench.Web.Hosting;
+
+var builder = WebApplication.CreateBuilder(args);
+builder.AddClubBench();
+
+var app = builder.Build();
+app.MapClubBench();
+await app.RunAsync();
+
+/// <summary>Entry point; public so that tests can host the application.</summary>
+public partial class Program;
