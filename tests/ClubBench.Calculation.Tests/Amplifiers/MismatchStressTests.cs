@@ -1,0 +1,34 @@
+using ClubBench.Calculation.Amplifiers;
+using ClubBench.Calculation.Quantities;
+
+namespace ClubBench.Calculation.Tests.Amplifiers;
+
+public class MismatchStressTests
+{
+    private static readonly Resistance FiftyOhm = Resistance.FromOhm(50);
+
+    [Theory]
+    [InlineData(double.PositiveInfinity, 44.72)]
+    [InlineData(3, 33.54)]
+    [InlineData(1, 22.36)]
+    public void FromForward_FiveWatt_MatchesPublishedFigures(double ratio, double volt) =>
+        Assert.Equal(volt, MismatchStress.FromForward(Power.FromWatt(5), FiftyOhm, ratio).Voltage.Volt, 0.01);
+
+    [Fact]
+    public void FromDelivered_FiveWattAtThree_MatchesPublishedFigures()
+    {
+        var stress = MismatchStress.FromDelivered(Power.FromWatt(5), FiftyOhm, 3);
+
+        Assert.Equal(38.73, stress.Voltage.Volt, 0.01);
+        Assert.Equal(38.73 / 50, stress.Current.Ampere, 0.001);
+    }
+
+    [Fact]
+    public void FromForward_SameDeliveredPower_Agrees()
+    {
+        var reflection = 0.5;
+        var forward = Power.FromWatt(5 / (1 - (reflection * reflection)));
+
+        Assert.Equal(MismatchStress.FromDelivered(Power.FromWatt(5), FiftyOhm, 3).Voltage.Volt, MismatchStress.FromForward(forward, FiftyOhm, 3).Voltage.Volt, 1e-9);
+    }
+}
