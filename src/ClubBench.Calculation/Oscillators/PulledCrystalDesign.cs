@@ -1,3 +1,4 @@
+using ClubBench.Calculation.Components;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Oscillators;
@@ -40,12 +41,7 @@ public static class PulledCrystalDesign
 
     /// <summary>Moulded chokes of the E12 series from 1 to 330 uH. Source: iec-60063.</summary>
     public static IReadOnlyList<Inductance> MouldedChokes { get; } =
-    [
-        .. from decade in new[] { 1.0, 10.0, 100.0 }
-           from step in new[] { 1.0, 1.2, 1.5, 1.8, 2.2, 2.7, 3.3, 3.9, 4.7, 5.6, 6.8, 8.2 }
-           where decade * step <= 330
-           select Inductance.FromMicrohenry(decade * step),
-    ];
+        [.. PreferredValues.Between(1, 330, ESeries.E12).Select(Inductance.FromMicrohenry)];
 
     /// <summary>
     /// The inductor that gives a span in Hz (above zero) with the capacitors and crystals of <paramref name="loop"/>, whose own inductor is
