@@ -74,22 +74,3 @@ public sealed class Chain
 
     private Complex Nominal(Port port) => KindOf(port.Stage).Description.Port(port.Name)?.NominalOhm ?? 50;
 }
-
-/// <summary>What holds for a whole chain.</summary>
-/// <param name="Band">Segment in use.</param>
-/// <param name="Reference">Frequency the club meets on.</param>
-/// <param name="WantedPower">Output wanted at the antenna; null for a receiver.</param>
-/// <param name="Pitch">Audio pitch.</param>
-/// <param name="Site">Noise category of the site.</param>
-/// <param name="Limits">Emission limit set.</param>
-/// <param name="WishMargin">Margin that ranks alternatives.</param>
-/// <param name="Learnt">What readings taught.</param>
-public sealed record ChainConditions(
-    FrequencyRange Band,
-    Frequency Reference,
-    Power? WantedPower,
-    Frequency Pitch,
-    Calculation.Noise.SiteCategory Site,
-    Calculation.Emissions.EmissionLimitSet Limits,
-    Decibels WishMargin,
-    LearntValues Learnt);

@@ -25,7 +25,7 @@ public sealed record Target(
     FrequencyRange Segment,
     Frequency Reference,
     int Region,
-    SiteCategory Site,
+    NoiseSite Site,
     Power? WantedPower,
     Frequency Pitch,
     string LimitSetId,
