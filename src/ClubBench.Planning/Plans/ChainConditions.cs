@@ -51,5 +51,5 @@ public sealed record ChainConditions(
 
     /// <summary>A calling frequency of the table inside the band, or its middle.</summary>
     private static Frequency MeetingPoint(FrequencyRange band) =>
-        AmateurBands.Rows.Where(r => r.Range.WidthHertz == 0 && band.Contains(r.Range.Low)).Select(r => (Frequency?)r.Range.Low).FirstOrDefault() ?? band.Middle;
+        AmateurBands.All.Where(r => r.Use is BandUse.QrpCwCentre or BandUse.CwCalling && band.Contains(r.Range.Low)).Select(r => (Frequency?)r.Range.Low).FirstOrDefault() ?? band.Middle;
 }

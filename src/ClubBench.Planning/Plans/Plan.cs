@@ -1,3 +1,5 @@
+using ClubBench.Calculation.Bands;
+using ClubBench.Calculation.Noise;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Planning.Advising;
 using ClubBench.Planning.Budgets;
@@ -5,7 +7,6 @@ using ClubBench.Planning.Cards;
 using ClubBench.Planning.Drawings;
 using ClubBench.Planning.Figures;
 using ClubBench.Planning.Kits;
-using ClubBench.Calculation.Noise;
 
 namespace ClubBench.Planning.Plans;
 
@@ -13,7 +14,7 @@ namespace ClubBench.Planning.Plans;
 /// <param name="BandName">Band name of the table, e.g. "20 m".</param>
 /// <param name="Segment">Segment the rig shall cover as far as its scheme allows.</param>
 /// <param name="Reference">Frequency the club meets on.</param>
-/// <param name="Region">ITU region, 1 to 3.</param>
+/// <param name="Region">ITU region.</param>
 /// <param name="Site">Noise category of the site.</param>
 /// <param name="WantedPower">Output wanted at the antenna; null for a receiver.</param>
 /// <param name="Pitch">Audio pitch a station is heard at.</param>
@@ -24,7 +25,7 @@ public sealed record Target(
     string BandName,
     FrequencyRange Segment,
     Frequency Reference,
-    int Region,
+    ItuRegion Region,
     NoiseSite Site,
     Power? WantedPower,
     Frequency Pitch,

@@ -9,7 +9,7 @@ namespace ClubBench.Planning.Plans;
 public static class TargetDefaults
 {
     /// <summary>The built-in set with one figure for all powers; the coordinator confirms or changes it.</summary>
-    public const string LimitSetId = "us-47cfr97-307d";
+    public const string LimitSetId = "fcc-97307d-new";
 
     /// <summary>Wish margin of harmonics (common practice).</summary>
     public static Decibels WishMargin { get; } = Decibels.FromDb(10);
@@ -18,10 +18,15 @@ public static class TargetDefaults
     public static Frequency Pitch { get; } = Frequency.FromHertz(700);
 
     /// <summary>A target on a band: its telegraphy segment and calling frequency from the table. Null where the table has no such segment.</summary>
-    public static Target? On(string bandName, Kit kit, int region, NoiseSite site = NoiseSite.Residential)
+    public static Target? On(string bandName, Kit kit, ItuRegion region, NoiseSite site = NoiseSite.Residential)
     {
-        if (AmateurBands.TelegraphySegment(bandName, region) is not { } segment) return null;
-        var reference = AmateurBands.LowPowerTelegraphyCentre(bandName, region) ?? segment.Middle;
-        return new Target(bandName, segment, reference, region, site, kit.OutputPower, Pitch, LimitSetId, null, WishMargin);
+        if (AmateurBands.CwSegment(bandName, region)?.Range is not { } segment) return null;
+        var reference = AmateurBands.QrpCwCentres(bandName, region).Select(c => (Frequency?)c.Range.Low).FirstOrDefault(segment.Holds) ?? segment.Middle;
+        return new Target(bandName, segment, reference, region, site, kit.OutputPower, Pitch, LimitSetFor(segment), null, WishMargin);
     }
+
+    private static bool Holds(this FrequencyRange range, Frequency? f) => f is { } spot && range.Contains(spot);
+
+    /// <summary>Above 30 MHz another paragraph of the same rules speaks.</summary>
+    private static string LimitSetFor(FrequencyRange segment) => segment.High.Megahertz < 30 ? LimitSetId : "fcc-97307e";
 }

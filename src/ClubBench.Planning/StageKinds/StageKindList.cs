@@ -6,6 +6,7 @@ public static class StageKindList
     /// <summary>Every kind, in the order they are offered.</summary>
     public static IReadOnlyList<IStageKind> All { get; } =
     [
+        new LowPassLadder.LowPassLadderKind(),
     ];
 
     private static readonly Dictionary<string, IStageKind> ById = All.ToDictionary(k => k.Description.Id, StringComparer.Ordinal);
