@@ -9,7 +9,15 @@ namespace ClubBench.Planning.Plans;
 /// <param name="Quantity">Pieces (metre for wire).</param>
 /// <param name="Lot">Name of the lot, empty for none.</param>
 /// <param name="MayBeTuned">Whether it may go into a tuned place (NP0, mica, film; never bypass grade).</param>
-public sealed record StockLine(PartClass Class, string Type, double? ValueSi, double Quantity, string Lot = "", bool MayBeTuned = true);
+/// <param name="MeasuredSi">What was measured or learnt of the lot, by the names of part values (motional capacitance of crystals, limits of trimmers); null for nothing.</param>
+public sealed record StockLine(
+    PartClass Class,
+    string Type,
+    double? ValueSi,
+    double Quantity,
+    string Lot = "",
+    bool MayBeTuned = true,
+    IReadOnlyDictionary<string, double>? MeasuredSi = null);
 
 /// <summary>What the club has, and whether it may buy the rest.</summary>
 /// <param name="Lines">The drawers.</param>

@@ -6,6 +6,7 @@ public static class StageKindList
     /// <summary>Every kind, in the order they are offered.</summary>
     public static IReadOnlyList<IStageKind> All { get; } =
     [
+        new PulledCrystalOscillator.PulledCrystalOscillatorKind(),
         new LowPassLadder.LowPassLadderKind(),
     ];
 
