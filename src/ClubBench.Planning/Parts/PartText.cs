@@ -28,7 +28,7 @@ public static class PartText
     /// <summary>What stands on the part itself, piece by piece; empty where the parts of this class carry nothing readable.</summary>
     public static IReadOnlyList<string> Markings(Part part, PartClass @class) => @class switch
     {
-        PartClass.Capacitor when part.Value(PartValue.Capacitance) is not null => [.. CapacitorPart.Pieces(part).Select(ValueNotation.Marking)],
+        PartClass.Capacitor when part.Value(PartValue.Capacitance) is not null => [.. CapacitorPart.Pieces(part).Select(PartMarking.Of)],
         PartClass.Winding when Calculation.Windings.Cores.Find(part.Type) is Calculation.Windings.IronPowderCore core => [core.Colour],
         PartClass.Crystal or PartClass.Transistor or PartClass.Diode or PartClass.IntegratedCircuit => [part.Type],
         _ => [],

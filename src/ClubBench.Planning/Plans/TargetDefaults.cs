@@ -21,11 +21,9 @@ public static class TargetDefaults
     public static Target? On(string bandName, Kit kit, ItuRegion region, NoiseSite site = NoiseSite.Residential)
     {
         if (AmateurBands.CwSegment(bandName, region)?.Range is not { } segment) return null;
-        var reference = AmateurBands.QrpCwCentres(bandName, region).Select(c => (Frequency?)c.Range.Low).FirstOrDefault(segment.Holds) ?? segment.Middle;
+        var reference = AmateurBands.QrpCwCentres(bandName, region).Select(c => (Frequency?)c.Range.Low).FirstOrDefault(f => f is { } spot && segment.Contains(spot)) ?? segment.Middle;
         return new Target(bandName, segment, reference, region, site, kit.OutputPower, Pitch, LimitSetFor(segment), null, WishMargin);
     }
-
-    private static bool Holds(this FrequencyRange range, Frequency? f) => f is { } spot && range.Contains(spot);
 
     /// <summary>Above 30 MHz another paragraph of the same rules speaks.</summary>
     private static string LimitSetFor(FrequencyRange segment) => segment.High.Megahertz < 30 ? LimitSetId : "fcc-97307e";

@@ -59,7 +59,7 @@ internal static class LowPassConversion
             stage.CoilQ,
             stage.CapacitorQ) { Keep = 1, PassPoints = 5, Symmetric = IsSymmetric(exact) };
         var result = LowPassSearch.Run(input);
-        return result.Best.Count == 0 ? null : AlternativeOf(stage, document, result, core, pairs, shelf);
+        return result.Best.IsEmpty ? null : AlternativeOf(stage, document, result, core, pairs, shelf);
     }
 
     private static bool IsSymmetric(LowPassDesign d) =>
