@@ -1,0 +1,80 @@
+using ClubBench.Calculation.Filters;
+using ClubBench.Calculation.Quantities;
+using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
+
+namespace ClubBench.Calculation.Tests.Filters;
+
+public class LadderYieldTests
+{
+    [Theory]
+    [InlineData(0.05, 0.05, 0.904)]
+    [InlineData(0.10, 0.05, 0.649)]
+    [InlineData(0.05, 0.02, 0.998)]
+    [InlineData(0.03, 0.02, 1.000)]
+    public void Of_IndependentParts_MatchesPublishedYields(double coil, double capacitor, double expected)
+    {
+        var result = LadderYield.Of(Question(new(capacitor, 0, coil)));
+
+        Assert.Equal(expected, result.Passed.Share, 0.015);
+    }
+
+    [Fact]
+    public void Of_SameSeed_TellsTheSameNumber()
+    {
+        var question = Question(new(0.05, 0.05, 0.02)) with { Trials = 1000 };
+
+        Assert.Equal(LadderYield.Of(question).Passed, LadderYield.Of(question).Passed);
+        Assert.NotEqual(LadderYield.Of(question).Passed, LadderYield.Of(question with { Seed = 2 }).Passed);
+    }
+
+    [Fact]
+    public void Of_NoScatter_IsTheAnalysedFilter()
+    {
+        var question = Question(new(0, 0, 0)) with { Trials = 100 };
+        var figures = LowPassFigures.Of(F7, question.Requirement, 150, 1000);
+
+        var result = LadderYield.Of(question);
+
+        Assert.Equal(1, result.Passed.Share);
+        Assert.Equal(figures.Margin.Db, result.Margin.Db, 1e-9);
+        Assert.Equal(figures.WorstReturnLoss.Db, result.ReturnLoss.Db, 1e-9);
+        Assert.Equal(figures.Harmonics.Select(h => Math.Round(h.Attenuation.Db, 9)), result.Harmonics.Select(h => Math.Round(h.Attenuation.Db, 9)));
+    }
+
+    [Fact]
+    public void Of_OneBatchInsteadOfIndependentCoils_WidensTheScatter()
+    {
+        var requirement = Question(new(0, 0, 0)).Requirement with { ReturnLoss = Decibels.FromDb(10) };
+
+        var batch = LadderYield.Of(Question(new(0, 0.08, 0)) with { Requirement = requirement });
+        var single = LadderYield.Of(Question(new(0, 0, 0.08)) with { Requirement = requirement });
+
+        Assert.True(batch.Harmonics[0].Attenuation < single.Harmonics[0].Attenuation);
+    }
+
+    [Fact]
+    public void Of_TwoBatchesOfOneCoilEach_IsTheIndependentCase()
+    {
+        var two = LadderYield.Of(Question(new(0.05, 0.05, 0)) with { CoreBatches = [0, 1] });
+
+        Assert.Equal(0.904, two.Passed.Share, 0.015);
+    }
+
+    [Fact]
+    public void Of_Interval_HoldsTheShare()
+    {
+        var passed = LadderYield.Of(Question(new(0.05, 0.05, 0.02))).Passed;
+        var (low, high) = passed.Interval();
+
+        Assert.True(low < passed.Share && passed.Share < high);
+        Assert.True(high - low < 0.02);
+    }
+
+    private static LadderYieldInput Question(PartScatter scatter) => new(
+        F7,
+        new(FrequencyRange.FromMegahertz(7.0, 7.3), Decibels.FromDb(17), [new(2, Decibels.FromDb(23)), new(3, Decibels.FromDb(43))]),
+        scatter,
+        20261201,
+        150,
+        1000);
+}
