@@ -93,7 +93,9 @@ public sealed record CrystalParameters(
         if (overtone < 3 || overtone % 2 == 0) throw new ArgumentOutOfRangeException(nameof(overtone), overtone, "An overtone is an odd number from 3 on.");
         return this with
         {
-            SeriesResonance = SeriesResonance * overtone, MotionalCapacitance = MotionalCapacitance / (overtone * overtone), Overtone = overtone,
+            SeriesResonance = SeriesResonance * overtone,
+            MotionalCapacitance = MotionalCapacitance / (overtone * overtone),
+            Overtone = overtone,
         };
     }
 

@@ -47,7 +47,9 @@ public static class MotionalMeasurement
         var q = withSeries / alone * (withSeries / alone);
         var loadF = oscillator.Farad * series.Farad / (oscillator.Farad + series.Farad);
         var (near, far) = (staticCapacitance.Farad + loadF, staticCapacitance.Farad + oscillator.Farad);
-        var motionalF = (q - 1) / ((1 / near) - (q / far));
+        var slope = (1 / near) - (q / far);
+        if (slope <= 0) return Refused(MeasurementRefusal.NoSuchCrystal);
+        var motionalF = (q - 1) / slope;
         var fs = alone / Math.Sqrt(1 + (motionalF / far));
         return Checked(fs, motionalF, staticCapacitance.Farad);
     }

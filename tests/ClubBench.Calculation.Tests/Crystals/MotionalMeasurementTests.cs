@@ -83,6 +83,12 @@ public class MotionalMeasurementTests
             MotionalMeasurement.FromOscillatorShift(Frequency.FromMegahertz(9), Frequency.FromMegahertz(9), Pf(33), Pf(235), Pf(4)).Refusal);
 
     [Fact]
+    public void OscillatorShift_ShiftNoCrystalHas_IsRefused() =>
+        Assert.Equal(
+            MeasurementRefusal.NoSuchCrystal,
+            MotionalMeasurement.FromOscillatorShift(Frequency.FromMegahertz(9), Frequency.FromMegahertz(40), Pf(33), Pf(235), Pf(4)).Refusal);
+
+    [Fact]
     public void Transmission_NegativeLoss_Throws() => Assert.Throws<ArgumentOutOfRangeException>(() => new TransmissionMeasurement(
         Frequency.FromMegahertz(9), 480, Decibels.FromDb(-0.1), Resistance.FromOhm(12.5), Resistance.FromOhm(12.5)));
 
