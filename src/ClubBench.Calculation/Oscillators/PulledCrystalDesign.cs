@@ -71,7 +71,7 @@ public static class PulledCrystalDesign
 
     /// <summary>
     /// Largest inductor that still leaves the crystal in control at the maximum of the variable capacitor:
-    /// both |S_L| up to 0.005 and f_LC/f from 1.3. Zero when even the smallest inductor is too much.
+    /// both |S_L| up to 0.005 and f_LC/f from 1.3. Practically zero when even the smallest inductor is too much or the loop is refused.
     /// </summary>
     public static Inductance LargestSafe(PulledCrystalLoop loop)
     {

@@ -27,24 +27,30 @@ public static class ReceiveOffset
 
     /// <summary>
     /// The capacitor that shifts by <paramref name="wantedHertz"/> (size, above zero; the place gives the sign) at a setting of the variable
-    /// capacitor. Not found when even a short circuit (or, in series, the smallest capacitor) shifts less: the result then holds that end.
+    /// capacitor. Not found when even a short circuit (or, in series, the smallest capacitor) shifts less, or the loop fails before: the result
+    /// then holds the end that comes nearest. Throws when the loop itself is refused there.
     /// </summary>
     public static OffsetSolution Solve(PulledCrystalLoop loop, OffsetPlace place, double wantedHertz, Capacitance variable)
     {
         Guard.Positive(wantedHertz, nameof(wantedHertz));
         var strongest = place.Sign < 0 ? LargestF : SmallestF;
-        if (Size(strongest) < wantedHertz) return Result(false, strongest);
+        if (!IsPast(strongest)) return Result(Capacitance.FromFarad(strongest));
 
-        var reached = place.Sign < 0;
-        var logF = Bisection.TurningPoint(x => Size(Math.Exp(x)) >= wantedHertz == reached, Math.Log(SmallestF), Math.Log(LargestF), 1e-12);
-        return Result(true, Math.Exp(logF));
+        var growing = place.Sign < 0;
+        var turn = Bisection.TurningPoint(x => IsPast(Math.Exp(x)) == growing, Math.Log(SmallestF), Math.Log(LargestF), 1e-12);
+        var weakerSide = growing ? -1e-9 : 1e-9;
+        return Result(Capacitance.FromFarad(Math.Exp(turn + weakerSide)));
 
-        double Size(double farad) => Math.Abs(At(loop, place, Capacitance.FromFarad(farad), variable));
-
-        OffsetSolution Result(bool found, double farad)
+        bool IsPast(double farad)
         {
-            var capacitor = Capacitance.FromFarad(farad);
-            return new OffsetSolution(found, capacitor, At(loop, place, capacitor, variable));
+            var added = Capacitance.FromFarad(farad);
+            return place.With(loop, added).RefusalAt(variable) != LoopRefusal.None || Math.Abs(At(loop, place, added, variable)) >= wantedHertz;
+        }
+
+        OffsetSolution Result(Capacitance capacitor)
+        {
+            var offsetHz = At(loop, place, capacitor, variable);
+            return new OffsetSolution(Math.Abs(offsetHz) >= wantedHertz * (1 - 1e-6), capacitor, offsetHz);
         }
     }
 }

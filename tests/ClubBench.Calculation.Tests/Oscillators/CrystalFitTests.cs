@@ -54,6 +54,18 @@ public class CrystalFitTests
     }
 
     [Fact]
+    public void FromLoads_AsManyReadingsAsParameters_FitsWithoutStandardError()
+    {
+        var truth = Bench.Crystal with { StaticCapacitance = Pf(4.4) };
+        LoadedReading[] readings = [.. new[] { 12, 33, 100 }.Select(pf => new LoadedReading(Pf(pf), truth.LoadedFrequency(Pf(pf))))];
+
+        var fit = CrystalFit.FromLoads(readings);
+
+        Assert.Equal(20, fit.Crystal!.MotionalCapacitance.Farad * 1e15, 0.01);
+        Assert.Equal((0, (double?)null), (fit.DegreesOfFreedom, fit.StandardErrorOfMotional));
+    }
+
+    [Fact]
     public void Fit_TwoLoads_IsRefused() =>
         Assert.Equal(MeasurementRefusal.TooFewLoads, CrystalFit.FromLoads([Reading(12, 10_121_830), Reading(22, 10_119_607)]).Refusal);
 

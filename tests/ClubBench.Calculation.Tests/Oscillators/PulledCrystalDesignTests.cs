@@ -78,6 +78,32 @@ public class PulledCrystalDesignTests
     }
 
     [Fact]
+    public void LargestSafe_ThirdOvertoneAt28Megahertz_PullsAboutOneKilohertzWithoutACoil()
+    {
+        var loop = Plain(28.06, 2.1, 5.3, 0) with { HolderCapacitance = Pf(1), OscillatorCapacitance = Pf(60) };
+
+        var safe = PulledCrystalDesign.LargestSafe(loop);
+
+        Assert.Equal(1308, loop.Range().SpanHertz, 2.0);
+        Assert.Equal(3.53, safe.Microhenry, 0.018);
+        Assert.Equal(5326, loop.WithInductance(safe).Range().SpanHertz, 27.0);
+    }
+
+    [Fact]
+    public void LargestSafe_FundamentalAt14Megahertz_DoubledPullsTenTimesFurther()
+    {
+        var loop = Plain(14.03, 24, 5.5, 0) with { HolderCapacitance = Pf(1) };
+
+        var span = loop.WithInductance(PulledCrystalDesign.LargestSafe(loop)).Range().SpanHertz;
+
+        Assert.Equal(58_100, 2 * span, 291.0);
+    }
+
+    [Fact]
+    public void Range_PlainOscillator_TunesFarMoreUnevenlyAtTheTop() =>
+        Assert.Equal(373.1 / 7.859, Plain(7.03, 18, 4.5, 22).Range().SlopeRatio, 0.5);
+
+    [Fact]
     public void Scaled_TwiceTheFrequency_IsAQuarter() =>
         Assert.Equal(5.5, PulledCrystalDesign.Scaled(Inductance.FromMicrohenry(22), Frequency.FromMegahertz(7.03), Frequency.FromMegahertz(14.06)).Microhenry, 1e-9);
 }

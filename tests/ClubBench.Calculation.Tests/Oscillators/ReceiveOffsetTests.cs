@@ -41,12 +41,12 @@ public class ReceiveOffsetTests
     [Theory]
     [InlineData(700, 37)]
     [InlineData(850, 48)]
-    public void Solve_KitAOn20Metres_NeedsAbout39To47Picofarad(double wantedHz, double atMostPf)
+    public void Solve_KitAOn20Metres_NeedsLessThanHalfTheOldCapacitor(double wantedHz, double expectedPf)
     {
         var solution = ReceiveOffset.Solve(KitA20, KitAPlace, wantedHz, Pf(50));
 
         Assert.True(solution.IsFound);
-        Assert.InRange(solution.Capacitor.Picofarad, atMostPf - 1, atMostPf + 0.5);
+        Assert.Equal(expectedPf, solution.Capacitor.Picofarad, 1.0);
         Assert.Equal(-wantedHz, solution.OffsetHertz, 1e-3);
     }
 
@@ -66,6 +66,18 @@ public class ReceiveOffsetTests
 
         Assert.False(solution.IsFound);
         Assert.InRange(solution.OffsetHertz, -700, 0);
+    }
+
+    [Fact]
+    public void Solve_LoopThatFailsBeforeTheOffset_ReturnsTheNearestUsableCapacitor()
+    {
+        var loop = KitA30 with { NodeStray = Pf(24) };
+
+        var solution = ReceiveOffset.Solve(loop, new OffsetPlace.AcrossVariable(), 2_000_000, Pf(12));
+
+        Assert.False(solution.IsFound);
+        Assert.Equal(LoopRefusal.NodeStrayResonance, new OffsetPlace.AcrossVariable().With(loop, Pf(1e6)).RefusalAt(Pf(12)));
+        Assert.Equal(LoopRefusal.None, new OffsetPlace.AcrossVariable().With(loop, solution.Capacitor).RefusalAt(Pf(12)));
     }
 
     [Fact]
