@@ -34,7 +34,10 @@ public sealed record ToroidWinding(ToroidCore Core, int Turns, Wire Wire)
     public Length WireLength => (Turns * LengthPerTurn * Slack) + Tails;
 
     /// <summary>Length to cut as printed on a card: rounded up to the next 10 mm.</summary>
-    public Length CutLength => Length.FromMillimetre(10 * Math.Ceiling((WireLength.Millimetre / 10) - 1e-9));
+    public Length CutLength => NextTenMillimetre(WireLength);
+
+    /// <summary>The same with one turn more on each tail, where turns may have to be added after measuring.</summary>
+    public Length CutLengthToAdjust => NextTenMillimetre(WireLength + (2 * LengthPerTurn));
 
     /// <summary>Wire of one turn on a ring.</summary>
     public static Length TurnLength(ToroidCore core, Wire wire) =>
@@ -67,4 +70,6 @@ public sealed record ToroidWinding(ToroidCore Core, int Turns, Wire Wire)
     /// <summary>The thickest listed metric wire with which these turns fill at most this share of a single layer; null where none does.</summary>
     public static Wire? LargestWire(ToroidCore core, int turns, double largestFill = 1) =>
         Wires.Metric.LastOrDefault(w => turns <= largestFill * CapacityOf(core, w));
+
+    private static Length NextTenMillimetre(Length length) => Length.FromMillimetre(10 * Math.Ceiling((length.Millimetre / 10) - 1e-9));
 }
