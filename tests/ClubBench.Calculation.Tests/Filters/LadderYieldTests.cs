@@ -76,5 +76,8 @@ public class LadderYieldTests
         scatter,
         20261201,
         150,
-        1000);
+        1000)
+    {
+        Trials = 6000,
+    };
 }
