@@ -49,6 +49,7 @@ public sealed class Chain
         new(
             Conditions.Band,
             Conditions.Reference,
+            Conditions.DesignFrequency,
             PortFrequencies.Of(stage, Kit, Conditions.Band),
             (port, at) => Neighbour(new Port(stage, port), at),
             Kit.SupplyVoltage,

@@ -9,6 +9,7 @@ namespace ClubBench.Planning.Plans;
 /// <summary>What holds for a whole chain.</summary>
 /// <param name="Band">Segment in use.</param>
 /// <param name="Reference">Frequency the club meets on.</param>
+/// <param name="DesignFrequency">Middle of the kit's own band.</param>
 /// <param name="WantedPower">Output wanted at the antenna; null for a receiver.</param>
 /// <param name="Pitch">Audio pitch.</param>
 /// <param name="Site">Noise category of the site.</param>
@@ -18,6 +19,7 @@ namespace ClubBench.Planning.Plans;
 public sealed record ChainConditions(
     FrequencyRange Band,
     Frequency Reference,
+    Frequency DesignFrequency,
     Power? WantedPower,
     Frequency Pitch,
     NoiseSite Site,
@@ -29,6 +31,7 @@ public sealed record ChainConditions(
     public static ChainConditions OwnBand(Kit kit, LearntValues learnt) => new(
         kit.Band,
         MeetingPoint(kit.Band),
+        kit.Band.Middle,
         kit.OutputPower,
         UsualPitch,
         NoiseSite.Residential,
@@ -37,9 +40,10 @@ public sealed record ChainConditions(
         learnt);
 
     /// <summary>The kit where a plan moves it.</summary>
-    public static ChainConditions On(Target target, LearntValues learnt) => new(
+    public static ChainConditions On(Target target, Kit kit, LearntValues learnt) => new(
         target.Segment,
         target.Reference,
+        kit.Band.Middle,
         target.WantedPower,
         target.Pitch,
         target.Site,

@@ -13,7 +13,7 @@ internal sealed class Move
     {
         Inputs = inputs;
         Own = new Chain(inputs.Kit, ChainConditions.OwnBand(inputs.Kit, inputs.Learnt));
-        Kept = new Chain(inputs.Kit, ChainConditions.On(inputs.Target, inputs.Learnt));
+        Kept = new Chain(inputs.Kit, ChainConditions.On(inputs.Target, inputs.Kit, inputs.Learnt));
         Planned = Kept;
         foreach (var stage in Kept.LoadToSource)
         {

@@ -8,6 +8,7 @@ namespace ClubBench.Planning.Plans;
 /// <summary>Where a stage finds itself: band, neighbours, supply and what the club has learnt. Stages know nothing else of each other.</summary>
 /// <param name="Band">The band segment the rig works on.</param>
 /// <param name="Reference">The frequency the club meets on; offsets are quoted there.</param>
+/// <param name="DesignFrequency">Middle of the band the kit was designed for; figures its papers give hold there.</param>
 /// <param name="AtPort">Frequencies at each port, where they differ from the band.</param>
 /// <param name="Neighbour">Impedance a port is connected to, ohm.</param>
 /// <param name="SupplyVoltage">Supply of the rig.</param>
@@ -20,6 +21,7 @@ namespace ClubBench.Planning.Plans;
 public sealed record Surroundings(
     FrequencyRange Band,
     Frequency Reference,
+    Frequency DesignFrequency,
     IReadOnlyDictionary<string, FrequencyRange> AtPort,
     Func<string, Frequency, Complex> Neighbour,
     Voltage SupplyVoltage,

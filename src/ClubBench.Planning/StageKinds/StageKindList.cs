@@ -7,6 +7,9 @@ public static class StageKindList
     public static IReadOnlyList<IStageKind> All { get; } =
     [
         new PulledCrystalOscillator.PulledCrystalOscillatorKind(),
+        new UntunedBuffer.UntunedBufferKind(),
+        new TunedDriver.TunedDriverKind(),
+        new SingleEndedFinal.SingleEndedFinalKind(),
         new LowPassLadder.LowPassLadderKind(),
     ];
 

@@ -1,0 +1,101 @@
+using System.Resources;
+using ClubBench.Planning.Advising;
+using ClubBench.Planning.Cards;
+using ClubBench.Planning.Drawings;
+using ClubBench.Planning.Figures;
+using ClubBench.Planning.Kits;
+using ClubBench.Planning.Parts;
+using ClubBench.Planning.Plans;
+using static ClubBench.Planning.StageKinds.TunedDriver.DriverStage;
+
+namespace ClubBench.Planning.StageKinds.TunedDriver;
+
+/// <summary>Class A driver with a tuned collector circuit and a link to the next stage.</summary>
+internal sealed class TunedDriverKind : StageKind<DriverStage, DriverModel>
+{
+    public const string Input = "input";
+    public const string Output = "output";
+
+    public static StageDescription DescriptionOf { get; } = new(
+        "tuned-driver",
+        DependsOn.SignalFrequency,
+        [new PortDescription(Input, PortDirection.In, 100), new PortDescription(Output, PortDirection.Out, 12)],
+        [new Passage(Input, Output, OnReceive: false, OnTransmit: true)],
+        [
+            new PartRole(Roles.Transistor, PartClass.Transistor, RoleNeed.Required, []),
+            new PartRole(Roles.TankWinding, PartClass.Winding, RoleNeed.Required, [PartValue.Turns, PartValue.LinkTurns], IsTuned: true),
+            new PartRole(Roles.TankCapacitor, PartClass.Capacitor, RoleNeed.Required, [PartValue.Capacitance], IsTuned: true),
+            new PartRole(Roles.TankTrimmer, PartClass.Trimmer, RoleNeed.Required, [PartValue.MinimumCapacitance, PartValue.MaximumCapacitance], IsTuned: true),
+            new PartRole(Roles.BaseResistor, PartClass.Resistor, RoleNeed.Usual, [PartValue.Resistance], Most: 2),
+            new PartRole(Roles.EmitterResistor, PartClass.Resistor, RoleNeed.Usual, [PartValue.Resistance]),
+            new PartRole(Roles.UnbypassedResistor, PartClass.Resistor, RoleNeed.Optional, [PartValue.Resistance]),
+            new PartRole(Roles.BypassCapacitor, PartClass.Capacitor, RoleNeed.Usual, [PartValue.Capacitance], Most: 4),
+            new PartRole(Roles.SupplyResistor, PartClass.Resistor, RoleNeed.Optional, [PartValue.Resistance]),
+        ],
+        [
+            new SettingDescription(Settings.Stray, QuantityKind.Capacitance, 10e-12),
+            new SettingDescription(Settings.CollectorCurrent, QuantityKind.Current, 0.03),
+            new SettingDescription(Settings.PeakSwing, QuantityKind.Voltage, 9),
+            new SettingDescription(Settings.Load, QuantityKind.Resistance, 12),
+            new SettingDescription(Settings.CoilQ, QuantityKind.Number, 150),
+        ],
+        ["available-power", "tunes-low", "tunes-high", "reactance"]);
+
+    public override StageDescription Description => DescriptionOf;
+
+    public override ResourceManager Texts { get; } = new("ClubBench.Planning.StageKinds.TunedDriver.Texts", typeof(TunedDriverKind).Assembly);
+
+    public override IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) =>
+        DriverConversion.Of(stage, to, demands, shelf);
+
+    public override Schematic Draw(StageDocument before, StageDocument? after)
+    {
+        var s = new SchematicSketch(DescriptionOf, before, after);
+        s.Terminal(0, 12, Input);
+        s.Wire(0, 12, 8, 12);
+        s.Role(SymbolKind.Resistor, 5, 12, Orientation.Down, Roles.BaseResistor);
+        s.Ground(5, 16);
+        s.Role(SymbolKind.TransistorNpn, 8, 12, Orientation.Across, Roles.Transistor);
+        s.Wire(10, 14, 10, 15);
+        s.Role(SymbolKind.Resistor, 10, 15, Orientation.Down, Roles.UnbypassedResistor);
+        s.Ground(10, 19);
+        s.Wire(10, 10, 10, 8);
+        s.Wire(10, 8, 26, 8);
+        s.Role(SymbolKind.Transformer, 26, 4, Orientation.Down, Roles.TankWinding);
+        s.Role(SymbolKind.Capacitor, 14, 4, Orientation.Down, Roles.TankCapacitor);
+        s.Role(SymbolKind.Trimmer, 20, 4, Orientation.Down, Roles.TankTrimmer);
+        s.Wire(14, 4, 26, 4);
+        s.Sign(SymbolKind.Supply, 20, 4);
+        s.Wire(28, 4, 33, 4);
+        s.Terminal(33, 4, Output);
+        s.Wire(28, 8, 30, 8);
+        s.Ground(30, 8);
+        s.Point("A", 10, 8);
+        return s.Finish();
+    }
+
+    public override CardNotes Notes(StageDocument stage, Surroundings surroundings) => new(
+        [Line.Of("line.look-at-joints"), Line.Of("line.link-through"), Line.Of("line.supply-not-short")],
+        Figure.Of("limit", QuantityKind.Current, 0.1),
+        [Line.Of("line.peak-at-end"), Line.Of("line.peak-twice"), Line.Of("line.no-peak")],
+        [Line.Of("caution.peak-then-count"), Line.Of("caution.warm-transistor")],
+        Line.Of("set-up.final-disconnected"));
+
+    protected override DriverStage Read(StageDocument stage) => DriverStage.Read(stage);
+
+    protected override DriverModel Model(DriverStage stage, Surroundings surroundings) => new(stage, surroundings);
+
+    protected override IReadOnlyList<Finding> Judge(DriverStage stage, DriverModel model, Surroundings surroundings, IReadOnlyList<Demand> demands, string key) =>
+        DriverJudgement.Of(stage, model, surroundings, demands, key);
+
+    protected override IReadOnlyList<ExpectedReading> Expect(DriverStage stage, DriverModel model, Surroundings surroundings, string key)
+    {
+        var volts = Math.Sqrt(8 * model.Available.Watt * model.LinkLoad);
+        return
+        [
+            .. WindingPart.Of(stage.Winding, surroundings.Learnt) is { } w ? [WindingExpectation.For(key, w, model.Tank.TrimRange(surroundings.Reference))] : Array.Empty<ExpectedReading>(),
+            new($"{key}.trimmer-travel", QuantityKind.Ratio, model.Tank.Travel(surroundings.Reference), 0.1, 0.9, "set-up.peak-the-tank", InstrumentClass.Receiver, WindowSides.Both, new Dictionary<string, double>()),
+            new($"{key}.drive-voltage", QuantityKind.PeakToPeakVoltage, volts, 0.8 * volts, 1.25 * volts, "set-up.scope-at-link", InstrumentClass.Oscilloscope, WindowSides.Both, new Dictionary<string, double>()),
+        ];
+    }
+}
