@@ -57,7 +57,7 @@ internal static class FinalJudgement
             case FrequencySuitability.Unsuitable:
                 yield return new Finding("final.device-too-slow", Severity.Fault, key, stage.Transistor.Designator, figures, StageAction.Change, OpenItemCodes.DeviceGain);
                 break;
-            case FrequencySuitability.LowGainFinal:
+            case FrequencySuitability.LowGainFinalOnly:
                 yield return new Finding("final.device-little-gain", Severity.Warning, key, stage.Transistor.Designator, figures, StageAction.Check, OpenItemCodes.DeviceGain);
                 break;
             case FrequencySuitability.Unknown:

@@ -51,7 +51,7 @@ internal static class DriverJudgement
         IReadOnlyList<Figure> figures = ft is { } f ? [Figure.Of("ratio", QuantityKind.Number, f / model.At) with { Digits = 2 }, Figure.Of("at", model.At)] : [];
         if (CurrentGain.Suitability(ft, model.At) is FrequencySuitability.Unsuitable)
             yield return new Finding("driver.device-too-slow", Severity.Fault, key, stage.Transistor.Designator, figures, StageAction.Change, OpenItemCodes.DeviceGain);
-        else if (CurrentGain.Suitability(ft, model.At) is FrequencySuitability.LowGainFinal)
+        else if (CurrentGain.Suitability(ft, model.At) is FrequencySuitability.LowGainFinalOnly)
             yield return new Finding("driver.device-little-gain", Severity.Warning, key, stage.Transistor.Designator, figures, StageAction.Check);
     }
 }

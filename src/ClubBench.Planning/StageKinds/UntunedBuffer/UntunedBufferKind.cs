@@ -114,7 +114,7 @@ internal sealed class UntunedBufferKind : StageKind<BufferStage, BufferModel>
         if (worst == Calculation.Broadband.Verdict.Change) findings.Add(new Finding("buffer.capacitors-too-small", Severity.Warning, key, null, figures, StageAction.Change, OpenItemCodes.CouplingCapacitors));
         else if (worst == Calculation.Broadband.Verdict.Check) findings.Add(new Finding("buffer.capacitors-small", Severity.Warning, key, null, figures, StageAction.Check));
         var ft = Transistors.Find(stage.Amplifier.Type)?.TransitionFrequencyForVerdict;
-        if (CurrentGain.Suitability(ft, surroundings.Band.High) is FrequencySuitability.LowGainFinal or FrequencySuitability.Unsuitable)
+        if (CurrentGain.Suitability(ft, surroundings.Band.High) is FrequencySuitability.LowGainFinalOnly or FrequencySuitability.Unsuitable)
             findings.Add(new Finding("buffer.device-slow", Severity.Warning, key, stage.Amplifier.Designator, [Figure.Of("ratio", QuantityKind.Number, ft!.Value / surroundings.Band.High) with { Digits = 2 }], StageAction.Check));
         return findings;
     }
