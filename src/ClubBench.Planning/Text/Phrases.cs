@@ -46,6 +46,13 @@ public static class Phrases
     public static string Say(OpenItem item, string? stageKindId = null, CultureInfo? culture = null) =>
         Filled("open-item." + item.Code, [], new() { ["stage"] = item.Stage }, stageKindId, culture);
 
+    /// <summary>An alternative in words, from its id: what stands behind the colon ("choke:6.8uH") is {what}.</summary>
+    public static string SayAlternative(string id, string? stageKindId = null, CultureInfo? culture = null)
+    {
+        var parts = id.Split(':', 2);
+        return Filled("alternative." + parts[0], [], new() { ["what"] = parts[^1] }, stageKindId, culture);
+    }
+
     /// <summary>The label of a figure.</summary>
     public static string NameOf(Figure figure, string? stageKindId = null, CultureInfo? culture = null) =>
         Say("figure." + figure.Name, stageKindId, culture);

@@ -21,7 +21,7 @@ public partial class TextConventions
             where !Phrases.Has(code.Groups["code"].Value, KindOf(file))
             select $"{file.Path}: {code.Groups["code"].Value}";
 
-        Assert.Empty(without);
+        NoneAreLeft(without);
     }
 
     [Fact]
@@ -39,7 +39,7 @@ public partial class TextConventions
             where !literals.Contains(name)
             select $"{text.Key}: {name}";
 
-        Assert.Empty(unknown);
+        NoneAreLeft(unknown);
     }
 
     [Fact]
@@ -54,7 +54,7 @@ public partial class TextConventions
             where !literals.Contains(name)
             select $"{kind.Description.Id} {text.Key}: {name}";
 
-        Assert.Empty(unknown);
+        NoneAreLeft(unknown);
     }
 
     [Fact]
@@ -62,7 +62,13 @@ public partial class TextConventions
     {
         var loud = TextsOf(General).Where(t => t.Value.Contains('!', StringComparison.Ordinal) || HandWrittenUnit().IsMatch(t.Value)).Select(t => t.Key);
 
-        Assert.Empty(loud);
+        NoneAreLeft(loud);
+    }
+
+    private static void NoneAreLeft(IEnumerable<string> faults)
+    {
+        var all = string.Join("\n", faults.Distinct(StringComparer.Ordinal));
+        Assert.True(all.Length == 0, all);
     }
 
     /// <summary>The stage kind a source file belongs to: kinds live in folders of their own.</summary>

@@ -41,6 +41,15 @@ public class PhrasesTests
     }
 
     [Fact]
+    public void SayAlternative_IdWithDetail_FillsWhatStandsBehindTheColon()
+    {
+        var kind = StageKindList.All.First(k => Phrases.Has("alternative.choke", k.Description.Id)).Description.Id;
+
+        Assert.Equal("choke 6.8uH", Phrases.SayAlternative("choke:6.8uH", kind, English));
+        Assert.Equal("Keep as it is", Phrases.SayAlternative(Choice.Keep, kind, English));
+    }
+
+    [Fact]
     public void Source_EveryStatus_ReadsWithAndWithoutAPlace()
     {
         var texts = from status in Enum.GetValues<SourceStatus>() from place in new[] { "", "table 3" } select Phrases.Source(new SourceRef("common-practice", place, status), English);
