@@ -10,9 +10,14 @@ internal static partial class PlanningSources
     /// <summary>Every file, path relative to the project with forward slashes.</summary>
     public static IReadOnlyList<Source> All { get; } = Read();
 
-    /// <summary>Every string literal that could be a name.</summary>
-    public static IReadOnlySet<string> Literals { get; } =
+    private static IReadOnlySet<string> Literals { get; } =
         All.SelectMany(f => Literal().Matches(f.Text)).Select(m => m.Groups["name"].Value).ToHashSet(StringComparer.Ordinal);
+
+    private static readonly string[] Stems =
+        [.. All.SelectMany(f => Stem().Matches(f.Text)).Select(m => m.Groups["stem"].Value).Distinct(StringComparer.Ordinal)];
+
+    /// <summary>Whether a name stands in the sources as a literal, or begins like one that is put together there.</summary>
+    public static bool Know(string name) => Literals.Contains(name) || Stems.Any(s => name.StartsWith(s, StringComparison.Ordinal));
 
     private static List<Source> Read()
     {
@@ -31,4 +36,7 @@ internal static partial class PlanningSources
 
     [GeneratedRegex("\"(?<name>[a-z0-9][a-z0-9.-]*)\"", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex Literal();
+
+    [GeneratedRegex("\\$\"(?<stem>[a-z][a-z0-9.-]+[.-])\\{", RegexOptions.ExplicitCapture, 1000)]
+    private static partial Regex Stem();
 }

@@ -31,12 +31,10 @@ public partial class TextConventions
     [Fact]
     public void Texts_General_AskOnlyForNamesTheSourcesKnow()
     {
-        var literals = PlanningSources.Literals;
-
         var unknown =
             from text in TextsOf(General)
             from name in Placeholders.In(text.Value)
-            where !literals.Contains(name)
+            where !PlanningSources.Know(name)
             select $"{text.Key}: {name}";
 
         NoneAreLeft(unknown);
@@ -45,13 +43,11 @@ public partial class TextConventions
     [Fact]
     public void Texts_OfStageKinds_AskOnlyForNamesTheSourcesKnow()
     {
-        var literals = PlanningSources.Literals;
-
         var unknown =
             from kind in StageKindList.All
             from text in TextsOf(kind.Texts)
             from name in Placeholders.In(text.Value)
-            where !literals.Contains(name)
+            where !PlanningSources.Know(name)
             select $"{kind.Description.Id} {text.Key}: {name}";
 
         NoneAreLeft(unknown);
