@@ -14,13 +14,15 @@ public static class LowPassCandidates
     /// <param name="values">Values of single parts, each with its stock rank.</param>
     /// <param name="window">Half width of the window as a part of the exact value, above 0 to 0.5.</param>
     /// <param name="pairs">Whether two parts in parallel may be used.</param>
-    public static IReadOnlyList<CapacitorChoice> Capacitors(Capacitance exact, IEnumerable<(Capacitance Value, int StockRank)> values, double window, bool pairs)
+    /// <param name="smallestShare">Least share of the larger part the smaller one must have, 0 to 1: below the tolerance of the large part a small one does nothing.</param>
+    public static IReadOnlyList<CapacitorChoice> Capacitors(
+        Capacitance exact, IEnumerable<(Capacitance Value, int StockRank)> values, double window, bool pairs, double smallestShare = 0)
     {
         Guard.Positive(exact.Farad, nameof(exact));
         Guard.Within(Guard.Positive(window, nameof(window)), 0, 0.5, nameof(window));
         var parts = values.OrderBy(v => v.Value).ToList();
         var singles = parts.Select(p => new CapacitorChoice(p.Value, null, p.StockRank));
-        var both = pairs ? singles.Concat(Pairs(parts)) : singles;
+        var both = pairs ? singles.Concat(Pairs(parts).Where(c => c.Second / c.First >= smallestShare)) : singles;
         return [.. both.Where(c => Math.Abs((c.Value / exact) - 1) <= window)
             .GroupBy(c => Math.Round(c.Value.Picofarad, 4))
             .Select(g => g.OrderBy(c => c.Parts).ThenBy(c => c.StockRank).ThenBy(c => c.First).First())

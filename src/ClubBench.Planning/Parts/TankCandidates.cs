@@ -23,6 +23,8 @@ public static class TankCandidates
     private const double LeastReactanceOhm = 80;
     private const double MostReactanceOhm = 320;
 
+    private const double SmallestShare = 0.05;
+
     /// <summary>Fewest turns worth winding: below, leads matter too much.</summary>
     private const int FewestTurns = 8;
 
@@ -38,16 +40,25 @@ public static class TankCandidates
             var inductance = index.Of(turns);
             var reactance = TunedCircuit.Reactance(inductance, band.Middle).Ohm;
             if (reactance is < LeastReactanceOhm or > MostReactanceOhm) continue;
-            if (Best(inductance, old, band, values) is { } best) yield return new TankCandidate(core, turns, best.First, null, best.Place, best.Place.WorstTravel(band));
+            if (Best(inductance, old, band, values) is { } best) yield return new TankCandidate(core, turns, best.First, best.Second, best.Place, best.Place.WorstTravel(band));
         }
     }
 
-    /// <summary>The capacitor that brings the trimmer nearest to the middle of its travel; drawer values win ties.</summary>
-    private static (Capacitance First, TunablePlace Place)? Best(Inductance inductance, TunablePlace old, FrequencyRange band, IReadOnlyList<(Capacitance Value, int StockRank)> values)
+    /// <summary>The capacitor that brings the trimmer nearest to the middle of its travel; where a single one leaves less than a third of the travel, two in parallel.</summary>
+    private static (Capacitance First, Capacitance? Second, TunablePlace Place)? Best(Inductance inductance, TunablePlace old, FrequencyRange band, IReadOnlyList<(Capacitance Value, int StockRank)> values)
     {
         var wanted = TunedCircuit.CapacitanceFor(inductance, band.Middle).Farad - old.Stray.Farad - (0.5 * (old.TrimmerLeast.Farad + old.TrimmerMost.Farad));
         if (wanted <= 0) return null;
-        var (value, _) = values.OrderBy(v => Math.Abs(v.Value.Farad - wanted)).ThenBy(v => v.StockRank).First();
-        return (value, old with { Inductance = inductance, Fixed = value });
+        var single = Nearest(wanted, values);
+        var place = old with { Inductance = inductance, Fixed = single };
+        if (place.WorstTravel(band) >= 1.0 / 3 || single.Farad > wanted || Filler(wanted - single.Farad, single, values) is not { } filler) return (single, null, place);
+        return (single, filler, place with { Fixed = single + filler });
     }
+
+    private static Capacitance Nearest(double farad, IReadOnlyList<(Capacitance Value, int StockRank)> values) =>
+        values.OrderBy(v => Math.Abs(v.Value.Farad - farad)).ThenBy(v => v.StockRank).First().Value;
+
+    /// <summary>A second capacitor for the rest; null where it would be smaller than the tolerance of the first.</summary>
+    private static Capacitance? Filler(double farad, Capacitance first, IReadOnlyList<(Capacitance Value, int StockRank)> values) =>
+        Nearest(farad, values) is var filler && filler / first >= SmallestShare ? filler : null;
 }

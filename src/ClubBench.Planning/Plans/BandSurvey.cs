@@ -41,7 +41,7 @@ public sealed record BandSurvey(Kit Kit, IReadOnlyList<SurveyColumn> Columns)
     private static SurveyCell Cell(StageDecision decision, Move move)
     {
         var action = move.ActionOf(decision.Stage);
-        var because = decision.KeptFindings.Concat(move.Findings(decision.Stage)).Where(f => f.AtLeast > StageAction.Keep).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).FirstOrDefault();
+        var because = decision.RethinkBecause ?? decision.KeptFindings.Concat(move.Findings(decision.Stage)).Where(f => f.AtLeast > StageAction.Keep).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).FirstOrDefault();
         return new SurveyCell(decision.Stage, action, because, PartChanges.Between(decision.Before, decision.After).Count);
     }
 }

@@ -16,7 +16,7 @@ internal static class OpenItems
             .Where(f => BeyondAcceptance.Contains(f.OpenItem!) || !accepted.Contains(f.Stage))
             .Select(f => new OpenItem(f.OpenItem!, f.Stage, BeyondAcceptance.Contains(f.OpenItem!) ? "change" : "change-or-reason", f));
         var rethink = move.Decisions.Where(d => d.IsRethink)
-            .Select(d => new OpenItem(OpenItemCodes.Rethink, d.Stage, "change", d.KeptFindings.MaxBy(f => f.AtLeast)));
+            .Select(d => new OpenItem(OpenItemCodes.Rethink, d.Stage, "change", d.RethinkBecause));
         return [.. fromFindings.Concat(rethink).DistinctBy(i => (i.Code, i.Stage)), .. Limits(move.Inputs.Target), .. Missing(move)];
     }
 

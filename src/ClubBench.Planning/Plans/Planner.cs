@@ -27,7 +27,8 @@ public static class Planner
         var expected = kind.Expect(after, model, surroundings);
         var drawing = kind.Draw(decision.Before, decision.Taken is null ? null : after);
         var action = move.ActionOf(stage);
-        var why = decision.KeptFindings.Where(f => f.AtLeast >= StageAction.Check).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).ToList();
+        IReadOnlyList<Finding> rethink = decision.RethinkBecause is { } because ? [because] : [];
+        var why = rethink.Concat(decision.KeptFindings).Where(f => f.AtLeast >= StageAction.Check).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).ToList();
         var changes = PartChanges.Between(decision.Before, after);
         var card = CardBuilder.Build(new CardInput(kind, decision.Before, after, changes, action, why.FirstOrDefault(), drawing, expected, kind.Notes(after, surroundings)));
         return new StagePlan(

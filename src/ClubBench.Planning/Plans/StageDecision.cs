@@ -28,6 +28,9 @@ internal sealed record StageDecision(
     /// <summary>Nothing within reach would do, and nobody insisted on keeping it.</summary>
     public bool IsRethink => Taken is null && KeptAction >= StageAction.Change && Choice?.AlternativeId != Choice.Keep;
 
+    /// <summary>Why nothing would do, and what would; null unless it is a rethink.</summary>
+    public Finding? RethinkBecause { get; private init; }
+
     /// <summary>Decides one stage of a chain whose stages behind it are decided.</summary>
     public static StageDecision Of(string stage, Chain own, Chain target, PlanInputs inputs)
     {
@@ -41,7 +44,8 @@ internal sealed record StageDecision(
         var mayChange = kept.Any(f => f.AtLeast >= StageAction.Check) || choice is not null;
         var alternatives = mayChange ? kind.Convert(document, own.SurroundingsOf(stage), surroundings, demands, inputs.Shelf) : [];
         var decision = new StageDecision(stage, document, kept, model.Figures, alternatives, null, choice);
-        return decision with { Taken = decision.Take() };
+        var taken = decision with { Taken = decision.Take() };
+        return taken.IsRethink ? taken with { RethinkBecause = kind.Rethink(document, surroundings) } : taken;
     }
 
     private Alternative? Take() => Choice switch

@@ -28,6 +28,9 @@ public interface IStageKind
     /// <summary>Ways to make the stage do in new surroundings, best first; empty where nothing within reach would.</summary>
     IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf);
 
+    /// <summary>Why nothing within reach would do, and what would: asked where <see cref="Convert"/> gave nothing for a stage that must change.</summary>
+    Finding Rethink(StageDocument stage, Surroundings to);
+
     /// <summary>What a builder should read, point by point, in bench order.</summary>
     IReadOnlyList<ExpectedReading> Expect(StageDocument stage, IStageModel model, Surroundings surroundings);
 

@@ -16,6 +16,9 @@ internal static class LowPassConversion
     /// <summary>Half width of the search window around the exact values; a narrower one hides the optimum.</summary>
     private const double Window = 0.12;
 
+    /// <summary>Tolerance of the parts: a smaller part beside a larger one does nothing to rely on.</summary>
+    private const double SmallestShare = 0.05;
+
     public static IReadOnlyList<Alternative> Of(StageDocument document, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf)
     {
         var stage = LowPassStage.Read(document);
@@ -29,7 +32,8 @@ internal static class LowPassConversion
                 .OrderByDescending(a => a.WorstMargin.Si >= 0)
                 .ThenByDescending(a => a.InStock)
                 .ThenByDescending(a => a.FitsPlaces)
-                .ThenByDescending(a => a.WorstMargin.Si),
+                .ThenByDescending(a => Math.Round(a.WorstMargin.Si, 1))
+                .ThenBy(a => a.Figures.First(f => f.Name == "capacitors").Si),
         ];
     }
 
@@ -53,7 +57,7 @@ internal static class LowPassConversion
         var index = WindingPart.IndexOf(core, to.Learnt);
         var input = new LowPassSearchInput(
             exact,
-            [.. exact.Capacitors.Select(c => LowPassCandidates.Capacitors(c, TunedCapacitors.Values(shelf, pairs), Window, pairs))],
+            [.. exact.Capacitors.Select(c => LowPassCandidates.Capacitors(c, TunedCapacitors.Values(shelf, pairs), Window, pairs, SmallestShare))],
             [.. exact.Coils.Select(l => LowPassCandidates.Coils(l, index))],
             requirement,
             stage.CoilQ,

@@ -47,6 +47,9 @@ internal sealed class LowPassLadderKind : StageKind<LowPassStage, LowPassModel>
         [Line.Of("caution.no-key-down-before-filter"), Line.Of("caution.rf-burns")],
         Line.Of("set-up.swept-cold"));
 
+    public override BoardYield? Yield(StageDocument stage, Surroundings surroundings, IReadOnlyList<Demand> demands, ulong seed) =>
+        LowPassYield.Of(LowPassStage.Read(stage), surroundings, demands, seed);
+
     protected override LowPassStage Read(StageDocument stage) => LowPassStage.Read(stage);
 
     protected override LowPassModel Model(LowPassStage stage, Surroundings surroundings) => new(stage, surroundings);

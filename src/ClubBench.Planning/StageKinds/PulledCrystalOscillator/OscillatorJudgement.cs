@@ -19,6 +19,9 @@ internal static class OscillatorJudgement
     /// <summary>An offset may differ so much from the pitch before "nobody answers": what a pitch control of an ear still takes.</summary>
     public const double OffsetRoom = 0.25;
 
+    /// <summary>At the club's own frequency the offset may differ this much before it is worth a word.</summary>
+    private const double ClubOffsetRoom = 0.4;
+
     public const double LeastStartUpMargin = 3;
 
     public static IReadOnlyList<Finding> Of(OscillatorStage stage, OscillatorModel model, Surroundings surroundings, string key)
@@ -97,6 +100,14 @@ internal static class OscillatorJudgement
         IReadOnlyList<Figure> figures = [Figure.Of("offset", QuantityKind.FrequencyShift, offset), Figure.Of("pitch", surroundings.Pitch), Figure.Of("factor", QuantityKind.Number, Math.Abs(offset) / pitch) with { Digits = 2 }];
         if (Math.Abs((Math.Abs(offset) / pitch) - 1) > OffsetRoom)
             yield return new Finding("oscillator.offset-wrong", Severity.Fault, key, stage.OffsetCapacitor!.Designator, figures, StageAction.Change, OpenItemCodes.Offset);
+        else if (model.ClubTuning is { } tuning && model.OffsetHertz(tuning) is { } there && Math.Abs((Math.Abs(there) / pitch) - 1) > ClubOffsetRoom)
+            yield return new Finding(
+                "oscillator.offset-at-club",
+                Severity.Warning,
+                key,
+                stage.OffsetCapacitor!.Designator,
+                [.. figures, Figure.Of("there", QuantityKind.FrequencyShift, there), Figure.Of("club", surroundings.Reference) with { Digits = 6 }],
+                StageAction.Check);
     }
 
     private static IEnumerable<Finding> StartUp(OscillatorModel model, string key)

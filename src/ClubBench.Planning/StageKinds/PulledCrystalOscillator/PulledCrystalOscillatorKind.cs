@@ -52,6 +52,8 @@ internal sealed class PulledCrystalOscillatorKind : StageKind<OscillatorStage, O
     public override IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) =>
         OscillatorConversion.Of(stage, from, to, shelf);
 
+    public override Finding Rethink(StageDocument stage, Surroundings to) => OscillatorConversion.Rethink(stage, to);
+
     public override Schematic Draw(StageDocument before, StageDocument? after) => OscillatorDrawing.Of(before, after);
 
     public override IReadOnlyList<Plot> Plots(StageComparison comparison) => [OscillatorDrawing.Dial(comparison)];

@@ -50,6 +50,9 @@ internal sealed class SingleEndedFinalKind : StageKind<FinalStage, FinalModel>
     public override IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) =>
         FinalConversion.Of(stage, to, demands, shelf);
 
+    public override Finding Rethink(StageDocument stage, Surroundings to) =>
+        new("final.device-too-slow-rethink", Severity.Fault, stage.Key, stage.OneInRole(Roles.Transistor)?.Designator, [Figure.Of("at", to.Reference), Figure.Of("wanted", to.Reference * 5)], StageAction.Rethink, OpenItemCodes.Rethink);
+
     public override Schematic Draw(StageDocument before, StageDocument? after)
     {
         var s = new SchematicSketch(DescriptionOf, before, after);

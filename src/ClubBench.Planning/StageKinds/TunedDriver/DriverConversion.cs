@@ -13,16 +13,17 @@ internal static class DriverConversion
     private const int Offered = 4;
     private static readonly int[] Links = [2, 3, 4, 5, 6, 7, 8];
 
-    public static IReadOnlyList<Alternative> Of(StageDocument document, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf)
+    public static IReadOnlyList<Alternative> Of(StageDocument document, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf)
     {
         var stage = DriverStage.Read(document);
         if (DriverJudgement.Of(stage, new DriverModel(stage, to), to, demands, document.Key).Any(f => f.Code == "driver.device-too-slow")) return [];
         var wanted = demands.Where(d => d.Code == DemandCodes.OutputPower).Select(d => d.Wanted.Si).DefaultIfEmpty(0).Max();
         var old = new DriverModel(stage, to).Tank;
+        var designedQ = new DriverModel(stage, from).LoadedQ;
         var best = CoilCores.For(stage.Winding, to.Band, shelf)
             .SelectMany(core => TankCandidates.On(core, stage.Winding, old, to.Band, shelf, to.Learnt)
                 .SelectMany(tank => Links.Select(link => (Tank: tank, After: After(document, stage, tank, link))))
-                .Select(x => (x.Tank, x.After, Margin: Margin(x.After, x.Tank, wanted, to)))
+                .Select(x => (x.Tank, x.After, Margin: Margin(x.After, x.Tank, wanted, designedQ, to)))
                 .OrderByDescending(x => x.Margin).Take(2))
             .OrderByDescending(x => x.Margin);
         return
@@ -32,12 +33,14 @@ internal static class DriverConversion
         ];
     }
 
-    /// <summary>Smaller of two margins, each zero where it is just enough: drive over what is asked, trimmer travel over a comfortable fifth.</summary>
-    public static double Margin(StageDocument after, TankCandidate tank, double wantedWatt, Surroundings to)
+    /// <summary>Smallest of three margins, each zero where it is just enough: drive over what is asked, trimmer travel over a comfortable fifth,
+    /// loaded Q within half and twice the designer's (harmonics below, touchy tuning above).</summary>
+    public static double Margin(StageDocument after, TankCandidate tank, double wantedWatt, double designedQ, Surroundings to)
     {
         var model = new DriverModel(DriverStage.Read(after), to);
         var drive = wantedWatt > 0 ? (model.Available.Watt / wantedWatt) - 1 : 1;
-        return Math.Min(drive, (tank.Travel - 0.2) / 0.3);
+        var selectivity = 1 - Math.Abs(Math.Log2(model.LoadedQ / designedQ));
+        return new[] { drive, selectivity, (tank.Travel - 0.2) / 0.3 }.Min();
     }
 
     private static StageDocument After(StageDocument document, DriverStage stage, TankCandidate tank, int link) => document.With(

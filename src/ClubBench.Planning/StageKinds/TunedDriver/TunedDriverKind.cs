@@ -46,7 +46,10 @@ internal sealed class TunedDriverKind : StageKind<DriverStage, DriverModel>
     public override ResourceManager Texts { get; } = new("ClubBench.Planning.StageKinds.TunedDriver.Texts", typeof(TunedDriverKind).Assembly);
 
     public override IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) =>
-        DriverConversion.Of(stage, to, demands, shelf);
+        DriverConversion.Of(stage, from, to, demands, shelf);
+
+    public override Finding Rethink(StageDocument stage, Surroundings to) =>
+        new("driver.device-too-slow-rethink", Severity.Fault, stage.Key, stage.OneInRole(Roles.Transistor)?.Designator, [Figure.Of("at", to.Reference), Figure.Of("wanted", to.Reference * 5)], StageAction.Rethink, OpenItemCodes.Rethink);
 
     public override Schematic Draw(StageDocument before, StageDocument? after)
     {
