@@ -14,6 +14,9 @@ public sealed record TunablePlace(Inductance Inductance, Capacitance Fixed, Capa
     /// <summary>Share of the travel a trimmer should keep at each end (common practice).</summary>
     public const double ComfortableShare = 0.1;
 
+    /// <summary>Share of the travel at each end that lies outside the bench window of a receiving circuit (common practice, 20 to 80 %).</summary>
+    public const double BenchShare = 0.2;
+
     /// <summary>Smallest total capacitance.</summary>
     public Capacitance Least => Fixed + TrimmerLeast + Stray;
 

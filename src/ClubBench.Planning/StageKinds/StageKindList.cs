@@ -11,6 +11,7 @@ public static class StageKindList
         new TunedDriver.TunedDriverKind(),
         new SingleEndedFinal.SingleEndedFinalKind(),
         new LowPassLadder.LowPassLadderKind(),
+        new SingleTunedFrontEnd.SingleTunedFrontEndKind(),
     ];
 
     private static readonly Dictionary<string, IStageKind> ById = All.ToDictionary(k => k.Description.Id, StringComparer.Ordinal);

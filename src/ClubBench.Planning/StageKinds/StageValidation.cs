@@ -27,6 +27,8 @@ internal static class StageValidation
 
         foreach (var name in role.Values.Where(v => part.Value(v) is null))
             yield return FieldMessage.Error($"{path}.values.{name}", "kit.value-missing", ("part", part.Designator), ("name", name));
+        if (part.Value(PartValue.MaximumCapacitance) is { } most && part.Value(PartValue.MinimumCapacitance) is { } least && most <= least)
+            yield return FieldMessage.Error($"{path}.values.{PartValue.MaximumCapacitance}", "kit.trimmer-without-swing", ("part", part.Designator));
         foreach (var (name, si) in part.ValuesSi)
             if (!PartValue.All.Contains(name)) yield return FieldMessage.Error($"{path}.values.{name}", "kit.value-unknown", ("part", part.Designator), ("name", name));
             else if (!double.IsFinite(si) || si < 0 || (si == 0 && !MayBeZero(name))) yield return FieldMessage.Error($"{path}.values.{name}", "kit.value-not-positive", ("part", part.Designator), ("name", name));
