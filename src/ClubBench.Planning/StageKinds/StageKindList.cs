@@ -11,6 +11,7 @@ public static class StageKindList
         new TunedDriver.TunedDriverKind(),
         new SingleEndedFinal.SingleEndedFinalKind(),
         new LowPassLadder.LowPassLadderKind(),
+        new SeriesTunedTap.SeriesTunedTapKind(),
         new SingleTunedFrontEnd.SingleTunedFrontEndKind(),
     ];
 
