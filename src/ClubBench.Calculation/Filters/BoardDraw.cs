@@ -8,14 +8,15 @@ internal sealed class BoardDraw(LadderYieldInput input)
 {
     private readonly SeededRandom _random = new(input.Seed);
     private readonly int[] _batches = Batches(input);
+    private readonly double[] _batchFactors = new double[Batches(input).Append(-1).Max() + 1];
     private readonly double[] _factors = new double[input.Design.Order];
 
-    public double[] Next()
+    /// <summary>Factors of the next board, in ladder order; they stand until the one after it is drawn.</summary>
+    public ReadOnlySpan<double> Next()
     {
-        var batchFactors = new double[_batches.Max() + 1];
-        for (var b = 0; b < batchFactors.Length; b++) batchFactors[b] = Factor(input.Scatter.CoreBatch);
+        for (var b = 0; b < _batchFactors.Length; b++) _batchFactors[b] = Factor(input.Scatter.CoreBatch);
         for (var k = 0; k < _factors.Length; k++)
-            _factors[k] = input.Design.IsCapacitor(k) ? Factor(input.Scatter.Capacitor) : batchFactors[_batches[k / 2]] * Factor(input.Scatter.Coil);
+            _factors[k] = input.Design.IsCapacitor(k) ? Factor(input.Scatter.Capacitor) : _batchFactors[_batches[k / 2]] * Factor(input.Scatter.Coil);
         return _factors;
     }
 

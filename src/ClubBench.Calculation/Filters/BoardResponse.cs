@@ -1,54 +1,54 @@
-using System.Numerics;
-
 namespace ClubBench.Calculation.Filters;
 
-/// <summary>Response of a board whose parts are the nominal ones times factors.</summary>
-internal sealed class BoardResponse(LadderYieldInput input, int passPoints)
+/// <summary>Response of a board whose parts are the nominal ones times factors. Keeps its working memory: one per task.</summary>
+internal sealed class BoardResponse(LadderYieldInput input)
 {
     private readonly LowPassDesign _design = input.Design;
-    private readonly Complex _coilPhase = new(input.CoilQ is { } q ? 1 / q : 0, 1);
-    private readonly Complex _capacitorPhase = 1 / new Complex(input.CapacitorQ is { } q ? 1 / q : 0, -1);
-    private readonly double[] _pass = [.. input.Requirement.Band.Points(passPoints).Select(f => f.RadiansPerSecond)];
-
-    public double[][] Harmonics { get; } =
+    private readonly double _coilLoss = input.CoilQ is { } q ? 1 / q : 0;
+    private readonly double _capacitorLoss = input.CapacitorQ is { } q ? 1 / q : 0;
+    private readonly double[] _pass = [.. input.Requirement.Band.Points(input.PassPoints).Select(f => f.RadiansPerSecond)];
+    private readonly double[][] _harmonics =
         [.. input.Requirement.Harmonics.Select(h => new[] { input.Requirement.Band.Low, input.Requirement.Band.High }.Select(f => f.Harmonic(h.Harmonic).RadiansPerSecond).ToArray())];
 
-    /// <summary>Attenuation of each harmonic, then the worst return loss, in dB.</summary>
-    public double[] Of(double[] factors)
-    {
-        var figures = new double[Harmonics.Length + 1];
-        for (var k = 0; k < Harmonics.Length; k++) figures[k] = ToDb(Harmonics[k].Max(w => At(w, factors).Passed));
-        figures[^1] = ToDb(_pass.Max(w => At(w, factors).Reflected));
-        return figures;
-    }
+    private readonly double[] _values = new double[input.Design.Order];
 
-    private (double Passed, double Reflected) At(double w, double[] factors)
+    /// <summary>Attenuation of each harmonic, then the worst return loss, in dB.</summary>
+    public void Of(ReadOnlySpan<double> factors, Span<double> figures)
     {
-        var (a, b, c, d) = (Complex.One, Complex.Zero, Complex.Zero, Complex.One);
-        for (var k = 0; k < factors.Length; k++)
+        for (var k = 0; k < _values.Length; k++)
+            _values[k] = factors[k] * (_design.IsCapacitor(k) ? _design.Capacitors[k / 2].Farad * _design.Source.Ohm : _design.Coils[k / 2].Henry / _design.Source.Ohm);
+        for (var h = 0; h < _harmonics.Length; h++)
         {
-            if (_design.IsCapacitor(k))
-            {
-                var y = w * _design.Capacitors[k / 2].Farad * factors[k] * _capacitorPhase;
-                (a, c) = (a + (b * y), c + (d * y));
-            }
-            else
-            {
-                var z = w * _design.Coils[k / 2].Henry * factors[k] * _coilPhase;
-                (b, d) = (b + (a * z), d + (c * z));
-            }
+            var passed = 0.0;
+            foreach (var w in _harmonics[h]) passed = Math.Max(passed, At(w).Passed);
+            figures[h] = ToDb(passed);
         }
 
-        return Powers(a * _design.Load.Ohm, b, c * _design.Source.Ohm * _design.Load.Ohm, d * _design.Source.Ohm);
+        var reflected = 0.0;
+        foreach (var w in _pass) reflected = Math.Max(reflected, At(w).Reflected);
+        figures[_harmonics.Length] = ToDb(reflected);
     }
 
-    private (double Passed, double Reflected) Powers(Complex a, Complex b, Complex c, Complex d)
+    // Voltage and current in units of the source resistance, from one volt at the load back to the source.
+    private (double Passed, double Reflected) At(double w)
     {
-        var all = Square(a + b + c + d);
-        return (4 * _design.Source.Ohm * _design.Load.Ohm / all, Square(a + b - c - d) / all);
+        var g = _design.Source / _design.Load;
+        var (voltage, current) = ((Re: 1.0, Im: 0.0), (Re: g, Im: 0.0));
+        for (var k = _values.Length - 1; k >= 0; k--)
+        {
+            if (_design.IsCapacitor(k)) current = Plus(current, voltage, w * _values[k] / (1 + (_capacitorLoss * _capacitorLoss)), _capacitorLoss);
+            else voltage = Plus(voltage, current, w * _values[k], _coilLoss);
+        }
+
+        var forward = Square(voltage.Re + current.Re) + Square(voltage.Im + current.Im);
+        return (4 * g / forward, (Square(voltage.Re - current.Re) + Square(voltage.Im - current.Im)) / forward);
     }
 
-    private static double Square(Complex z) => (z.Real * z.Real) + (z.Imaginary * z.Imaginary);
+    // sum + x (loss + j) y
+    private static (double Re, double Im) Plus((double Re, double Im) sum, (double Re, double Im) y, double x, double loss) =>
+        (sum.Re + (x * ((loss * y.Re) - y.Im)), sum.Im + (x * ((loss * y.Im) + y.Re)));
+
+    private static double Square(double x) => x * x;
 
     private static double ToDb(double share) => -10 * Math.Log10(Math.Max(share, 1e-30));
 }

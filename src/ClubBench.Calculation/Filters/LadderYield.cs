@@ -22,6 +22,9 @@ public sealed record LadderYieldInput(
     /// <summary>Boards tried, 100 to 1 000 000; 20 000 tell the share to 0.7 %.</summary>
     public int Trials { get; init; } = 20_000;
 
+    /// <summary>Frequencies in the pass-band, ends included, 2 to 401.</summary>
+    public int PassPoints { get; init; } = 17;
+
     /// <summary>Core batch of every coil, in ladder order; empty when all coils share one.</summary>
     public IReadOnlyList<int> CoreBatches { get; init; } = [];
 }
@@ -33,8 +36,6 @@ public sealed record LadderYieldInput(
 /// <param name="Margin">Smallest margin that 95 of 100 boards reach; what to rank designs by.</param>
 public sealed record LadderYield(Proportion Passed, Decibels ReturnLoss, IReadOnlyList<HarmonicFigure> Harmonics, Decibels Margin)
 {
-    private const int PassPoints = 17;
-
     /// <summary>Tries the boards.</summary>
     /// <remarks>
     /// Method: Monte Carlo with even distributions, the fair worst case of sorted bins; one draw per core batch and trial, then one per part.
@@ -43,12 +44,14 @@ public sealed record LadderYield(Proportion Passed, Decibels ReturnLoss, IReadOn
     public static LadderYield Of(LadderYieldInput input)
     {
         Guard.Within(input.Trials, 100, 1_000_000, nameof(input.Trials));
+        Guard.Within(input.PassPoints, 2, 401, nameof(input.PassPoints));
         var boards = new BoardDraw(input);
-        var response = new BoardResponse(input, PassPoints);
-        var reached = response.Harmonics.Select(_ => new double[input.Trials]).Append(new double[input.Trials]).ToArray();
+        var response = new BoardResponse(input);
+        var figures = new double[input.Requirement.Harmonics.Count + 1];
+        var reached = figures.Select(_ => new double[input.Trials]).ToArray();
         for (var t = 0; t < input.Trials; t++)
         {
-            var figures = response.Of(boards.Next());
+            response.Of(boards.Next(), figures);
             for (var k = 0; k < reached.Length; k++) reached[k][t] = figures[k];
         }
 

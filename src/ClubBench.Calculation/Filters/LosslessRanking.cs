@@ -2,72 +2,86 @@ using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Filters;
 
-/// <summary>The inner loop of the search: lossless halves, one product per pair, the best kept.</summary>
+/// <summary>The inner loop of the search: every pair of parts of the ladder against the limits of the best so far.</summary>
 internal sealed class LosslessRanking
 {
-    private readonly CandidatePlaces _places;
-    private readonly LowPassDesign _design;
-    private readonly bool _symmetric;
+    private readonly SplitLadder _ladders;
     private readonly int _keep;
-    private readonly double[] _omega;
-    private readonly double[] _mostPassed;
     private readonly int _stops;
-    private readonly double _loadRatio;
-    private readonly PriorityQueue<int[], double> _best = new();
+    private readonly double[] _permitted;
+    private readonly double[] _limits;
+    private readonly PriorityQueue<(int Left, int Right), double> _best = new();
     private double _bound = double.PositiveInfinity;
+    private int _hardest;
 
     public LosslessRanking(LowPassSearchInput input, CandidatePlaces places)
     {
-        (_places, _design, _symmetric, _keep) = (places, input.Exact, input.Symmetric, input.Keep);
-        _loadRatio = _design.Load / _design.Source;
         var band = input.Requirement.Band;
         var stops = input.Requirement.Harmonics
             .SelectMany(h => new[] { band.Low, band.High }.Distinct().Select(f => (Frequency: f.Harmonic(h.Harmonic), Limit: 1 / h.Attenuation.PowerRatio))).ToList();
-        var reflected = 1 / input.Requirement.ReturnLoss.PowerRatio;
-
-        // Harmonics stand first: they sort out most pairs after one or two products.
-        _stops = stops.Count;
-        _omega = [.. stops.Select(s => s.Frequency.RadiansPerSecond), .. band.Points(input.PassPoints).Select(f => f.RadiansPerSecond)];
-        _mostPassed = [.. stops.Select(s => s.Limit), .. Enumerable.Repeat(reflected, _omega.Length - _stops)];
+        double[] omega = [.. stops.Select(s => s.Frequency.RadiansPerSecond), .. band.Points(input.PassPoints).Select(f => f.RadiansPerSecond)];
+        (_keep, _stops) = (input.Keep, stops.Count);
+        _permitted = [.. stops.Select(s => s.Limit), .. Enumerable.Repeat(1 / input.Requirement.ReturnLoss.PowerRatio, omega.Length - _stops)];
+        _limits = new double[omega.Length];
+        _ladders = input.Symmetric ? SplitLadder.Mirrored(places, input.Exact, omega) : SplitLadder.Whole(places, input.Exact, omega);
+        Tighten(_bound);
     }
 
     /// <summary>The best choices with their margins, in no order.</summary>
     public IReadOnlyList<(int[] Choice, double MarginDb)> Best()
     {
-        if (_symmetric) Symmetric();
-        else Pairs();
-        return [.. _best.UnorderedItems.Select(x => (x.Element, -10 * Math.Log10(-x.Priority)))];
+        for (var left = 0; left < _ladders.Lefts; left++)
+            for (var right = 0; right < _ladders.Rights; right++)
+                if (IsWithin(left, right)) Consider(left, right);
+        return [.. _best.UnorderedItems.Select(x => (_ladders.Choice(x.Element.Left, x.Element.Right), -10 * Math.Log10(-x.Priority)))];
     }
 
-    private void Pairs()
+    // What sorted out the last pair mostly sorts out the next: neighbours differ by one part.
+    private bool IsWithin(int left, int right)
     {
-        var middle = _places.Values.Length / 2;
-        var left = LosslessHalf.All(_places, _design, _omega, 0, middle);
-        var right = LosslessHalf.All(_places, _design, _omega, middle, _places.Values.Length);
-        foreach (var a in left)
-            foreach (var b in right)
-                Consider(a, b);
-    }
-
-    private void Symmetric()
-    {
-        var middle = _places.Values.Length / 2;
-        foreach (var a in LosslessHalf.All(_places, _design, _omega, 0, middle + 1))
-            Consider(a, LosslessHalf.Of(_places, _design, _omega, middle + 1, a.Choice.Take(middle).Reverse().ToArray()));
-    }
-
-    // Every figure is a ratio of powers over its permitted size: the largest of them decides, the margin is its inverse in dB.
-    private void Consider(LosslessHalf left, LosslessHalf right)
-    {
-        var worst = 1e-30;
-        for (var i = 0; i < _omega.Length; i++)
+        if (IsBeyond(_hardest, left, right)) return false;
+        for (var i = 0; i < _limits.Length; i++)
         {
-            worst = Math.Max(worst, (i < _stops ? left.Passed(right, i, _loadRatio) : left.Reflected(right, i, _loadRatio)) / _mostPassed[i]);
-            if (worst >= _bound) return;
+            if (!IsBeyond(i, left, right)) continue;
+            _hardest = i;
+            return false;
         }
 
+        return true;
+    }
+
+    private bool IsBeyond(int i, int left, int right)
+    {
+        var k = _ladders.CharacteristicSquared(i, left, right);
+        return i < _stops ? k < _limits[i] : k > _limits[i];
+    }
+
+    // Every figure is a share of power over its permitted size: the largest of them decides, the margin is its inverse in dB.
+    private void Consider(int left, int right)
+    {
+        var worst = 1e-30;
+        for (var i = 0; i < _limits.Length; i++)
+        {
+            var k = _ladders.CharacteristicSquared(i, left, right);
+            worst = Math.Max(worst, (i < _stops ? 1 : k) / (1 + k) / _permitted[i]);
+        }
+
+        if (worst >= _bound) return;
         if (_best.Count == _keep) _best.Dequeue();
-        _best.Enqueue([.. left.Choice, .. right.Choice], -worst);
-        if (_best.Count == _keep && _best.TryPeek(out _, out var last)) _bound = -last;
+        _best.Enqueue((left, right), -worst);
+        if (_best.Count == _keep && _best.TryPeek(out _, out var last)) Tighten(-last);
+    }
+
+    // The bound as limits of |K|^2, a rounding error wide, so that sorting out needs no division.
+    private void Tighten(double bound)
+    {
+        const double Rounding = 1e-9;
+        _bound = bound;
+        for (var i = 0; i < _limits.Length; i++)
+        {
+            var share = bound * _permitted[i];
+            if (i < _stops) _limits[i] = ((1 / share) - 1) * (1 - Rounding);
+            else _limits[i] = share < 1 ? share / (1 - share) * (1 + Rounding) : double.PositiveInfinity;
+        }
     }
 }

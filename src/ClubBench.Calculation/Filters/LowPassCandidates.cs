@@ -21,12 +21,14 @@ public static class LowPassCandidates
         Guard.Positive(exact.Farad, nameof(exact));
         Guard.Within(Guard.Positive(window, nameof(window)), 0, 0.5, nameof(window));
         var parts = values.OrderBy(v => v.Value).ToList();
-        var singles = parts.Select(p => new CapacitorChoice(p.Value, null, p.StockRank));
-        var both = pairs ? singles.Concat(Pairs(parts).Where(c => c.Second / c.First >= smallestShare)) : singles;
-        return [.. both.Where(c => Math.Abs((c.Value / exact) - 1) <= window)
+        var singles = parts.Where(p => IsNear(p.Value)).Select(p => new CapacitorChoice(p.Value, null, p.StockRank));
+        var both = pairs ? singles.Concat(Pairs(parts, IsNear).Where(c => c.Second / c.First >= smallestShare)) : singles;
+        return [.. both
             .GroupBy(c => Math.Round(c.Value.Picofarad, 4))
             .Select(g => g.OrderBy(c => c.Parts).ThenBy(c => c.StockRank).ThenBy(c => c.First).First())
             .OrderBy(c => c.Value)];
+
+        bool IsNear(Capacitance value) => Math.Abs((value / exact) - 1) <= window;
     }
 
     /// <summary>Whole turns around the exact value: the two neighbours, and two each side below ten turns, where one turn is a coarse step.</summary>
@@ -43,10 +45,10 @@ public static class LowPassCandidates
     public static IReadOnlyList<CoilChoice> Coils(Inductance exact, InductanceFactor factor) =>
         Coils(n => factor.Of(n), Math.Sqrt(exact.Nanohenry / factor.NanohenryPerTurnSquared));
 
-    private static IEnumerable<CapacitorChoice> Pairs(List<(Capacitance Value, int StockRank)> parts)
+    private static IEnumerable<CapacitorChoice> Pairs(List<(Capacitance Value, int StockRank)> parts, Func<Capacitance, bool> isNear)
     {
         for (var i = 0; i < parts.Count; i++)
             for (var k = 0; k <= i; k++)
-                yield return new CapacitorChoice(parts[i].Value, parts[k].Value, Math.Max(parts[i].StockRank, parts[k].StockRank));
+                if (isNear(parts[i].Value + parts[k].Value)) yield return new CapacitorChoice(parts[i].Value, parts[k].Value, Math.Max(parts[i].StockRank, parts[k].StockRank));
     }
 }

@@ -42,6 +42,17 @@ public class LadderYieldTests
     }
 
     [Fact]
+    public void Of_UnequalEnds_IsTheAnalysedFilter()
+    {
+        var unequal = new LowPassDesign(F7.Form, F7.Capacitors, F7.Coils, FiftyOhm, Resistance.FromOhm(80));
+        var question = Question(new(0, 0, 0)) with { Design = unequal, Trials = 100, PassPoints = 5 };
+
+        var result = LadderYield.Of(question);
+
+        Assert.Equal(LowPassFigures.Of(unequal, question.Requirement, 150, 1000, 5).Margin.Db, result.Margin.Db, 1e-9);
+    }
+
+    [Fact]
     public void Of_OneBatchInsteadOfIndependentCoils_WidensTheScatter()
     {
         var requirement = Question(new(0, 0, 0)).Requirement with { ReturnLoss = Decibels.FromDb(10) };

@@ -47,6 +47,37 @@ public class LowPassSearchTests
         Assert.All(result.Best, c => Assert.Equal(c.LosslessMargin.Db, c.Figures.Margin.Db, 1e-6));
     }
 
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void Run_UnequalEnds_RankingMarginIsTheMarginOfTheAnalysedLadder(bool symmetric)
+    {
+        var unequal = new LowPassDesign(F14.Form, F14.Capacitors, F14.Coils, FiftyOhm, Resistance.FromOhm(80));
+
+        var result = LowPassSearch.Run(Question(unequal, E24, 0.12, false, 3.0, Band20m) with { Symmetric = symmetric });
+
+        Assert.All(result.Best, c => Assert.Equal(c.LosslessMargin.Db, c.Figures.Margin.Db, 1e-6));
+    }
+
+    [Theory]
+    [InlineData(3, 0.4)]
+    [InlineData(5, 0.14)]
+    [InlineData(7, 0.12)]
+    [InlineData(9, 0.06)]
+    public void Run_Symmetric_IsTheUnrestrictedSearchAmongMirroredCombinations(int order, double window)
+    {
+        var exact = LowPassPrototype.Chebyshev(order, PassBandRipple.FromRipple(Decibels.FromDb(0.01))).Denormalise(Frequency.FromMegahertz(15.5), FiftyOhm);
+        var question = Question(exact, E24, window, false, 3.0, Band20m) with { Keep = 1000 };
+        var whole = LowPassSearch.Run(question);
+
+        var symmetric = LowPassSearch.Run(question with { Symmetric = true });
+
+        Assert.True(whole.Tried <= 1000, $"{whole.Tried} combinations do not all fit into the answer.");
+        var mirrored = whole.Best.Where(c => c.Design.Capacitors.Reverse().SequenceEqual(c.Design.Capacitors) && c.Design.Coils.Reverse().SequenceEqual(c.Design.Coils));
+        Assert.True(symmetric.Tried > 2);
+        Assert.Equal(MarginsByParts(mirrored), MarginsByParts(symmetric.Best));
+    }
+
     [Fact]
     public void Run_EveryCombinationByHand_HasNoneBetter()
     {
@@ -125,6 +156,10 @@ public class LowPassSearchTests
         var choice = Assert.Single(choices, c => Math.Abs(c.Value.Picofarad - 220) < 1e-6);
         Assert.Null(choice.Second);
     }
+
+    private static IEnumerable<(string Parts, double MarginDb)> MarginsByParts(IEnumerable<LowPassCombination> found) =>
+        found.Select(c => ($"{string.Join(' ', c.Capacitors.Select(p => p.Value.Picofarad))} {string.Join(' ', c.Coils.Select(l => l.Turns))}", Math.Round(c.LosslessMargin.Db, 7)))
+            .OrderBy(x => x.Item1, StringComparer.Ordinal);
 
     private static LowPassRequirement Band40m =>
         new(FrequencyRange.FromMegahertz(7.0, 7.3), Decibels.FromDb(20), [new(2, Decibels.FromDb(24)), new(3, Decibels.FromDb(44))]);
