@@ -13,6 +13,8 @@ public static class StageKindList
         new LowPassLadder.LowPassLadderKind(),
         new SeriesTunedTap.SeriesTunedTapKind(),
         new SingleTunedFrontEnd.SingleTunedFrontEndKind(),
+        new GilbertProductDetector.GilbertProductDetectorKind(),
+        new AudioBandPass.AudioBandPassKind(),
     ];
 
     private static readonly Dictionary<string, IStageKind> ById = All.ToDictionary(k => k.Description.Id, StringComparer.Ordinal);
