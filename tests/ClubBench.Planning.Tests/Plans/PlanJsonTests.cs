@@ -1,18 +1,16 @@
 using System.Text.Json;
-using ClubBench.Calculation.Bands;
 using ClubBench.Calculation.Emissions;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Planning.Advising;
 using ClubBench.Planning.Figures;
 using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
-using ClubBench.Planning.StageKinds;
 
 namespace ClubBench.Planning.Tests.Plans;
 
 public class PlanJsonTests
 {
-    private static readonly Plan Plan = MakePlan();
+    private static readonly Plan Plan = DemoPlan.TwentyMetres;
 
     [Fact]
     public void Plan_OfTheDemonstrationKit_SurvivesARoundTrip() => Survives(Plan);
@@ -81,13 +79,4 @@ public class PlanJsonTests
 
     private static Part Part(params (string Name, double Si)[] values) =>
         new("L4", "series-winding", "T50-6", values.ToDictionary(v => v.Name, v => v.Si, StringComparer.Ordinal));
-
-    private static Plan MakePlan()
-    {
-        using var file = DemoKits.OpenQuernThirty();
-        var all = KitFile.ReadDocument(file).Value;
-        var kit = all with { Stages = [.. all.Stages.Where(s => StageKindList.Find(s.Kind) is not null)] };
-        var target = TargetDefaults.On("20 m", kit, ItuRegion.Region1)!;
-        return Planner.Plan(new PlanInputs(kit, target, [], DemoKits.DrawerStock, LearntValues.None, SearchEffort.Quick, 1, Planner.CalculationVersion));
-    }
 }
