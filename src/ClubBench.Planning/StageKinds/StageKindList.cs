@@ -15,6 +15,9 @@ public static class StageKindList
         new SingleTunedFrontEnd.SingleTunedFrontEndKind(),
         new GilbertProductDetector.GilbertProductDetectorKind(),
         new AudioBandPass.AudioBandPassKind(),
+        new AudioOutput.AudioOutputKind(),
+        new KeyingSidetone.KeyingSidetoneKind(),
+        new Supply.SupplyKind(),
     ];
 
     private static readonly Dictionary<string, IStageKind> ById = All.ToDictionary(k => k.Description.Id, StringComparer.Ordinal);
