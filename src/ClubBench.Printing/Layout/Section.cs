@@ -1,0 +1,42 @@
+namespace ClubBench.Printing.Layout;
+
+/// <summary>A heading with a note at the right end, a heavy rule, and what stands below it.</summary>
+/// <param name="Title">Heading.</param>
+/// <param name="Note">Note; empty for none.</param>
+/// <param name="Body">What stands below.</param>
+/// <param name="StartsPage">Whether a card that needs two pages goes on to the second one here.</param>
+internal sealed record Section(string Title, string Note, Stack Body, bool StartsPage = false) : IBlock
+{
+    private const float RuleGap = 2;
+    private const float BelowRule = 1.5f;
+    private const float NoteGap = 14;
+
+    private Paragraph NoteBlock => new(Note, TextStyle.Body);
+
+    public float Height(ICardSurface surface, float width) => HeadHeight(surface, width) + Body.Height(surface, width);
+
+    public void Draw(ICardSurface surface, Area area)
+    {
+        var head = HeadHeight(surface, area.Width);
+        surface.Text(Title, area.X, area.Y + TextStyle.Heading.Ascent, TextStyle.Heading);
+        if (FitsBeside(surface, area.Width)) surface.Text(Note, area.Right, area.Y + TextStyle.Heading.Ascent, TextStyle.Body with { Side = TextSide.End });
+        else NoteBlock.Draw(surface, new Area(area.X, area.Y + TextStyle.Heading.LineHeight, area.Width, 0));
+        var rule = area.Y + head - BelowRule;
+        surface.Line(area.X, rule, area.Right, rule, 1.4f);
+        Body.Draw(surface, new Area(area.X, area.Y + head, area.Width, area.Height - head));
+    }
+
+    public (IBlock Head, IBlock Tail)? CutAt(ICardSurface surface, float width, float room) =>
+        Body.CutAt(surface, width, room - HeadHeight(surface, width)) is { } cut
+            ? (this with { Body = (Stack)cut.Head }, this with { Body = (Stack)cut.Tail })
+            : null;
+
+    private bool FitsBeside(ICardSurface surface, float width) =>
+        surface.Measure(Title, TextStyle.Heading) + NoteGap + NoteBlock.WidthOf(surface) <= width;
+
+    private float HeadHeight(ICardSurface surface, float width)
+    {
+        var note = Note.Length == 0 || FitsBeside(surface, width) ? 0 : NoteBlock.Height(surface, width);
+        return TextStyle.Heading.LineHeight + note + RuleGap + BelowRule;
+    }
+}
