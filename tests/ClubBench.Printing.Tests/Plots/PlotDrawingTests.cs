@@ -1,0 +1,84 @@
+using System.Xml.Linq;
+using ClubBench.Planning.Drawings;
+using ClubBench.Printing.Plots;
+using ClubBench.Printing.Tests.Samples;
+
+namespace ClubBench.Printing.Tests.Plots;
+
+public class PlotDrawingTests
+{
+    private static readonly string s_svg = PlotDrawing.Of(SamplePlots.Response).Svg;
+
+    [Fact]
+    public void Of_Plot_HasRoleTitleAndDescriptionWithItsFigures()
+    {
+        var svg = XDocument.Parse(s_svg).Root!;
+
+        Assert.Equal("img", svg.Attribute("role")!.Value);
+        Assert.NotEmpty(svg.Elements().Single(e => e.Name.LocalName == "title").Value);
+        Assert.Contains("28.100", svg.Elements().Single(e => e.Name.LocalName == "desc").Value, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Of_Plot_KeepsNoFixedColour()
+    {
+        Assert.Empty(FixedColours.In(s_svg));
+        Assert.NotEmpty(FixedColours.In("<path stroke=\"rgb(1,2,3)\"/>"));
+        Assert.NotEmpty(FixedColours.In("<path stroke=\"#010203\"/>"));
+    }
+
+    [Fact]
+    public void Of_OldCurve_IsDottedAndNewThick()
+    {
+        Assert.Contains(Lines(), l => l.Contains("--old", StringComparison.Ordinal) && l.Contains("dasharray", StringComparison.Ordinal));
+        Assert.Contains(Lines(), l => l.Contains("--change", StringComparison.Ordinal) && l.Contains("stroke-width:2.8", StringComparison.Ordinal));
+    }
+
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void Of_Limit_IsHatchedOnTheForbiddenSide(bool above)
+    {
+        var plot = SamplePlots.Response with { Limits = [new LimitLine("plot.limit", 28.1e6, 63e6, -31, above)] };
+        var frame = PlotFrame.Of(plot);
+
+        var strokes = PlotHatch.Of(plot.Limits[0], frame).Skip(1).ToList();
+
+        Assert.True(strokes.Count > 5);
+        Assert.All(strokes, s => Assert.Equal(above, s.Points.Max(p => p.Y) > -31 + 0.01));
+        Assert.All(strokes, s => Assert.Equal(above, s.Points.Min(p => p.Y) > -31 - 0.01));
+    }
+
+    [Fact]
+    public void Of_Wish_IsNotHatched() =>
+        Assert.Single(PlotHatch.Of(new LimitLine("plot.wish", 28.1e6, 63e6, -41, true, IsWish: true), PlotFrame.Of(SamplePlots.Response)));
+
+    [Fact]
+    public void Frame_Pixels_LeadBackToTheirValues()
+    {
+        var frame = PlotFrame.Of(SamplePlots.Response);
+
+        Assert.Equal(14.05e6, frame.ValueX(frame.PixelX(14.05e6)), 1e3);
+        Assert.Equal(-40, frame.ValueY(frame.PixelY(-40)), 0.01);
+        Assert.Equal(frame.PixelX(20e6) - frame.PixelX(10e6), frame.PixelX(40e6) - frame.PixelX(20e6), 0.01);
+    }
+
+    [Fact]
+    public void Of_Words_StandAtTheCurvesAndDoNotHideEachOther()
+    {
+        var labels = new PlotLabels(SamplePlots.Response, PlotFrame.Of(SamplePlots.Response), null).Texts;
+
+        Assert.Equal(6, labels.Count);
+        foreach (var a in labels)
+            foreach (var b in labels.Where(l => l != a))
+                Assert.False(Math.Abs(a.Middle - b.Middle) < 12 && a.X < b.X && a.X + Width(a) > b.X + 1, $"{a.Text} over {b.Text}");
+    }
+
+    [Fact]
+    public void Of_NoCurve_Throws() =>
+        Assert.Throws<ArgumentException>(() => PlotDrawing.Of(SamplePlots.Response with { Curves = [], Limits = [], Marks = [] }));
+
+    private static float Width(PlotText text) => Printing.Fonts.PlexSans.Measure(text.Text, PlotLabels.Size, text.Weight);
+
+    private static IEnumerable<string> Lines() => s_svg.Split('\n').Where(l => l.Contains("<polyline", StringComparison.Ordinal));
+}
