@@ -1,0 +1,81 @@
+using ClubBench.Planning.Cards;
+using ClubBench.Planning.Plans;
+using ClubBench.Planning.Text;
+using ClubBench.Printing.Layout;
+using ClubBench.Printing.Schematics;
+
+namespace ClubBench.Printing.Sheets;
+
+/// <summary>The blocks of a card, from why it changed to the signatures. What a stage does not have takes no room.</summary>
+internal static class CardBody
+{
+    /// <summary>Blocks in order.</summary>
+    /// <param name="card">The card.</param>
+    /// <param name="drawingHeight">Most height the drawing may take.</param>
+    public static IReadOnlyList<IBlock> Of(PrintedCard card, float drawingHeight)
+    {
+        var content = card.Content;
+        var blocks = new List<IBlock?>
+        {
+            Why(content),
+            Drawing(content, drawingHeight),
+            FitSection.Remove(content),
+            FitSection.Of(card),
+            WindSection.Of(card),
+            BeforePower(content),
+            MeasureSection.Of(card),
+            IfOutside(content),
+        };
+        blocks.AddRange(Cautions(content));
+        blocks.Add(SignOff());
+        return [.. blocks.OfType<IBlock>()];
+    }
+
+    private static Paragraph? Why(CardContent content)
+    {
+        var (lead, rest) = content.Action switch
+        {
+            StageAction.Keep => (Texts.Of("card.keep"), ""),
+            StageAction.Check => (Texts.Of("card.why-check"), ""),
+            StageAction.Rethink => (Texts.Of("card.why-rethink"), Texts.Of("card.rethink")),
+            _ => (Texts.Of("card.why-change"), ""),
+        };
+        var why = content.Why is null ? "" : Phrases.Say(content.Why, content.Kind);
+        if (content.Action != StageAction.Keep && why.Length == 0 && rest.Length == 0) return null;
+        var runs = new[] { new Run(lead, TextStyle.Strong), new Run(Spaced(why), TextStyle.Body), new Run(Spaced(rest), TextStyle.Strong) };
+        return new Paragraph([.. runs.Where(r => r.Text.Length > 0)]);
+    }
+
+    private static string Spaced(string sentence) => sentence.Length == 0 ? "" : " " + sentence;
+
+    private static DrawingBlock? Drawing(CardContent content, float mostHeight)
+    {
+        if (content.Drawing.Symbols.Count == 0) return null;
+        var drawing = SchematicDrawing.Of(content.Drawing, CardText.TitleOf(content), content.Kind);
+        return new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, mostHeight, 1);
+    }
+
+    private static Section? BeforePower(CardContent content)
+    {
+        var items = content.Notes.BeforePower.Select(l => Phrases.Say(l, content.Kind)).ToList();
+        if (content.Notes.SupplyLimit is { } limit) items.Add(Texts.Say("card.supply-limit", QuantityText.Format(limit)));
+        return items.Count == 0 ? null : new Section(Texts.Of("card.power"), "", new Stack([new TickRow(items)]), StartsPage: true);
+    }
+
+    private static Section? IfOutside(CardContent content)
+    {
+        if (content.Notes.IfOutside.Count == 0) return null;
+        var steps = content.Notes.IfOutside.Select((l, i) => (IBlock)new NumberedLine(i + 1, Phrases.Say(l, content.Kind)));
+        return new Section(Texts.Of("card.outside"), "", new Stack([.. steps]));
+    }
+
+    private static IEnumerable<CautionBox> Cautions(CardContent content)
+    {
+        var texts = content.Notes.Cautions.Select(l => Phrases.Say(l, content.Kind)).ToList();
+        if (texts.Count == 0) yield break;
+        yield return new CautionBox([new Run(texts[0], TextStyle.Strong), .. texts.Skip(1).Select(t => new Run(" " + t, TextStyle.Body))]);
+    }
+
+    private static SignOffBoxes SignOff() =>
+        new([(Texts.Of("card.signed-by"), 10), (Texts.Of("card.signed-mentor"), 10), (Texts.Of("card.signed-time"), 6)]);
+}

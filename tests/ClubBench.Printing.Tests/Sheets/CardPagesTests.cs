@@ -1,0 +1,132 @@
+using ClubBench.Planning.Cards;
+using ClubBench.Planning.Plans;
+using ClubBench.Printing.Layout;
+using ClubBench.Printing.Sheets;
+using ClubBench.Printing.Tests.Layout;
+using ClubBench.Printing.Tests.Samples;
+
+namespace ClubBench.Printing.Tests.Sheets;
+
+public class CardPagesTests
+{
+    [Theory]
+    [InlineData(1)]
+    [InlineData(3)]
+    [InlineData(4)]
+    public void Draw_UpToFourCoils_FillsOneA4Page(int coils) => Assert.Single(Drawn(SampleCards.LowPassWith(coils)).Pages);
+
+    [Fact]
+    public void Draw_ManyCoils_GoesOnAtBeforePower()
+    {
+        var pages = Drawn(SampleCards.LowPassWith(8)).Pages;
+
+        Assert.Equal(2, pages.Count);
+        Assert.DoesNotContain(pages[0].Texts, t => t.Text == "Before power");
+        Assert.Equal("Before power", pages[1].Texts.Where(t => t.Style == TextStyle.Heading).MinBy(t => t.Baseline)!.Text);
+    }
+
+    [Fact]
+    public void Draw_EveryPage_NamesBoardPlanAndPageAndHoldsTheCode()
+    {
+        var pages = Drawn(SampleCards.LowPassWith(8)).Pages;
+
+        for (var i = 0; i < pages.Count; i++)
+        {
+            var page = pages[i];
+            Assert.Contains(page.Texts, t => t.Text == "Q05");
+            Assert.Contains(page.Texts, t => t.Text == "plan 4");
+            Assert.Contains(page.Texts, t => t.Text == $"page {i + 1} of {pages.Count}");
+            Assert.Equal(SampleCards.Context.CardAddress, Assert.Single(page.Codes).Text);
+        }
+    }
+
+    [Fact]
+    public void Draw_Text_IsNeverSmallerThanTwelvePoints() =>
+        Assert.All(Drawn(SampleCards.LowPass).Texts, t => Assert.True(t.Style.Size >= 12, t.Text));
+
+    [Theory]
+    [InlineData("180\u00A0+\u00A022\u00A0pF")]
+    [InlineData("15\u00A0t")]
+    [InlineData("290\u00A0mm")]
+    [InlineData("26.3\u00A0dB")]
+    public void Draw_KeyValue_IsAtLeastEighteenPoints(string value) =>
+        Assert.All(Written(value), t => Assert.True(t.Style.Size >= 18, t.Text));
+
+    [Fact]
+    public void Draw_Boxes_AreAtLeastFiveMillimetresEachWay() =>
+        Assert.All(Drawn(SampleCards.LowPass).Boxes, b => Assert.True(Math.Min(b.Width, b.Height) >= PaperSize.Millimetres(5) - 0.01f, b.ToString()));
+
+    [Fact]
+    public void Draw_Windings_GiveOneBoxPerPass()
+    {
+        var with = Drawn(SampleCards.LowPass).Boxes.Count(IsTick);
+        var without = Drawn(SampleCards.LowPass with { Windings = [.. SampleCards.LowPass.Windings.Select(w => w with { Turns = w.Turns - 1 })] }).Boxes.Count(IsTick);
+
+        Assert.Equal(3, with - without);
+    }
+
+    [Theory]
+    [InlineData("A4")]
+    [InlineData("Letter")]
+    public void Draw_LeftEdge_StaysFreeForTheThumbAndNothingLeavesThePage(string name)
+    {
+        var paper = name == "A4" ? PaperSize.A4 : PaperSize.Letter;
+        var surface = Drawn(SampleCards.LowPassWith(6), SampleCards.Context with { Paper = paper });
+
+        Assert.All(surface.Texts, t => Assert.InRange(Left(surface, t), PaperSize.Millimetres(14) - 0.1f, paper.Width));
+        Assert.All(surface.Texts, t => Assert.InRange(Left(surface, t) + surface.Measure(t.Text.TrimEnd(' '), t.Style), 0, paper.Width - PaperSize.Millimetres(5)));
+        Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, paper.Height - PaperSize.Millimetres(5)));
+        Assert.All(surface.Boxes, b => Assert.InRange(b.Bottom, 0, paper.Height - PaperSize.Millimetres(5)));
+    }
+
+    [Fact]
+    public void Draw_KeptStage_SaysSoAndHasNothingToFit()
+    {
+        var texts = Drawn(SampleCards.Kept).Texts.Select(t => t.Text).ToList();
+
+        Assert.Contains(texts, t => t.StartsWith("Keep this stage", StringComparison.Ordinal));
+        Assert.Contains("Measure", texts);
+        Assert.DoesNotContain("Fit, in this order", texts);
+        Assert.DoesNotContain("Wind", texts);
+    }
+
+    [Fact]
+    public void Draw_Rethink_SaysFitNothing()
+    {
+        var texts = Drawn(SampleCards.Kept with { Action = StageAction.Rethink }).Texts.Select(t => t.Text).ToList();
+
+        Assert.Contains(texts, t => t.Contains("Fit nothing yet", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Draw_NoBoardYet_LeavesLinesToWriteOn()
+    {
+        var texts = Drawn(SampleCards.LowPass, SampleCards.Context with { BoardNumber = null, Tag = null }).Texts.Select(t => t.Text).ToList();
+
+        Assert.DoesNotContain("Q05", texts);
+        Assert.Contains("tag:", texts);
+    }
+
+    private static bool IsTick(Area box) => Math.Abs(box.Width - PaperSize.Millimetres(5)) < 0.01f && Math.Abs(box.Height - box.Width) < 0.01f;
+
+    private static float Left(RecordingSurface surface, RecordingSurface.Written text) => text.Style.Side switch
+    {
+        TextSide.End => text.X - surface.Measure(text.Text, text.Style),
+        TextSide.Middle => text.X - (surface.Measure(text.Text, text.Style) / 2),
+        _ => text.X,
+    };
+
+    private static List<RecordingSurface.Written> Written(string value)
+    {
+        var found = Drawn(SampleCards.LowPass).Texts.Where(t => t.Text == value).ToList();
+        Assert.NotEmpty(found);
+        return found;
+    }
+
+    private static RecordingSurface Drawn(CardContent content, CardContext? context = null)
+    {
+        var surface = new RecordingSurface();
+        CardPages.Draw(surface, new PrintedCard(content, context ?? SampleCards.Context));
+        return surface;
+    }
+}
