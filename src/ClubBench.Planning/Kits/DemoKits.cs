@@ -42,8 +42,12 @@ public static class DemoKits
     private static StockLine Line(CsvReader row)
     {
         var kind = Enum.GetValues<PartClass>().Single(c => Placeholders.Dashed(c.ToString()) == row.GetField("class"));
-        return new StockLine(kind, row.GetField("type")!, Value(kind, row.GetField("value")!), row.GetField<double>("quantity"), row.GetField("lot")!, row.GetField("may_be_tuned") == "yes");
+        return new StockLine(kind, row.GetField("type")!, Value(kind, row.GetField("value")!), row.GetField<double>("quantity"), row.GetField("lot")!, row.GetField("may_be_tuned") == "yes", Measured(row.GetField("measured")!));
     }
+
+    /// <summary>"name=value;name=value" by the names of part values, SI; nothing where the lot was not measured.</summary>
+    private static Dictionary<string, double>? Measured(string text) =>
+        text.Length == 0 ? null : text.Split(';').Select(t => t.Split('=')).ToDictionary(t => t[0], t => double.Parse(t[1], CultureInfo.InvariantCulture), StringComparer.Ordinal);
 
     private static double? Value(PartClass kind, string text) =>
         text.Length == 0 ? null : QuantityText.Parse(text, kind switch

@@ -19,6 +19,9 @@ internal static class OscillatorConversion
     /// <summary>Guard to each band edge (crystal tolerance, temperature).</summary>
     private const double GuardHertz = 1000;
 
+    /// <summary>The club's frequency should not sit in the last bit of the dial.</summary>
+    private const double DialEndShare = 0.05;
+
     private const int Offered = 4;
 
     public static IReadOnlyList<Alternative> Of(StageDocument document, Surroundings from, Surroundings to, Shelf shelf)
@@ -75,13 +78,22 @@ internal static class OscillatorConversion
             Stock.Covers(shelf, changes, PulledCrystalOscillatorKind.DescriptionOf));
     }
 
+    /// <summary>The margin of a stage chosen by hand, by which alternatives are ranked; -1 where there is no usable dial.</summary>
+    public static double MarginOf(StageDocument chosen, Surroundings from, StageDocument old, Surroundings to)
+    {
+        var stage = OscillatorStage.Read(chosen);
+        var model = new OscillatorModel(stage, to);
+        return model.Range is { } range ? WorstMargin(stage, model, range, WantedSpan(OscillatorStage.Read(old), from, to), to) : -1;
+    }
+
     /// <summary>Smallest of the margins, each as a share of what is asked; zero is just enough.</summary>
     public static double WorstMargin(OscillatorStage stage, OscillatorModel model, PulledCrystalRange range, double wantedSpan, Surroundings to)
     {
         var span = (range.SpanHertz / wantedSpan) - 1;
         var control = 1 - (-range.AtMaximum.Sensitivities.Inductor / 0.02);
         var guard = (Math.Min(range.Low.Hertz - to.Band.Low.Hertz, to.Band.High.Hertz - range.High.Hertz) - GuardHertz) / GuardHertz;
-        var reaches = range.Frequencies.Contains(to.Reference) ? double.MaxValue : -1;
+        var fromEnd = Math.Min(to.Reference.Hertz - range.Low.Hertz, range.High.Hertz - to.Reference.Hertz) / range.SpanHertz;
+        var reaches = (fromEnd / DialEndShare) - 1;
         var offset = model.QuotedOffsetHertz is { } hz ? 1 - (Math.Abs((Math.Abs(hz) / to.Pitch.Hertz) - 1) / OscillatorJudgement.OffsetRoom) : double.MaxValue;
         var start = (model.StartUp!.Margin / OscillatorJudgement.LeastStartUpMargin) - 1;
         return new[] { span, control, guard, reaches, offset, start }.Min();
