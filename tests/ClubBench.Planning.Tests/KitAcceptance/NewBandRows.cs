@@ -3,7 +3,7 @@ using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
 using ClubBench.Planning.StageKinds;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>"What a correct conversion must find", row by row. Figures as printed in the description of the demonstration kit; tolerance its last digit.</summary>
 public class NewBandRows

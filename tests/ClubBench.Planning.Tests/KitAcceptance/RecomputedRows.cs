@@ -2,7 +2,7 @@ using CsvHelper;
 using System.Globalization;
 using ClubBench.Calculation.Quantities;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>Every named row of kit A, as printed and with one input moved by 10 %, against an independent computation (tests/Recomputed/kit_a_transmit.py).</summary>
 public class RecomputedRows

@@ -8,7 +8,7 @@ using ClubBench.Planning.Parts;
 using ClubBench.Planning.Plans;
 using ClubBench.Planning.StageKinds;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>Kit A, changed and placed as a test wants it.</summary>
 internal static class KitA

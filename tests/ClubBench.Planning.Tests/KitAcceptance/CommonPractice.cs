@@ -5,7 +5,7 @@ using ClubBench.Planning.Budgets;
 using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>Common practice of the trade.</summary>
 public class CommonPractice

@@ -1,7 +1,7 @@
 using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>What cannot be forgotten: taking any answer out of the plan raises a named open item, and the plan cannot be issued.</summary>
 public class OpenItemRows

@@ -2,7 +2,7 @@ using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
 using ClubBench.Planning.StageKinds;
 
-namespace ClubBench.Planning.Tests.KitA;
+namespace ClubBench.Planning.Tests.KitAcceptance;
 
 /// <summary>A sound kit stays silent; a planted fault is named. False alarms cost a hall as much as misses.</summary>
 public class FalseAlarms
