@@ -28,11 +28,16 @@ internal sealed class LosslessRanking
     }
 
     /// <summary>The best choices with their margins, in no order.</summary>
-    public IReadOnlyList<(int[] Choice, double MarginDb)> Best()
+    public IReadOnlyList<(int[] Choice, double MarginDb)> Best(IProgress<double>? progress, CancellationToken cancellation)
     {
         for (var left = 0; left < _ladders.Lefts; left++)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            progress?.Report((double)left / _ladders.Lefts);
             for (var right = 0; right < _ladders.Rights; right++)
                 if (IsWithin(left, right)) Consider(left, right);
+        }
+
         return [.. _best.UnorderedItems.Select(x => (_ladders.Choice(x.Element.Left, x.Element.Right), -10 * Math.Log10(-x.Priority)))];
     }
 

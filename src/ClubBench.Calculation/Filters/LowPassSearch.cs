@@ -53,15 +53,15 @@ public sealed record LowPassSearchResult(
 /// </remarks>
 public static class LowPassSearch
 {
-    /// <summary>Runs the search.</summary>
-    public static LowPassSearchResult Run(LowPassSearchInput input)
+    /// <summary>Runs the search. Long ones tell how far they are, from 0 to 1, and can be cancelled (throws <see cref="OperationCanceledException"/>).</summary>
+    public static LowPassSearchResult Run(LowPassSearchInput input, IProgress<double>? progress = null, CancellationToken cancellation = default)
     {
         Check(input);
         var places = CandidatePlaces.Of(input);
         if (places.FirstEmpty is { } empty) return new(LowPassSearchEnding.PlaceWithoutCandidate, [], 0, true, empty);
         var covered = places.ThinnedTo(input.MostCombinations);
         var ranking = new LosslessRanking(input, covered);
-        var best = ranking.Best().Select(c => Told(input, covered, c.Choice, c.MarginDb)).ToList();
+        var best = ranking.Best(progress, cancellation).Select(c => Told(input, covered, c.Choice, c.MarginDb)).ToList();
         var ranked = Ranked(best);
         var ending = ranked[0].Figures.Margin >= Decibels.Zero ? LowPassSearchEnding.Met : LowPassSearchEnding.FallsShort;
         return new(ending, ranked, covered.Combinations, ReferenceEquals(covered, places), null);

@@ -28,6 +28,9 @@ public interface IStageKind
     /// <summary>Ways to make the stage do in new surroundings, best first; empty where nothing within reach would.</summary>
     IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf);
 
+    /// <summary>Searches the whole window as a job, best first; kinds whose quick search is already whole answer the same as <see cref="Convert"/>.</summary>
+    IReadOnlyList<Alternative> SearchThoroughly(ThoroughSearch search, IProgress<double>? progress, CancellationToken cancellation);
+
     /// <summary>Why nothing within reach would do, and what would: asked where <see cref="Convert"/> gave nothing for a stage that must change.</summary>
     Finding Rethink(StageDocument stage, Surroundings to);
 
@@ -49,6 +52,15 @@ public interface IStageKind
     /// <summary>Share of boards that meet their windows with the stated tolerances, or null where spread decides nothing.</summary>
     BoardYield? Yield(StageDocument stage, Surroundings surroundings, IReadOnlyList<Demand> demands, ulong seed);
 }
+
+/// <summary>What a thorough search starts from.</summary>
+/// <param name="Stage">The kit's stage.</param>
+/// <param name="From">Its own surroundings.</param>
+/// <param name="To">The surroundings on the target, among the planned stages.</param>
+/// <param name="Demands">What is asked of it.</param>
+/// <param name="Shelf">Drawers.</param>
+/// <param name="Seed">Seed of every yield.</param>
+public sealed record ThoroughSearch(StageDocument Stage, Surroundings From, Surroundings To, IReadOnlyList<Demand> Demands, Shelf Shelf, ulong Seed);
 
 /// <summary>A stage before and after, each in its surroundings. Before the kept parts on the target; null model where nothing changed.</summary>
 /// <param name="Before">The kept stage on the target band.</param>

@@ -38,6 +38,10 @@ public abstract class StageKind<TStage, TModel> : IStageKind
     public virtual IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) => [];
 
     /// <inheritdoc/>
+    public virtual IReadOnlyList<Alternative> SearchThoroughly(ThoroughSearch search, IProgress<double>? progress, CancellationToken cancellation) =>
+        Convert(search.Stage, search.From, search.To, search.Demands, search.Shelf);
+
+    /// <inheritdoc/>
     public virtual Finding Rethink(StageDocument stage, Surroundings to) =>
         new("rethink.nothing-in-reach", Severity.Fault, stage.Key, null, [Figures.Figure.Of("at", to.Reference)], StageAction.Rethink, OpenItemCodes.Rethink);
 

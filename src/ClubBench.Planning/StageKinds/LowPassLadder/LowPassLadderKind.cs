@@ -36,6 +36,9 @@ internal sealed class LowPassLadderKind : StageKind<LowPassStage, LowPassModel>
     public override IReadOnlyList<Alternative> Convert(StageDocument stage, Surroundings from, Surroundings to, IReadOnlyList<Demand> demands, Shelf shelf) =>
         LowPassConversion.Of(stage, from, to, demands, shelf);
 
+    public override IReadOnlyList<Alternative> SearchThoroughly(ThoroughSearch search, IProgress<double>? progress, CancellationToken cancellation) =>
+        LowPassConversion.Thoroughly(search, progress, cancellation);
+
     public override Schematic Draw(StageDocument before, StageDocument? after) => LowPassDrawing.Of(before, after);
 
     public override IReadOnlyList<Plot> Plots(StageComparison comparison) => [LowPassPlot.Of(comparison)];
