@@ -12,6 +12,9 @@ public sealed class DriveBudget : IChainBudget
     /// <summary>Up to this much missing at the antenna nobody hears (common practice: a sixth of an S step); beyond it the item stays open.</summary>
     private const double HardlyHeardDb = 1.0;
 
+    /// <summary>A passive stage that loses more than this has its own finding; the stages before it are not asked to make up for it.</summary>
+    private static readonly Decibels MostAskedFor = Decibels.FromDb(1);
+
     /// <inheritdoc/>
     public string Id => "drive";
 
@@ -42,7 +45,7 @@ public sealed class DriveBudget : IChainBudget
 
     private static Power NeededBefore(string stage, Power behind, Chain chain, Frequency at) =>
         chain.Facet<IAmplifies>(stage) is { } amplifier ? amplifier.DriveFor(behind, at)
-        : chain.Facet<IPasses>(stage) is { } passive ? behind * LossOf(passive, at).PowerRatio
+        : chain.Facet<IPasses>(stage) is { } passive ? behind * Least(LossOf(passive, at), MostAskedFor).PowerRatio
         : behind;
 
     private static Power? GivenBehind(string stage, Power? before, Chain chain, Frequency at)
@@ -62,6 +65,8 @@ public sealed class DriveBudget : IChainBudget
     }
 
     private static Power Least(Power a, Power b) => a < b ? a : b;
+
+    private static Decibels Least(Decibels a, Decibels b) => a < b ? a : b;
 
     private static Decibels LossOf(IPasses passive, Frequency at) => passive.At(at).Loss(Resistance.FromOhm(50), Resistance.FromOhm(50));
 

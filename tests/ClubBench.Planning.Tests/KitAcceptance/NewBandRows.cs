@@ -95,7 +95,7 @@ public class NewBandRows
 
     [Theory]
     [InlineData("20 m", 14.05, 20, 80.2)]
-    [InlineData("40 m", 7.025, 24, 222.5)]
+    [InlineData("40 m", 7.03, 24, 222.5)]
     public void A3Tank_NamedTurnsOnT50Dash6_NeedNamedCapacitance(string band, double megahertz, int turns, double picofarad)
     {
         var stage = KitA.With(KitA.Kit.Stage("A3"), ("L2", l => KitA.Wound(l, "T50-6", turns)));
