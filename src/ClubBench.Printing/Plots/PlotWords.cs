@@ -1,4 +1,5 @@
 using ClubBench.Planning.Drawings;
+using ClubBench.Planning.Figures;
 using ClubBench.Planning.Text;
 
 namespace ClubBench.Printing.Plots;
@@ -6,13 +7,11 @@ namespace ClubBench.Printing.Plots;
 /// <summary>Words of a plot: at its marks, its limits, and the sentence for those who do not see it.</summary>
 internal static class PlotWords
 {
-    /// <summary>Word and value at a mark.</summary>
-    public static string Of(Plot plot, PlotMark mark, string? stageKind) =>
-        Texts.Say("plot.mark", Phrases.Say(mark.LabelCode, stageKind), QuantityText.Format(plot.YKind, mark.Y));
+    /// <summary>Word and value at a mark. Words may name {value} and {at} themselves; those that do not get the value after a colon.</summary>
+    public static string Of(Plot plot, PlotMark mark, string? stageKind) => WithValue(plot, mark.LabelCode, mark.X, mark.Y, stageKind);
 
-    /// <summary>Word and value at a limit.</summary>
-    public static string Of(Plot plot, LimitLine limit, string? stageKind) =>
-        Texts.Say("plot.mark", Phrases.Say(limit.LabelCode, stageKind), QuantityText.Format(plot.YKind, limit.Y));
+    /// <summary>Word and value at a limit, as at a mark.</summary>
+    public static string Of(Plot plot, LimitLine limit, string? stageKind) => WithValue(plot, limit.LabelCode, limit.FromX, limit.Y, stageKind);
 
     /// <summary>Word at a curve.</summary>
     public static string Of(Curve curve, string? stageKind) => Phrases.Say(curve.LabelCode, stageKind);
@@ -25,6 +24,12 @@ internal static class PlotWords
         return figures.Count == 0 ? Texts.Say("plot.curves", curves) : Texts.Say("plot.curves-and-figures", curves, string.Join("; ", figures));
     }
 
-    private static string WithPlace(Plot plot, PlotMark mark, string? stageKind) => Texts.Say(
-        "plot.mark-at", Phrases.Say(mark.LabelCode, stageKind), QuantityText.Format(plot.YKind, mark.Y), QuantityText.Format(plot.XKind, mark.X));
+    private static string WithPlace(Plot plot, PlotMark mark, string? stageKind) =>
+        Texts.Say("plot.mark-at", Of(plot, mark, stageKind), QuantityText.Format(plot.XKind, mark.X));
+
+    private static string WithValue(Plot plot, string code, double x, double y, string? stageKind)
+    {
+        var said = Phrases.Say(code, [Figure.Of("value", plot.YKind, y), Figure.Of("at", plot.XKind, x)], stageKind);
+        return said.Any(char.IsAsciiDigit) ? said : Texts.Say("plot.mark", said, QuantityText.Format(plot.YKind, y));
+    }
 }

@@ -75,6 +75,16 @@ public class PlotDrawingTests
     }
 
     [Fact]
+    public void Of_EveryPlotOfAPlan_IsDrawnWithWords()
+    {
+        var plots = SamplePlans.QuernOn("20 m").Stages.SelectMany(s => s.Plots.Select(p => (Plot: p, s.Card.Kind))).ToList();
+
+        Assert.NotEmpty(plots);
+        Assert.All(plots, p => Assert.Empty(FixedColours.In(PlotDrawing.Of(p.Plot, p.Kind).Svg)));
+        Assert.All(plots, p => Assert.NotEmpty(PlotTable.Of(p.Plot, p.Kind).Rows));
+    }
+
+    [Fact]
     public void Of_NoCurve_Throws() =>
         Assert.Throws<ArgumentException>(() => PlotDrawing.Of(SamplePlots.Response with { Curves = [], Limits = [], Marks = [] }));
 

@@ -98,6 +98,21 @@ public class CardPagesTests
         Assert.Contains(texts, t => t.Contains("Fit nothing yet", StringComparison.Ordinal));
     }
 
+    [Theory]
+    [InlineData("20 m")]
+    [InlineData("40 m")]
+    public void Draw_EveryCardOfAPlan_FitsItsPagesAndShowsItsFigures(string band)
+    {
+        foreach (var card in SamplePlans.QuernOn(band).Stages.Select(s => s.Card))
+        {
+            var surface = Drawn(card);
+
+            Assert.InRange(surface.Pages.Count, 1, 2);
+            Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, PaperSize.A4.Height - PaperSize.Millimetres(5)));
+            Assert.All(CardFigures.Of(card), f => Assert.Contains(f.Text.Replace('\u00A0', ' '), Joined(surface), StringComparison.Ordinal));
+        }
+    }
+
     [Fact]
     public void Draw_NoBoardYet_LeavesLinesToWriteOn()
     {
@@ -106,6 +121,8 @@ public class CardPagesTests
         Assert.DoesNotContain("Q05", texts);
         Assert.Contains("tag:", texts);
     }
+
+    private static string Joined(RecordingSurface surface) => string.Join(' ', surface.Texts.Select(t => t.Text.Trim(' '))).Replace('\u00A0', ' ');
 
     private static bool IsTick(Area box) => Math.Abs(box.Width - PaperSize.Millimetres(5)) < 0.01f && Math.Abs(box.Height - box.Width) < 0.01f;
 
