@@ -15,7 +15,7 @@ internal static class CardPages
     private const float BelowHeader = 6;
 
     /// <summary>Spacings from roomy to tight: gap between blocks and most height of the drawing. The first that fits one page is taken.</summary>
-    private static readonly (float Gap, float Drawing)[] s_spacings = [(11, 165), (8, 125), (6, 95), (3, 78)];
+    private static readonly (float Gap, float Drawing)[] s_spacings = [(11, 165), (8, 125), (5, 110), (3, 95), (3, 78)];
 
     /// <summary>Draws the card.</summary>
     public static void Draw(ICardSurface surface, PrintedCard card)

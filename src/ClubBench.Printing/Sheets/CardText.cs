@@ -47,8 +47,9 @@ internal static class CardText
         _ => QuantityText.FormatSpan(reading.Kind, reading.LowSi, reading.HighSi),
     };
 
-    /// <summary>Unit to write beside one's own reading.</summary>
-    public static string UnitOf(ExpectedReading reading) => QuantityText.Split(reading.Kind, reading.Nominal).Unit;
+    /// <summary>Unit to write beside one's own reading: that of the window's far end, which suits an expected nothing too.</summary>
+    public static string UnitOf(ExpectedReading reading) => QuantityText.Split(
+        reading.Kind, reading.Sides == WindowSides.AtLeast ? reading.Nominal : Math.Max(Math.Abs(reading.Nominal), Math.Abs(reading.HighSi))).Unit;
 
     /// <summary>Readings that are not already taken in the winding table.</summary>
     public static IEnumerable<ExpectedReading> ReadingsAfterFitting(CardContent content) =>
