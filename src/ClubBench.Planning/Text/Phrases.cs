@@ -18,6 +18,9 @@ public static class Phrases
 {
     private static readonly ResourceManager General = new("ClubBench.Planning.Text.Texts", typeof(Phrases).Assembly);
 
+    /// <summary>What the club has to say about inputs: refusals, conflicts, faulty fields.</summary>
+    private static readonly ResourceManager Club = new("ClubBench.Planning.Text.ClubTexts", typeof(Phrases).Assembly);
+
     /// <summary>Whether a code has a text.</summary>
     public static bool Has(string code, string? stageKindId = null) => Find(code, stageKindId, CultureInfo.InvariantCulture) is not null;
 
@@ -89,5 +92,5 @@ public static class Phrases
         figures.FirstOrDefault(f => f.Name == name) is { } figure ? QuantityText.Format(figure with { Digits = digits ?? figure.Digits }, culture) : null;
 
     private static string? Find(string code, string? stageKindId, CultureInfo culture) =>
-        (stageKindId is null ? null : StageKindList.Find(stageKindId)?.Texts.GetString(code, culture)) ?? General.GetString(code, culture);
+        (stageKindId is null ? null : StageKindList.Find(stageKindId)?.Texts.GetString(code, culture)) ?? General.GetString(code, culture) ?? Club.GetString(code, culture);
 }
