@@ -1,5 +1,6 @@
 using ClubBench.Club.Access;
 using ClubBench.Club.Changes;
+using ClubBench.Club.Demo;
 using ClubBench.Club.Persistence;
 using ClubBench.Club.Persistence.Sqlite;
 using ClubBench.Club.UseCases;
@@ -34,6 +35,7 @@ public static class ClubServices
         services.AddSingleton<WrongCodes>();
         services.AddSingleton<PlanArchive>();
         services.AddSingleton<ReadingBook>();
+        services.AddSingleton<DemoClub>();
         foreach (var useCase in UseCases) services.AddSingleton(useCase);
         return services;
     }
