@@ -20,6 +20,8 @@ internal static class WindingAdvice
         var figures = AllFigures(expected, reading, result, turns);
         if (judged == ReadingVerdict.Good && result.Action is WindingAction.None or WindingAction.Trim or WindingAction.Remeasure)
             return new Advice(ReadingVerdict.Good, [], next, [], "one-turn-rule");
+        if (judged == ReadingVerdict.NearEdge && result.Action == WindingAction.None)
+            return new Advice(ReadingVerdict.NearEdge, [new Step("advice.near-edge", figures)], next, [], "one-turn-rule");
         if (request.BatchAlert) return new Advice(judged, [new Step("advice.batch-off", figures)], next, [], "batch");
         return new Advice(judged, Ladder(result, figures), expected.Point, [], "one-turn-rule");
     }

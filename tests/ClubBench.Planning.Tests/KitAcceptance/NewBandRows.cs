@@ -141,7 +141,7 @@ public class NewBandRows
     public void A5Unconverted_On40m_LeavesTheSecondHarmonicAtMinus19()
     {
         var plan = KitA.Plan("40 m", new Choice("A5", Choice.Keep));
-        var raw = KitA.Kept("40 m").Facet<StageKinds.IMakesHarmonics>("A4")!.Harmonic(2).Level.Db;
+        var raw = KitA.Kept("40 m").Facet<Planning.StageKinds.IMakesHarmonics>("A4")!.Harmonic(2).Level.Db;
 
         Assert.Equal(6.7, KitA.LossDb(KitA.Kept("40 m"), "A5", 14.06), 0.05);
         Assert.Equal(-19, raw - KitA.LossDb(KitA.Kept("40 m"), "A5", 14.06), 0.5);
@@ -190,7 +190,7 @@ public class NewBandRows
     private static double MarginOf(Plan plan, StageDocument good)
     {
         var target = new Chain(plan.Inputs.Kit.With(good), ChainConditions.On(plan.Inputs.Target, plan.Inputs.Kit, LearntValues.None));
-        return StageKinds.PulledCrystalOscillator.OscillatorConversion.MarginOf(good, KitA.OwnBand().SurroundingsOf("A1"), KitA.Kit.Stage("A1"), target.SurroundingsOf("A1"));
+        return Planning.StageKinds.PulledCrystalOscillator.OscillatorConversion.MarginOf(good, KitA.OwnBand().SurroundingsOf("A1"), KitA.Kit.Stage("A1"), target.SurroundingsOf("A1"));
     }
 
     private static StageDocument GoodFilter(double outer, double inner, string core, int turns, int middle) => KitA.With(
