@@ -1,0 +1,45 @@
+using System.Text.Json.Nodes;
+using Microsoft.AspNetCore.OpenApi;
+using Microsoft.OpenApi;
+
+namespace ClubBench.Web.Api;
+
+/// <summary>One example request and answer of an operation, shown in the description of the interface.</summary>
+/// <param name="Request">Example body as JSON; null where there is none.</param>
+/// <param name="Answer">Example answer as JSON; null where it is a file.</param>
+internal sealed record ApiExample(string? Request, string? Answer);
+
+internal static class ApiExamples
+{
+    /// <summary>Adds summary and example to an operation.</summary>
+    public static RouteHandlerBuilder Described(this RouteHandlerBuilder builder, string name, string summary, string? request = null, string? answer = null) =>
+        builder.WithName(name).WithSummary(summary).WithMetadata(new ApiExample(request, answer));
+
+    /// <summary>Puts the examples into the document.</summary>
+    public static Task Fill(OpenApiOperation operation, OpenApiOperationTransformerContext context, CancellationToken cancellation)
+    {
+        if (context.Description.ActionDescriptor.EndpointMetadata.OfType<ApiExample>().FirstOrDefault() is not { } example) return Task.CompletedTask;
+        if (example.Request is { } request)
+        {
+            var body = operation.RequestBody as OpenApiRequestBody ?? new OpenApiRequestBody();
+            operation.RequestBody = body;
+            body.Content ??= new Dictionary<string, OpenApiMediaType>();
+            Put(body.Content, request);
+        }
+
+        if (example.Answer is { } answer && operation.Responses?.FirstOrDefault(r => r.Key.StartsWith('2')).Value is OpenApiResponse response)
+        {
+            response.Content ??= new Dictionary<string, OpenApiMediaType>();
+            Put(response.Content, answer);
+        }
+
+        return Task.CompletedTask;
+    }
+
+    private static void Put(IDictionary<string, OpenApiMediaType> content, string json)
+    {
+        const string Json = "application/json";
+        if (!content.TryGetValue(Json, out var media)) content[Json] = media = new OpenApiMediaType();
+        media.Example = JsonNode.Parse(json);
+    }
+}
