@@ -1,3 +1,8 @@
+using ClubBench.Web.Api;
+using ClubBench.Web.Bench;
+using ClubBench.Web.Commands;
+using ClubBench.Web.SignIn;
+
 namespace ClubBench.Web.Hosting;
 
 /// <summary>What the application is made of: one line per feature, each in a file of its own.</summary>
@@ -6,6 +11,10 @@ public static class Composition
     public static WebApplicationBuilder AddClubBench(this WebApplicationBuilder builder)
     {
         builder.AddServer();
+        builder.AddData();
+        builder.AddSignIn();
+        builder.AddBench();
+        builder.AddApi();
         builder.AddPages();
         return builder;
     }
@@ -14,8 +23,16 @@ public static class Composition
     {
         app.UseSecurityHeaders();
         app.UseProblemPages();
+        app.UseRouting();
+        app.UseRateLimiter();
+        app.UseAuthentication();
+        app.UseAuthorization();
         app.UseAntiforgery();
-        app.MapStaticAssets();
+        app.MapStaticAssets().AllowAnonymous();
+        app.MapHealth();
+        app.MapSignIn();
+        app.MapBench();
+        app.MapApi();
         app.MapPages();
         return app;
     }
