@@ -1,5 +1,6 @@
 using ClubBench.Club.Access;
 using ClubBench.Club.Demo;
+using ClubBench.Club.Entities;
 using ClubBench.Club.Tests.Support;
 using ClubBench.Club.UseCases.Boards;
 using ClubBench.Club.UseCases.Clubs;
@@ -29,6 +30,8 @@ public sealed class DemoClubTests
         Assert.Equal("Q04", Assert.Single(room.Help).Tag);
         Assert.Equal(6, room.Boards.Count(b => b.Cells.Any(c => c.LastVerdict is not null)));
         Assert.NotEmpty(order.Value.Lines);
+        var plans = (await club.Run(club.Get<ListPlans>(), coordinator, new ListPlansInput())).Value;
+        Assert.Equal([("20 m", PlanState.Issued), ("40 m", PlanState.Draft)], plans.OrderBy(p => p.BandName, StringComparer.Ordinal).Select(p => (p.BandName, p.State)));
     }
 
     [Fact]
