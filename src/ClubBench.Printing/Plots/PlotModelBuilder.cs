@@ -15,6 +15,9 @@ internal static class PlotModelBuilder
 {
     public const float AxisTextSize = 12;
 
+    /// <summary>Enough to tell the ticks of a narrow span apart; idle zeros go.</summary>
+    private const int TickDigits = 7;
+
     public static PlotModel Build(Plot plot, PlotFrame frame)
     {
         var model = new PlotModel
@@ -105,7 +108,7 @@ internal static class PlotModelBuilder
     private static string Number(QuantityKind kind, double value, double largest)
     {
         if (Math.Abs(value) < 1e-9 * Math.Abs(largest)) return "0";
-        var text = QuantityText.Split(kind, value, 3).Number;
+        var text = QuantityText.Split(kind, value, TickDigits).Number;
         var mark = CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator;
         return text.Contains(mark, StringComparison.Ordinal) ? text.TrimEnd('0').TrimEnd(mark[^1]) : text;
     }

@@ -18,8 +18,8 @@ internal static class MeasureSection
         var note = card.Content.Notes.SetUpAll is { } all ? Phrases.Say(all, card.Content.Kind) : sameSetUp ? SetUp(card.Content, readings[0]) : "";
         var columns = new Column[]
         {
-            new("", 16), new(Texts.Of("card.what"), 180), new(Texts.Of("card.expect"), 104),
-            new(Texts.Of("card.window"), 96), new(Texts.Of("card.yours"), 84), new(Texts.Of("card.meter"), 46),
+            new("", 16), new(Texts.Of("card.what"), 168), new(Texts.Of("card.expect"), 106),
+            new(Texts.Of("card.window"), 116), new(Texts.Of("card.yours"), 78), new(Texts.Of("card.meter"), 44),
         };
         var rows = readings.Select((r, i) => Row(card, r, i + 1, note.Length == 0));
         return new Section(Texts.Of("card.measure"), note, new Stack([new Table(columns, [.. rows])]));

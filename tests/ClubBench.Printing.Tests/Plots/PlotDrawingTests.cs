@@ -1,5 +1,6 @@
 using System.Xml.Linq;
 using ClubBench.Planning.Drawings;
+using ClubBench.Planning.Figures;
 using ClubBench.Printing.Plots;
 using ClubBench.Printing.Tests.Samples;
 
@@ -72,6 +73,18 @@ public class PlotDrawingTests
         foreach (var a in labels)
             foreach (var b in labels.Where(l => l != a))
                 Assert.False(Math.Abs(a.Middle - b.Middle) < 12 && a.X < b.X && a.X + Width(a) > b.X + 1, $"{a.Text} over {b.Text}");
+    }
+
+    [Fact]
+    public void Of_NarrowSpan_TellsItsTicksApart()
+    {
+        var x = new[] { 10e-12, 20e-12, 40e-12 };
+        var plot = new Plot("plot.dial", QuantityKind.Capacitance, true, QuantityKind.Frequency, 14.03e6, 14.07e6, [new Curve("plot.kept", CurveStyle.New, x, [14.065e6, 14.05e6, 14.035e6])], [], []);
+
+        var ticks = XDocument.Parse(PlotDrawing.Of(plot).Svg).Descendants().Where(e => e.Name.LocalName == "text" && e.Value.StartsWith("14", StringComparison.Ordinal)).Select(e => e.Value).ToList();
+
+        Assert.True(ticks.Count >= 3);
+        Assert.Equal(ticks.Count, ticks.Distinct(StringComparer.Ordinal).Count());
     }
 
     [Fact]
