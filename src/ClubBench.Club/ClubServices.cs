@@ -34,6 +34,7 @@ public static class ClubServices
         services.AddSingleton<FailureWindows>();
         services.AddSingleton<WrongCodes>();
         services.AddSingleton<PlanArchive>();
+        services.AddSingleton<SearchJobs>();
         services.AddSingleton<ReadingBook>();
         services.AddSingleton<DemoClub>();
         foreach (var useCase in UseCases) services.AddSingleton(useCase);

@@ -80,7 +80,7 @@ internal static class CardBuilder
         return new WindingRow(
             part.Designator,
             winding.Core.Designation,
-            (winding.Core as IronPowderCore)?.Colour ?? "",
+            winding.Core is IronPowderCore iron ? PartText.PaintOf(iron) : "",
             winding.Turns,
             winding.LinkTurns,
             Figure.Of("wire", winding.Wire.Bare),

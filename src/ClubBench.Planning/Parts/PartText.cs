@@ -29,10 +29,13 @@ public static class PartText
     public static IReadOnlyList<string> Markings(Part part, PartClass @class) => @class switch
     {
         PartClass.Capacitor when part.Value(PartValue.Capacitance) is not null => [.. CapacitorPart.Pieces(part).Select(PartMarking.Of)],
-        PartClass.Winding when Calculation.Windings.Cores.Find(part.Type) is Calculation.Windings.IronPowderCore core => [core.Colour],
+        PartClass.Winding when Calculation.Windings.Cores.Find(part.Type) is Calculation.Windings.IronPowderCore core => [PaintOf(core)],
         PartClass.Crystal or PartClass.Transistor or PartClass.Diode or PartClass.IntegratedCircuit => [part.Type],
         _ => [],
     };
+
+    /// <summary>Paint of a core by which builders tell it: a clear second face is not named.</summary>
+    public static string PaintOf(Calculation.Windings.IronPowderCore core) => core.Colour.Replace("/clear", "", StringComparison.Ordinal);
 
     private static string Capacitors(Part part, CultureInfo culture)
     {

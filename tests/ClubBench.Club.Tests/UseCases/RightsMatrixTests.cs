@@ -12,14 +12,14 @@ public sealed class RightsMatrixTests
     /// <summary>V visitor, B builder, M mentor, C coordinator, H the program itself.</summary>
     private static readonly Dictionary<string, string> MayRun = new(StringComparer.Ordinal)
     {
-        ["AddBoards"] = "C", ["AddInstrument"] = "C", ["AddPerson"] = "C", ["AnswerCall"] = "MC", ["AssignBoard"] = "C", ["CallForHelp"] = "BMC", ["CardStatus"] = "BMC",
+        ["AddBoards"] = "C", ["AddInstrument"] = "C", ["AddPerson"] = "C", ["AnswerCall"] = "MC", ["AssignBoard"] = "C", ["CallForHelp"] = "BMC", ["CancelSearch"] = "C", ["CardStatus"] = "BMC",
         ["ChangeInstrument"] = "C", ["ChangePlan"] = "C", ["CheckIn"] = "C", ["CloseNight"] = "C", ["CreateGroupBuild"] = "C", ["CreateNight"] = "C", ["CreatePlan"] = "C",
         ["EndMembership"] = "C", ["FindByToken"] = "VBMCH", ["FirstSetUp"] = "VBMCH", ["ImportKit"] = "C", ["IssuePlan"] = "C", ["JoinByCode"] = "VBMCH", ["ListBoards"] = "BMC",
         ["ListCards"] = "BMC", ["ListGroupBuilds"] = "BMC", ["ListKits"] = "BMC", ["ListNights"] = "BMC", ["ListPlans"] = "BMC", ["LogPrint"] = "MC", ["MakeSignInLink"] = "C",
         ["MakeToken"] = "C", ["MarkPlan"] = "C", ["MoveStage"] = "BMC", ["OfferSetUp"] = "H", ["OpenBoard"] = "BMC", ["OpenCard"] = "BMC", ["OpenCards"] = "BMC", ["OpenClub"] = "C",
         ["OpenGroupBuild"] = "C", ["OpenKit"] = "BMC", ["OpenNight"] = "BMC", ["OpenPlan"] = "BMC", ["OpenRoom"] = "BMC", ["PartsOrderOf"] = "BMC", ["PreviewPlan"] = "BMC", ["Record"] = "BMC",
         ["RecordFitted"] = "BMC", ["RecordMany"] = "BMC", ["RedeemLink"] = "VBMCH", ["RejoinBoard"] = "VBMCH", ["Reopen"] = "MC", ["RevokeToken"] = "C", ["SignInByPassword"] = "VBMCH",
-        ["SignOff"] = "MC", ["StartNight"] = "C", ["StockIn"] = "C", ["SurveyBands"] = "BMC", ["WhoAmI"] = "BMC",
+        ["SignOff"] = "MC", ["StartNight"] = "C", ["StartSearch"] = "C", ["StockIn"] = "C", ["SurveyBands"] = "BMC", ["WatchSearch"] = "C", ["WhoAmI"] = "BMC",
     };
 
     [Fact]

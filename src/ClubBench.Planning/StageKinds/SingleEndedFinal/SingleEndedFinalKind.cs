@@ -63,6 +63,7 @@ internal sealed class SingleEndedFinalKind : StageKind<FinalStage, FinalModel>
         s.Role(SymbolKind.Bead, 10, 10, Orientation.Across, Roles.BaseBead);
         s.Role(SymbolKind.TransistorNpn, 16, 10, Orientation.Across, Roles.Transistor);
         s.Wire(14, 10, 16, 10);
+        s.Wire(18, 12, 18, 14);
         s.Ground(18, 14);
         s.Wire(18, 6, 18, 8);
         s.Wire(18, 6, 30, 6);
