@@ -29,6 +29,8 @@ public sealed class ReferenceRow(IReadOnlyDictionary<string, string> cells)
 {
     public string this[string column] => cells[column];
 
+    public IEnumerable<string> Columns => cells.Keys;
+
     public bool Has(string column) => cells.TryGetValue(column, out var v) && v.Length > 0;
 
     public double Number(string column) => double.Parse(cells[column], CultureInfo.InvariantCulture);
