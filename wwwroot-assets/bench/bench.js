@@ -107,9 +107,9 @@ function advise(form, verdict, words, more = []) {
 }
 
 function ask(form, point, doubt, read, unit) {
-  const times = doubt.times >= 1 ? say("times", { times: Math.round(doubt.times) }) : say("part", { times: Math.round(1 / doubt.times) });
   const likely = inUnit(doubt.likely, unit, Math.max(3, read.digits)), typed = inUnit(read.si, unit, Math.max(3, read.digits));
-  const box = advise(form, "doubtful", say("doubt", { times, nominal: inUnit(point.nominal + (instrumentOf(form, point)?.offset ?? 0), unit, point.digits) }));
+  const times = Math.round(doubt.times >= 1 ? doubt.times : 1 / doubt.times), shouldBe = point.nominal + (instrumentOf(form, point)?.offset ?? 0);
+  const box = advise(form, "doubtful", say(doubt.times >= 1 ? "times" : "part", { times, nominal: inUnit(shouldBe, unit, point.digits) }));
   const row = box.appendChild(document.createElement("p"));
   row.className = "answers";
   const button = (words, act) => {

@@ -37,7 +37,6 @@ public static class BenchFeature
     private static async Task<IResult> PageAsync(string tag, HttpContext http, BenchModels models, IAntiforgery antiforgery, CancellationToken cancellation)
     {
         if (await models.OpenAsync(http.User.ToActor(), tag, cancellation) is not { } board) return Results.NotFound();
-        http.Response.Headers.CacheControl = "no-store";
         return new RazorComponentResult<BenchPage>(new { Model = models.Model(board, TokenOf(http, antiforgery)) });
     }
 

@@ -6,11 +6,11 @@ namespace ClubBench.Web.SignIn;
 /// <summary>Lets somebody in and shows the way to their place.</summary>
 internal static class Door
 {
-    /// <summary>Sets the cookie and leads on: to the page asked for, else to where the person works.</summary>
+    /// <summary>Sets the cookie, which outlives a closed browser for the evening, and leads on: to the page asked for, else to where the person works.</summary>
     public static async Task<IResult> EnterAsync(HttpContext context, Actor actor, string? to = null)
     {
         KeptToken.Forget(context);
-        await context.SignInAsync(SignInSchemes.Cookie, actor.ToPrincipal(SignInSchemes.Cookie));
+        await context.SignInAsync(SignInSchemes.Cookie, actor.ToPrincipal(SignInSchemes.Cookie), new AuthenticationProperties { IsPersistent = true });
         return Results.LocalRedirect(IsHere(to) ? to! : HomeOf(actor));
     }
 
