@@ -33,6 +33,7 @@ public static class Composition
         app.MapSignIn();
         app.MapBench();
         app.MapApi();
+        app.MapOrderFiles();
         app.MapPages();
         return app;
     }
