@@ -1,3 +1,4 @@
+using System.Text.Json.Serialization;
 using ClubBench.Planning.Figures;
 
 namespace ClubBench.Planning.Advising;
@@ -56,8 +57,23 @@ public sealed record ExpectedReading(
     IReadOnlyDictionary<string, double> DLnReadingByDLnPart,
     WindingUnderTest? Winding = null)
 {
+    /// <summary>Fewest digits a reading is written with.</summary>
+    private const int FewestDigits = 3;
+
     /// <summary>Stage key at the front of the point id.</summary>
+    [JsonIgnore]
     public string Stage => Point.Split('.')[0];
+
+    /// <summary>Significant digits at which both ends of the window and a tenth of its width can be told apart.</summary>
+    [JsonIgnore]
+    public int Digits
+    {
+        get
+        {
+            var (width, size) = (Math.Abs(HighSi - LowSi), Math.Max(Math.Abs(HighSi), Math.Abs(LowSi)));
+            return width > 0 && size > width ? Math.Clamp((int)Math.Ceiling(Math.Log10(size / width)) + 1, FewestDigits, 9) : FewestDigits;
+        }
+    }
 }
 
 /// <summary>Which ends of a window count.</summary>

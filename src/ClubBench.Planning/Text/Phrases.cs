@@ -53,8 +53,14 @@ public static class Phrases
     public static string SayAlternative(string id, string? stageKindId = null, CultureInfo? culture = null)
     {
         var parts = id.Split(':', 2);
-        return Filled("alternative." + parts[0], [], new() { ["what"] = parts[^1] }, stageKindId, culture);
+        return Filled("alternative." + parts[0], [], new() { ["what"] = Detail(parts[^1], culture) }, stageKindId, culture);
     }
+
+    /// <summary>Ids carry values in plain letters; people read them as values.</summary>
+    private static string Detail(string detail, CultureInfo? culture) =>
+        detail.EndsWith("uH", StringComparison.Ordinal) && QuantityText.Parse(detail, QuantityKind.Inductance) is { Succeeded: true } parsed
+            ? QuantityText.Format(QuantityKind.Inductance, parsed.Value.Si, null, culture)
+            : detail.Replace(':', ' ');
 
     /// <summary>The label of a figure.</summary>
     public static string NameOf(Figure figure, string? stageKindId = null, CultureInfo? culture = null) =>

@@ -187,6 +187,42 @@ public class NewBandRows
         Assert.True(own.Stage("A1").Alternatives[0].WorstMargin.Si >= MarginOf(own, good));
     }
 
+    [Theory]
+    [InlineData("20 m", 18.9, true)]
+    [InlineData("40 m", 75.4, false)]
+    public void A6_ChokeKept_NeedsTheNamedCapacitance(string band, double picofarad, bool insideTrimmer)
+    {
+        var at = Frequency.FromMegahertz(band == "20 m" ? 14.05 : 7.03);
+        var chain = new Chain(KitA.Kit, ChainConditions.On(KitA.Target(band) with { Reference = at }, KitA.Kit, LearntValues.None));
+        var findings = Judged(chain, "A6");
+
+        Assert.Equal(picofarad, KitA.Figure(chain, "A6", "needed-capacitance") * 1e12, 0.05);
+        Assert.Equal(!insideTrimmer, findings.Any(f => f is { AtLeast: StageAction.Change, OpenItem: OpenItemCodes.ReceiveTap }));
+        Assert.Contains(findings, f => f.AtLeast >= StageAction.Check);
+    }
+
+    [Theory]
+    [InlineData("15 m")]
+    [InlineData("10 m")]
+    public void A6_HighBand_IsRetunedWithASmallerChoke(string band)
+    {
+        var plan = KitA.Plan(band);
+
+        Assert.Equal(StageAction.Change, plan.Stage("A6").Action);
+        Assert.DoesNotContain(plan.OpenItems, i => i.Stage == "A6");
+    }
+
+    [Theory]
+    [InlineData("20 m", "T50-6", 22, 66.3, 14.05)]
+    [InlineData("40 m", "T50-2", 28, 133, 7.03)]
+    public void A7_NamedTurns_NeedTheNamedCapacitance(string band, string core, int turns, double picofarad, double megahertz)
+    {
+        var kit = KitA.Kit.With(KitA.With(KitA.Kit.Stage("A7"), ("L8", l => KitA.Wound(l, core, turns))));
+        var chain = new Chain(kit, ChainConditions.On(KitA.Target(band) with { Reference = Frequency.FromMegahertz(megahertz) }, kit, LearntValues.None));
+
+        Assert.Equal(picofarad, KitA.Figure(chain, "A7", "needed-capacitance") * 1e12, picofarad > 100 ? 0.6 : 0.06);
+    }
+
     private static double MarginOf(Plan plan, StageDocument good)
     {
         var target = new Chain(plan.Inputs.Kit.With(good), ChainConditions.On(plan.Inputs.Target, plan.Inputs.Kit, LearntValues.None));

@@ -45,7 +45,7 @@ public class PhrasesTests
     {
         var kind = StageKindList.All.First(k => Phrases.Has("alternative.choke", k.Description.Id)).Description.Id;
 
-        Assert.Equal("choke 6.8uH", Phrases.SayAlternative("choke:6.8uH", kind, English));
+        Assert.Equal("choke 6.8\u00A0µH", Phrases.SayAlternative("choke:6.8uH", kind, English));
         Assert.Equal("Keep as it is", Phrases.SayAlternative(Choice.Keep, kind, English));
     }
 

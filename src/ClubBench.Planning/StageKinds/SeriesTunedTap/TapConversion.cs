@@ -64,7 +64,7 @@ internal static class TapConversion
     private static IEnumerable<double> Chokes(Shelf shelf)
     {
         var stocked = shelf.Tuned(StageKinds.PartClass.MouldedChoke).Select(l => l.ValueSi).OfType<double>();
-        var bought = shelf.MayBuy ? from decade in new[] { 1e-6, 1e-5 } from mantissa in PreferredValues.Mantissas(ESeries.E12) select mantissa * decade : [];
+        var bought = shelf.MayBuy ? from decade in new[] { 1e-7, 1e-6 } from mantissa in PreferredValues.Mantissas(ESeries.E12) select mantissa * decade : [];
         return stocked.Concat(bought).DistinctBy(h => Math.Round(h * 1e9));
     }
 
