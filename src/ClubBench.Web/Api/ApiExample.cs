@@ -27,8 +27,10 @@ internal static class ApiExamples
             Put(body.Content, request);
         }
 
-        if (example.Answer is { } answer && operation.Responses?.FirstOrDefault(r => r.Key.StartsWith('2')).Value is OpenApiResponse response)
+        if (example.Answer is { } answer)
         {
+            operation.Responses ??= [];
+            if (operation.Responses.FirstOrDefault(r => r.Key.StartsWith('2')).Value is not OpenApiResponse response) operation.Responses["200"] = response = new OpenApiResponse { Description = "OK" };
             response.Content ??= new Dictionary<string, OpenApiMediaType>();
             Put(response.Content, answer);
         }
