@@ -18,6 +18,7 @@ public sealed class SqliteDatabase(IDbContextFactory<SqliteClubContext> contexts
         await using var db = await contexts.CreateDbContextAsync(cancellation);
         await db.Database.MigrateAsync(cancellation);
         await db.Database.OpenConnectionAsync(cancellation);
+        await db.Database.ExecuteSqlRawAsync("PRAGMA journal_mode = wal", cancellation); // a copied or restored file comes without its log
         await RequireAsync(db, "journal_mode", "wal", cancellation);
         await RequireAsync(db, "synchronous", FullSynchronous, cancellation);
         await RequireAsync(db, "foreign_keys", "1", cancellation);
