@@ -181,7 +181,7 @@ for case, change, factor, caps in (("", "", 1.0, CAPS), (", C16 10 % larger", "C
         row(f"A5 loss {what}{case}", "A5", change, factor, "passes-loss", f, loss, 1e-6)
         if f < 11e6:
             row(f"A5 return loss {what}{case}", "A5", change, factor, "passes-return-loss", f, rl, 1e-6)
-row("A5 cut-off", "A5", "", 1.0, "cut-off", "", cutoff(CAPS, COILS, 10.124e6 / 2), 1e-6)
+row("A5 cut-off", "A5", "", 1.0, "cut-off", "", cutoff(CAPS, COILS, 10.116e6), 1e-6)
 
 # the kept filter on the new bands, and the named conversions
 for case, caps, coils, f in (

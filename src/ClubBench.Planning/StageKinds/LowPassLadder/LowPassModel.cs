@@ -11,6 +11,9 @@ namespace ClubBench.Planning.StageKinds.LowPassLadder;
 internal sealed class LowPassModel : IStageModel, IPasses, IPresents
 {
     private static readonly SourceRef ChainMatrix = new("pozar-microwave", "chain matrix", SourceStatus.Published);
+
+    /// <summary>A ladder that loses less at the club's frequency passes it: the cut-off counts from there, else from half the band.</summary>
+    private const double PassesDb = 1;
     private readonly Surroundings _surroundings;
 
     public LowPassModel(LowPassStage stage, Surroundings surroundings)
@@ -20,7 +23,7 @@ internal sealed class LowPassModel : IStageModel, IPasses, IPresents
         Loss = LossAt(surroundings.Reference);
         WorstLoss = band.Points(17).Max(LossAt);
         WorstReturnLoss = Ladder.WorstReturnLoss(band, LowPassStage.Line, LowPassStage.Line);
-        CutOff = Ladder.CutOff3dB(Frequency.FromHertz(band.High.Hertz * 0.5), LowPassStage.Line, LowPassStage.Line);
+        CutOff = Ladder.CutOff3dB(Loss.Db < PassesDb ? surroundings.Reference : band.High / 2, LowPassStage.Line, LowPassStage.Line);
         Second = AtHarmonic(2);
         Third = AtHarmonic(3);
     }
