@@ -32,12 +32,7 @@ public sealed class DemoClub(IServiceProvider services, ClubStore store)
     /// <summary>Runs a use case that cannot fail here.</summary>
     internal async Task<TResult> RunAsync<TUseCase, TInput, TResult>(Actor actor, TInput input, CancellationToken cancellation)
         where TUseCase : UseCase<TInput, TResult>
-        where TResult : notnull => (await TryAsync<TUseCase, TInput, TResult>(actor, input, cancellation)).Value;
-
-    /// <summary>Runs a use case.</summary>
-    internal Task<Outcome<TResult>> TryAsync<TUseCase, TInput, TResult>(Actor actor, TInput input, CancellationToken cancellation)
-        where TUseCase : UseCase<TInput, TResult>
-        where TResult : notnull => services.GetRequiredService<TUseCase>().Run(actor, input, cancellation);
+        where TResult : notnull => (await services.GetRequiredService<TUseCase>().Run(actor, input, cancellation)).Value;
 
     private async Task FoundAsync(string token, CancellationToken cancellation)
     {

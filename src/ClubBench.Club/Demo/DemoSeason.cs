@@ -14,8 +14,6 @@ namespace ClubBench.Club.Demo;
 /// <summary>The season of the demonstration up to its first night.</summary>
 internal sealed class DemoSeason(DemoClub demo, Actor coordinator)
 {
-    private const string Accepted = "Invented for the demonstration: tried on one board, then accepted.";
-
     /// <summary>People, drawers, kit, two plans, twelve boards, a night with its first readings.</summary>
     public async Task PlayAsync(CancellationToken cancellation)
     {
@@ -48,7 +46,7 @@ internal sealed class DemoSeason(DemoClub demo, Actor coordinator)
         foreach (var i in DemoTables.Instruments)
             await demo.RunAsync<AddInstrument, AddInstrumentInput, Guid>(coordinator, new AddInstrumentInput(i.Name, i.Class, i.UncertaintyRelative, OffsetKind: i.OffsetKind, Post: i.Post), cancellation);
         foreach (var line in DemoKits.DrawerStock.Lines)
-            await demo.RunAsync<StockIn, StockInInput, Guid>(coordinator, new StockInInput(line.Class, line.Type, line.ValueSi, line.Quantity, line.Lot, line.MayBeTuned), cancellation);
+            await demo.RunAsync<StockIn, StockInInput, Guid>(coordinator, new StockInInput(line.Class, line.Type, line.ValueSi, line.Quantity, line.Lot, line.MayBeTuned, MeasuredSi: line.MeasuredSi), cancellation);
     }
 
     private async Task<PlanReference> PlanAsync(ImportedKit kit, string band, CancellationToken cancellation)
@@ -58,19 +56,9 @@ internal sealed class DemoSeason(DemoClub demo, Actor coordinator)
         return await demo.RunAsync<CreatePlan, CreatePlanInput, PlanReference>(coordinator, new CreatePlanInput(kit.KitId, $"{kit.Name} on {band}", confirmed), cancellation);
     }
 
-    /// <summary>The 20 m plan is issued; the 40 m plan stays a draft with what is open.</summary>
-    private async Task IssueAsync(PlanReference plan, CancellationToken cancellation)
-    {
-        var opened = await demo.RunAsync<OpenPlan, OpenPlanInput, OpenedPlan>(coordinator, new OpenPlanInput(plan.PlanId), cancellation);
-        var open = opened.Plan.OpenItems.Select(i => i.Stage).Where(s => s.Length > 0).Distinct(StringComparer.Ordinal).ToList();
-        if (open.Count > 0)
-        {
-            var choices = open.Select(s => new Choice(s, Choice.Accept, Reason: Accepted, By: coordinator.DisplayName)).ToList();
-            plan = await demo.RunAsync<ChangePlan, ChangePlanInput, PlanReference>(coordinator, new ChangePlanInput(plan.PlanId, plan.Version, Choices: choices), cancellation);
-        }
-
-        await demo.TryAsync<IssuePlan, IssuePlanInput, PlanReference>(coordinator, new IssuePlanInput(plan.PlanId, plan.Version), cancellation);
-    }
+    /// <summary>The 20 m plan is issued; the 40 m plan stays a draft.</summary>
+    private async Task IssueAsync(PlanReference plan, CancellationToken cancellation) =>
+        await demo.RunAsync<IssuePlan, IssuePlanInput, PlanReference>(coordinator, new IssuePlanInput(plan.PlanId, plan.Version), cancellation);
 
     private async Task<Dictionary<string, Guid>> BoardsAsync(Guid build, Guid plan, IReadOnlyList<DemoBoard> boards, Dictionary<string, Guid> people, CancellationToken cancellation)
     {

@@ -51,4 +51,7 @@ public sealed class StockLot : EditableRow
     public bool MayBeTuned { get; init; } = true;
 
     public string Place { get; set; } = "";
+
+    /// <summary>What was measured of the lot, by the names of part values, as JSON; null for nothing.</summary>
+    public string? MeasuredJson { get; set; }
 }

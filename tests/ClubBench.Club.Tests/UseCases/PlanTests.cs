@@ -1,12 +1,27 @@
 using ClubBench.Club.Entities;
 using ClubBench.Club.Tests.Support;
+using ClubBench.Club.UseCases.Clubs;
 using ClubBench.Club.UseCases.Plans;
+using ClubBench.Planning.Kits;
 using ClubBench.Planning.Plans;
+using ClubBench.Planning.StageKinds;
 
 namespace ClubBench.Club.Tests.UseCases;
 
 public sealed class PlanTests
 {
+    [Fact]
+    public async Task CreatePlan_MeasuredCrystalsInTheDrawer_ReckonsWithThem()
+    {
+        await using var club = await TestClub.FilledAsync();
+        var measured = new Dictionary<string, double> { [PartValue.MotionalCapacitance] = 22e-15, [PartValue.StaticCapacitance] = 4.8e-12 };
+        await club.Run(club.Get<StockIn>(), club.Ids.Coordinator, new StockInInput(PartClass.Crystal, "HC-49/U", 14.060e6, 16, Lot: "measured", MeasuredSi: measured));
+
+        var plan = (await OpenAsync(club, (await CreateAsync(club, TestClub.TwentyMetres())).PlanId)).Plan;
+
+        Assert.Equal(22e-15, plan.Stage("A1").After.Part("X1").Value(PartValue.MotionalCapacitance));
+    }
+
     [Fact]
     public async Task ChangePlan_SameInputs_KeepsEveryCardNumber()
     {

@@ -961,6 +961,9 @@ namespace ClubBench.Club.Migrations.Sqlite
                     b.Property<bool>("MayBeTuned")
                         .HasColumnType("INTEGER");
 
+                    b.Property<string>("MeasuredJson")
+                        .HasColumnType("TEXT");
+
                     b.Property<string>("Place")
                         .IsRequired()
                         .HasColumnType("TEXT");

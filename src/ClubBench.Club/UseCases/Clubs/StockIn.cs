@@ -2,7 +2,9 @@ using ClubBench.Club.Access;
 using ClubBench.Club.Changes;
 using ClubBench.Club.Entities;
 using ClubBench.Club.Persistence;
+using ClubBench.Club.UseCases.Plans;
 using ClubBench.Planning;
+using ClubBench.Planning.Kits;
 using ClubBench.Planning.StageKinds;
 using Microsoft.EntityFrameworkCore;
 
@@ -16,7 +18,9 @@ namespace ClubBench.Club.UseCases.Clubs;
 /// <param name="Lot">Name of the lot, empty for none.</param>
 /// <param name="MayBeTuned">Whether it may go into a tuned place.</param>
 /// <param name="Place">Drawer.</param>
-public sealed record StockInInput(PartClass Class, string Type, double? ValueSi, double QuantityPieces, string Lot = "", bool MayBeTuned = true, string Place = "");
+/// <param name="MeasuredSi">What was measured of the lot, by the names of part values; null leaves it as it was.</param>
+public sealed record StockInInput(
+    PartClass Class, string Type, double? ValueSi, double QuantityPieces, string Lot = "", bool MayBeTuned = true, string Place = "", IReadOnlyDictionary<string, double>? MeasuredSi = null);
 
 /// <summary>Books parts into the lot they belong to.</summary>
 public sealed class StockIn(ClubStore store) : Command<StockInInput, Guid>(store)
@@ -34,6 +38,7 @@ public sealed class StockIn(ClubStore store) : Command<StockInInput, Guid>(store
             cancellation) ?? New(work, input);
         if (lot.QuantityPieces + input.QuantityPieces < 0) return Failure("quantityPieces", "stock.not-enough");
         lot.QuantityPieces += input.QuantityPieces;
+        if (input.MeasuredSi is { Count: > 0 } measured) lot.MeasuredJson = StoredJson.Write(measured);
         work.Announce(EventKind.StoresChanged, lot.Id);
         return Success(lot.Id);
     }
@@ -50,5 +55,7 @@ public sealed class StockIn(ClubStore store) : Command<StockInInput, Guid>(store
         if (string.IsNullOrWhiteSpace(input.Type)) yield return FieldMessage.Error("type", "field.needed");
         if (input.ValueSi is { } value && !(double.IsFinite(value) && value > 0)) yield return FieldMessage.Error("valueSi", "field.not-positive");
         if (!double.IsFinite(input.QuantityPieces)) yield return FieldMessage.Error("quantityPieces", "field.not-a-number");
+        foreach (var (name, si) in input.MeasuredSi ?? new Dictionary<string, double>())
+            if (!PartValue.All.Contains(name) || !double.IsFinite(si) || si < 0) yield return FieldMessage.Error($"measured.{name}", "field.not-positive");
     }
 }

@@ -1,3 +1,4 @@
+using ClubBench.Club.Entities;
 using ClubBench.Club.Persistence;
 using ClubBench.Planning.Plans;
 using Microsoft.EntityFrameworkCore;
@@ -8,6 +9,8 @@ namespace ClubBench.Club.UseCases.Plans;
 internal static class Drawers
 {
     public static async Task<Shelf> ShelfAsync(this ClubContext db, CancellationToken cancellation) =>
-        new(await db.StockLots.OrderBy(l => l.Class).ThenBy(l => l.Type).ThenBy(l => l.ValueSi).ThenBy(l => l.Lot)
-            .Select(l => new StockLine(l.Class, l.Type, l.ValueSi, l.QuantityPieces, l.Lot, l.MayBeTuned)).ToListAsync(cancellation));
+        new([.. (await db.StockLots.OrderBy(l => l.Class).ThenBy(l => l.Type).ThenBy(l => l.ValueSi).ThenBy(l => l.Lot).ToListAsync(cancellation)).Select(Line)]);
+
+    private static StockLine Line(StockLot l) =>
+        new(l.Class, l.Type, l.ValueSi, l.QuantityPieces, l.Lot, l.MayBeTuned, l.MeasuredJson is { } json ? StoredJson.Read<Dictionary<string, double>>(json) : null);
 }
