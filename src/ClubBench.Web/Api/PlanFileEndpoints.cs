@@ -24,7 +24,7 @@ internal static class PlanFileEndpoints
         if (!cards.Succeeded) return Answers.Problem(cards.Messages);
         var today = DateOnly.FromDateTime(clock.GetLocalNow().DateTime);
         var fromBand = QuantityText.Format(plan.Value.Plan.Inputs.Kit.Band);
-        var address = $"{http.Request.Scheme}://{http.Request.Host}/cards/";
+        var address = $"{http.Request.Scheme}://{http.Request.Host}/c/";
         return Results.File(CardSet.Pdf([.. cards.Value.Select(c => Printed(c, fromBand, today, address))]), "application/pdf", stage is null ? "cards.pdf" : $"card-{stage}.pdf");
     }
 
