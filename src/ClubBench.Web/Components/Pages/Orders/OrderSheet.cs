@@ -14,8 +14,10 @@ public sealed record OrderRow(string Part, string Type, string Value, double Nee
 /// <summary>A parts order as table, CSV and spreadsheet: the same rows in all three.</summary>
 public static class OrderSheet
 {
+    private const string WireInMetres = "wire, in metres";
+
     public static IReadOnlyList<OrderRow> Rows(PartsOrder order) =>
-        [.. order.Lines.Select(l => new OrderRow(Phrases.Word(l.Class), l.Type, l.ValueSi is { } si ? Written(l.Class, si) : "", l.Needed, l.Spare, l.InStock, l.ToBuy))];
+        [.. order.Lines.Select(l => new OrderRow(Phrases.Word(l.Class), l.Type == PartsOrder.Wire ? WireInMetres : l.Type, l.ValueSi is { } si ? QuantityText.Format(KindOf(l), si) : "", l.Needed, l.Spare, l.InStock, l.ToBuy))];
 
     /// <summary>CSV in UTF-8 with a heading line. Cells a spreadsheet could take for a formula get a leading apostrophe.</summary>
     public static byte[] Csv(PartsOrder order)
@@ -41,16 +43,15 @@ public static class OrderSheet
 
     private static string Number(double amount) => amount.ToString("0.###", CultureInfo.InvariantCulture);
 
-    private static string Written(PartClass part, double si) => QuantityText.Format(
-        part switch
-        {
-            PartClass.Capacitor or PartClass.Trimmer or PartClass.VariableCapacitor => QuantityKind.Capacitance,
-            PartClass.Resistor or PartClass.Potentiometer => QuantityKind.Resistance,
-            PartClass.MouldedChoke or PartClass.Winding => QuantityKind.Inductance,
-            PartClass.Crystal => QuantityKind.Frequency,
-            PartClass.Hardware => QuantityKind.Current,
-            PartClass.Diode => QuantityKind.Voltage,
-            _ => QuantityKind.Number,
-        },
-        si);
+    private static QuantityKind KindOf(OrderLine line) => line.Class switch
+    {
+        PartClass.Winding => QuantityKind.Length,
+        PartClass.Capacitor or PartClass.Trimmer or PartClass.VariableCapacitor => QuantityKind.Capacitance,
+        PartClass.Resistor or PartClass.Potentiometer => QuantityKind.Resistance,
+        PartClass.MouldedChoke => QuantityKind.Inductance,
+        PartClass.Crystal => QuantityKind.Frequency,
+        PartClass.Hardware => QuantityKind.Current,
+        PartClass.Diode => QuantityKind.Voltage,
+        _ => QuantityKind.Number,
+    };
 }
