@@ -36,7 +36,7 @@ public sealed class BenchEntries(Record record, RecordFitted fitted, MoveStage m
 {
     private static readonly JsonSerializerOptions FromPhone = new(JsonSerializerDefaults.Web);
 
-    public async Task<IReadOnlyList<BenchEntryAnswer>> TakeAsync(Actor actor, OpenedBoard board, BenchWords words, BenchEntriesRequest request, CancellationToken cancellation)
+    public async Task<IReadOnlyList<BenchEntryAnswer>> TakeAsync(Actor actor, Guid board, BenchWords words, BenchEntriesRequest request, CancellationToken cancellation)
     {
         var answers = new List<BenchEntryAnswer>();
         foreach (var item in request.Items)
@@ -45,20 +45,19 @@ public sealed class BenchEntries(Record record, RecordFitted fitted, MoveStage m
         return answers;
     }
 
-    private Task<BenchEntryAnswer> TakeAsync(Actor actor, OpenedBoard board, BenchWords words, BenchEntryItem e, CancellationToken cancellation) => e.Type switch
+    private Task<BenchEntryAnswer> TakeAsync(Actor actor, Guid board, BenchWords words, BenchEntryItem e, CancellationToken cancellation) => e.Type switch
     {
         "reading" => ReadingAsync(actor, board, words, e, cancellation),
-        "fitted" => AnswerAsync(e, fitted.Run(actor, new RecordFittedInput(e.Id, board.Id, e.Stage ?? "", e.Designator ?? "", e.Turns), cancellation), texts["bench.fitted", e.Turns ?? 0, e.Designator ?? ""]),
-        "move" when Enum.TryParse<StageProgress>(e.To, out var to) => AnswerAsync(e, move.Run(actor, new MoveStageInput(board.Id, e.Stage ?? "", to), cancellation), texts["bench.moved"]),
-        "help" => AnswerAsync(e, help.Run(actor, new CallForHelpInput(e.Id, board.Id, e.Stage ?? "", Symptom(e)), cancellation), texts["bench.help-done"]),
+        "fitted" => AnswerAsync(e, fitted.Run(actor, new RecordFittedInput(e.Id, board, e.Stage ?? "", e.Designator ?? "", e.Turns), cancellation), texts["bench.fitted", e.Turns ?? 0, e.Designator ?? ""]),
+        "move" when Enum.TryParse<StageProgress>(e.To, out var to) => AnswerAsync(e, move.Run(actor, new MoveStageInput(board, e.Stage ?? "", to), cancellation), texts["bench.moved"]),
+        "help" => AnswerAsync(e, help.Run(actor, new CallForHelpInput(e.Id, board, e.Stage ?? "", Symptom(e)), cancellation), texts["bench.help-done"]),
         _ => Task.FromResult(new BenchEntryAnswer(e.Id, Refused: texts["bench.refused.unreadable"])),
     };
 
-    private async Task<BenchEntryAnswer> ReadingAsync(Actor actor, OpenedBoard board, BenchWords words, BenchEntryItem e, CancellationToken cancellation)
+    private async Task<BenchEntryAnswer> ReadingAsync(Actor actor, Guid board, BenchWords words, BenchEntryItem e, CancellationToken cancellation)
     {
-        var outcome = await record.Run(actor, new RecordInput(board.Id, e.Id, e.Point ?? "", e.Typed ?? "", e.Si, e.Instrument), cancellation);
-        var kind = board.Stages.FirstOrDefault(s => s.Expected.Any(x => x.Point == e.Point))?.Kind;
-        return outcome.Succeeded && kind is not null ? new BenchEntryAnswer(e.Id, Advice: words.Advice(outcome.Value.Advice, kind)) : Refusal(e, outcome.Messages);
+        var outcome = await record.Run(actor, new RecordInput(board, e.Id, e.Point ?? "", e.Typed ?? "", e.Si, e.Instrument), cancellation);
+        return outcome.Succeeded ? new BenchEntryAnswer(e.Id, Advice: words.Advice(outcome.Value.Advice, outcome.Value.StageKind)) : Refusal(e, outcome.Messages);
     }
 
     private async Task<BenchEntryAnswer> AnswerAsync<T>(BenchEntryItem e, Task<Outcome<T>> run, string done)

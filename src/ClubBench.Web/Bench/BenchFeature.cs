@@ -53,8 +53,8 @@ public static class BenchFeature
         if (!await antiforgery.IsRequestValidAsync(http)) return Results.Problem(texts["bench.refused.token"], statusCode: StatusCodes.Status400BadRequest);
         if (request.Items.Count > MostEntries) return Results.Problem(texts["bench.refused.many"], statusCode: StatusCodes.Status413PayloadTooLarge);
         var actor = http.User.ToActor();
-        if (await models.OpenAsync(actor, tag, cancellation) is not { } board) return Results.NotFound();
-        return Results.Json(new { items = await entries.TakeAsync(actor, board, models.Words, request, cancellation) });
+        if (await models.FindAsync(actor, tag, cancellation) is not { } board) return Results.NotFound();
+        return Results.Json(new { items = await entries.TakeAsync(actor, board.Id, models.Words, request, cancellation) });
     }
 
     private static string TokenOf(HttpContext http, IAntiforgery antiforgery) => antiforgery.GetAndStoreTokens(http).RequestToken!;

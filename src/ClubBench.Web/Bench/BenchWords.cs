@@ -38,11 +38,7 @@ public sealed class BenchWords(IStringLocalizer<NightTexts> texts)
     };
 
     /// <summary>What a point measures, in short: the part it belongs to, or the kind's own word.</summary>
-    public string Point(StageScreens stage, ExpectedReading expected)
-    {
-        var parts = expected.Point.Split('.');
-        return parts.Length > 2 ? parts[1] : Phrases.Say($"point.{parts[^1]}", KindOf(stage));
-    }
+    public string Point(StageScreens stage, ExpectedReading expected) => PointName.Short(expected.Point, KindOf(stage));
 
     public string SetUp(StageScreens stage, ExpectedReading expected) => expected.SetUp.Length == 0 ? "" : Sentence(Phrases.Say(expected.SetUp, KindOf(stage)));
 

@@ -26,9 +26,10 @@ public sealed record RecordInput(Guid BoardId, Guid Id, string Point, string Typ
 /// <summary>A stored reading with what ClubBench says to it.</summary>
 /// <param name="Ordinal">Its place in the order of all readings.</param>
 /// <param name="ValueSi">The value as stored.</param>
+/// <param name="StageKind">Kind of its stage, whose words the advice uses.</param>
 /// <param name="Advice">The advice.</param>
 /// <param name="IsResend">Whether it had been stored before.</param>
-public sealed record RecordedReading(long Ordinal, double ValueSi, Advice Advice, bool IsResend);
+public sealed record RecordedReading(long Ordinal, double ValueSi, string StageKind, Advice Advice, bool IsResend);
 
 /// <summary>Takes readings in: checks, stores, advises, announces. Append-only.</summary>
 public sealed class ReadingBook(PlanArchive archive)
@@ -37,8 +38,8 @@ public sealed class ReadingBook(PlanArchive archive)
     {
         var board = await work.BoardForWritingAsync(input.BoardId, cancellation);
         if (!board.Succeeded) return Outcome<RecordedReading>.Failure(board.Messages);
-        if (await work.Db.Readings.FirstOrDefaultAsync(r => r.BoardId == input.BoardId && r.Id == input.Id, cancellation) is { } first) return await AgainAsync(work, first, input, cancellation);
         var plan = await archive.InForceAsync(work.Db, board.Value.PlanId, cancellation);
+        if (await work.Db.Readings.FirstOrDefaultAsync(r => r.BoardId == input.BoardId && r.Id == input.Id, cancellation) is { } first) return await AgainAsync(work, plan, first, input, cancellation);
         var checkedReading = await ReadingCheck.OfAsync(work, plan, input, cancellation);
         if (!checkedReading.Succeeded) return Outcome<RecordedReading>.Failure(checkedReading.Messages);
         var reading = checkedReading.Value;
@@ -48,16 +49,16 @@ public sealed class ReadingBook(PlanArchive archive)
         work.Db.AdviceGiven.Add(Given(work, reading, advice));
         if (await work.StageAsync(reading.BoardId, reading.Stage, cancellation) is { Progress: StageProgress.NotStarted } stage) work.Move(stage, StageEventKind.Moved, StageProgress.BeingBuilt, stage.Hold);
         work.Announce(EventKind.ReadingTaken, reading.Id, reading.BoardId, reading.Stage);
-        return Outcome<RecordedReading>.Success(new RecordedReading(reading.Ordinal, reading.ValueSi, advice, IsResend: false));
+        return Outcome<RecordedReading>.Success(new RecordedReading(reading.Ordinal, reading.ValueSi, plan.Plan.Stage(reading.Stage).After.Kind, advice, IsResend: false));
     }
 
-    private static async Task<Outcome<RecordedReading>> AgainAsync(Work work, StoredReading first, RecordInput input, CancellationToken cancellation)
+    private static async Task<Outcome<RecordedReading>> AgainAsync(Work work, ArchivedPlan plan, StoredReading first, RecordInput input, CancellationToken cancellation)
     {
         var same = (first.Point, first.TypedText, first.Instrument, first.Note, first.Replaces) == (input.Point, input.TypedText, input.Instrument, input.Note, input.Replaces)
             && (input.ValueSi is null || input.ValueSi.Value.Equals(first.ValueSi));
         if (!same) return Outcome<RecordedReading>.Failure(FieldMessage.Error("id", "journal.id-used"));
         var given = await work.Db.AdviceGiven.SingleAsync(a => a.ReadingOrdinal == first.Ordinal, cancellation);
-        return Outcome<RecordedReading>.Success(new RecordedReading(first.Ordinal, first.ValueSi, StoredJson.Read<Advice>(given.AdviceJson), IsResend: true));
+        return Outcome<RecordedReading>.Success(new RecordedReading(first.Ordinal, first.ValueSi, plan.Plan.Stage(first.Stage).After.Kind, StoredJson.Read<Advice>(given.AdviceJson), IsResend: true));
     }
 
     private static async Task<Advice> AdviseAsync(Work work, Board board, ArchivedPlan plan, StoredReading reading, CancellationToken cancellation)

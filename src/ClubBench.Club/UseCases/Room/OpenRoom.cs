@@ -6,6 +6,7 @@ using ClubBench.Club.UseCases.Plans;
 using ClubBench.Club.UseCases.Readings;
 using ClubBench.Planning;
 using ClubBench.Planning.Advising;
+using ClubBench.Planning.Figures;
 using ClubBench.Planning.Plans;
 using Microsoft.EntityFrameworkCore;
 
@@ -13,6 +14,9 @@ namespace ClubBench.Club.UseCases.Room;
 
 /// <summary>Opens the room of a night.</summary>
 public sealed record OpenRoomInput(Guid NightId);
+
+/// <summary>A column: a stage and its kind.</summary>
+public sealed record RoomStage(string Key, string Kind);
 
 /// <summary>One stage of one board.</summary>
 /// <param name="LastVerdict">What was said to the newest reading; null where there is none.</param>
@@ -25,6 +29,9 @@ public sealed record RoomBoard(Guid Id, string Tag, Guid PlanId, string BandName
 /// <param name="Mentor">Mentor on the way; null while nobody is.</param>
 public sealed record RoomCall(Guid Id, Guid BoardId, string Tag, string Stage, string Text, DateTime CalledUtc, string? Mentor, Guid Version);
 
+/// <summary>A reading, by the tag of its board.</summary>
+public sealed record RoomReading(long Ordinal, string Tag, string Stage, string Point, QuantityKind Kind, double ValueSi, ReadingVerdict Verdict);
+
 /// <summary>A shared instrument.</summary>
 public sealed record RoomInstrument(string Name, InstrumentClass Class, string Post);
 
@@ -34,6 +41,7 @@ public sealed record RoomPlan(Guid Id, string Name, string BandName, int Revisio
 /// <summary>The room as it stands.</summary>
 /// <param name="Stages">Columns: every stage of the plans, in the order they are brought up.</param>
 /// <param name="Help">Calls, longest wait first.</param>
+/// <param name="LastReadings">The newest readings, newest first.</param>
 /// <param name="JoinCode">Code to be spoken; null for builders, and unless the night is open.</param>
 /// <param name="UpToOrdinal">Newest change this picture contains; ask the change feed for what comes after.</param>
 public sealed record RoomPicture(
@@ -44,9 +52,10 @@ public sealed record RoomPicture(
     DateTime? OpenedUtc,
     string? JoinCode,
     IReadOnlyList<RoomPlan> Plans,
-    IReadOnlyList<string> Stages,
+    IReadOnlyList<RoomStage> Stages,
     IReadOnlyList<RoomBoard> Boards,
     IReadOnlyList<RoomCall> Help,
+    IReadOnlyList<RoomReading> LastReadings,
     IReadOnlyList<RoomInstrument> Instruments,
     IReadOnlyList<PointAlert> Alerts,
     DateTime NowUtc,
@@ -76,9 +85,10 @@ public sealed class OpenRoom(ClubStore store, PlanArchive archive) : Query<OpenR
             night.OpenedUtc,
             work.Actor.Role > Role.Builder ? night.JoinCode : null,
             [.. plans.Select(p => new RoomPlan(p.Row.Id, p.Row.Name, p.Row.BandName, p.Revision, boards.Count(b => b.PlanId == p.Row.Id)))],
-            [.. plans.SelectMany(p => BringUp.Order(p.Plan)).Select(s => s.Stage).Distinct(StringComparer.Ordinal)],
+            [.. plans.SelectMany(p => BringUp.Order(p.Plan)).DistinctBy(s => s.Stage, StringComparer.Ordinal).Select(s => new RoomStage(s.Stage, s.After.Kind))],
             await RoomBoards.OfAsync(db, night, boards, plans, cancellation),
             await RoomCalls.OfAsync(db, night.GroupBuildId, cancellation),
+            await RoomReadings.OfAsync(db, night.GroupBuildId, cancellation),
             instruments,
             await BatchReadings.AlertsAsync(db, [.. plans.Select(p => p.Row)], cancellation),
             work.NowUtc,
