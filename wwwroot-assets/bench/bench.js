@@ -156,6 +156,7 @@ function typing(form, point) {
   form.elements.text.removeAttribute("aria-invalid");
   document.title = document.title.replace(say("errorTitle"), "");
   phase(form, "typing");
+  form.querySelector("[data-advice]").hidden = true;
   drafts.keep(point.point, { text: form.elements.text.value, unit: form.querySelector("[name^=unit]:checked")?.value ?? "0" });
   echo(form, point);
 }

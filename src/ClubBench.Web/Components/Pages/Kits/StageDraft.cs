@@ -1,3 +1,4 @@
+using System.Globalization;
 using ClubBench.Planning;
 using ClubBench.Planning.Figures;
 using ClubBench.Planning.Kits;
@@ -67,8 +68,14 @@ public sealed class StageDraft
         {
             var kind = KindOf(name);
             var written = part.Value(name) is { } si ? QuantityText.Split(kind, si, 6) : new QuantityParts("", QuantityUnits.Of(kind)[0].Symbol);
-            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false) { Typed = written.Number };
+            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false) { Typed = Shortest(written.Number) };
         });
+
+    /// <summary>Six digits without the zeros at the end, so that 270 pF stands as 270.</summary>
+    private static string Shortest(string number) =>
+        number.Contains(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator, StringComparison.Ordinal)
+            ? number.TrimEnd('0').TrimEnd(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator[0])
+            : number;
 
     /// <summary>The unit at the end of a value's name says what it measures.</summary>
     private static QuantityKind KindOf(string name) => name switch
