@@ -14,7 +14,7 @@ public sealed class FirstMinutesTests(Hall hall)
     [InlineData("builder", "/bench/")]
     public async Task PrintedLink_Followed_LeadsToTheWorkOfTheRoleWithoutTheTokenInTheAddress(string role, string place)
     {
-        await using var visitor = await hall.EnterAsync(role);
+        await using var visitor = await hall.FollowLinkAsync(role);
 
         Assert.StartsWith(place, new Uri(visitor.Page.Url).AbsolutePath, StringComparison.Ordinal);
         Assert.DoesNotContain(hall.Site.LinkOf(role).Segments[^1], visitor.Page.Url, StringComparison.Ordinal);

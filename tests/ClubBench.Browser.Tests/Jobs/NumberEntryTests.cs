@@ -1,3 +1,4 @@
+using System.Text.RegularExpressions;
 using ClubBench.Browser.Tests.Site;
 using Microsoft.Playwright;
 
@@ -33,7 +34,7 @@ public sealed class NumberEntryTests(Hall hall)
 
         await Assertions.Expect(bench.Advice(point)).ToContainTextAsync("10 times what it should be");
         Assert.Equal(0, await bench.WaitingAsync());
-        await bench.Advice(point).GetByRole(AriaRole.Button, new() { NameRegex = new("Did you mean") }).ClickAsync();
+        await bench.Advice(point).GetByRole(AriaRole.Button, new() { NameRegex = new("Did you mean", RegexOptions.None, TimeSpan.FromSeconds(1)) }).ClickAsync();
         await bench.AllSentAsync();
         await Assertions.Expect(bench.Advice(point)).ToHaveAttributeAsync("data-verdict", "Good");
     }

@@ -1,3 +1,5 @@
+using System.Diagnostics;
+using System.Globalization;
 using ClubBench.Browser.Tests.Site;
 using Microsoft.Playwright;
 
@@ -21,12 +23,17 @@ public sealed class ReadingReachesRoomTests(Hall hall)
         var before = await coordinator.Page.Locator("[data-last-readings] li").AllTextContentsAsync();
         var text = point.Typed(0.03);
 
-        await bench.TypeAndSaveAsync(point, text);
+        await bench.GoToAsync(point);
+        await bench.Field(point).FillAsync(text);
 
+        await bench.SaveAsync(point);
+
+        var saved = Stopwatch.StartNew();
         await coordinator.Page.WaitForFunctionAsync(
             "([tag, label, before]) => [...document.querySelectorAll('[data-last-readings] li')].some(l => l.textContent.includes(tag) && l.textContent.includes(label) && !before.includes(l.textContent))",
             new object[] { bench.Tag, point.Label, before },
             new() { Timeout = OneSecond, PollingInterval = 20 });
+        TestContext.Current.TestOutputHelper?.WriteLine($"In the room after {saved.ElapsedMilliseconds.ToString(CultureInfo.InvariantCulture)} ms.");
         await bench.AllSentAsync();
         await Assertions.Expect(bench.Advice(point)).ToHaveAttributeAsync("data-verdict", "Good");
     }

@@ -37,6 +37,16 @@ internal sealed class BenchScreen
 
     public ILocator Sync => Page.Locator("#sync");
 
+    /// <summary>The screens of a stage, in order.</summary>
+    public Task<string[]> StepsAsync(string stage) =>
+        Page.EvaluateAsync<string[]>("s => [...document.querySelectorAll('[data-part]')].map(p => p.id).filter(id => id.startsWith(s + '-') || id.startsWith(s + '.'))", stage);
+
+    public async Task GoToStepAsync(string step)
+    {
+        await Page.EvaluateAsync("s => { location.hash = s; }", step);
+        await Page.Locator($"[id='{step}']").WaitForAsync(new() { State = WaitForSelectorState.Visible });
+    }
+
     public async Task GoToAsync(BenchScreenPoint point)
     {
         await Page.EvaluateAsync("p => { location.hash = document.querySelector(`form.entry[data-point='${p}']`).closest('[data-part]').id; }", point.Point);

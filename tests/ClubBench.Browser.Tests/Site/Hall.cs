@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using Microsoft.Playwright;
 
 namespace ClubBench.Browser.Tests.Site;
@@ -12,6 +13,7 @@ public sealed class HallCollection : ICollectionFixture<Hall>
 /// <summary>One demo site and one browser for all tests; every person in a test has a browser context of their own.</summary>
 public sealed class Hall : IAsyncLifetime
 {
+    private readonly ConcurrentDictionary<(string Role, Uri Address), Entrance> _entrances = new();
     private IPlaywright? _playwright;
     private IBrowser? _browser;
     private DemoSite? _site;
@@ -37,18 +39,48 @@ public sealed class Hall : IAsyncLifetime
         if (_site is not null) await _site.DisposeAsync();
     }
 
-    /// <summary>A person with a fresh browser, signed in by the link printed for the role; null for a stranger.</summary>
+    /// <summary>A person with a fresh browser, come in by the link printed for the role.</summary>
+    public async Task<Visitor> FollowLinkAsync(string role)
+    {
+        var (_, visitor) = await OpenAsync(Site.Address, 1280, 800, dark: false);
+        await visitor.GoAsync(Site.LinkOf(role).PathAndQuery);
+        return visitor;
+    }
+
+    /// <summary>
+    /// A person with a fresh browser, signed in and at the place of the role; null for a stranger. The link is followed once for each role, and later
+    /// persons get its cookies, because the door slows down whoever comes in too often.
+    /// </summary>
     public async Task<Visitor> EnterAsync(string? role, int width = 1280, int height = 800, bool dark = false, bool underHallName = false)
+    {
+        var address = underHallName ? Site.HallAddress : Site.Address;
+        var (context, visitor) = await OpenAsync(address, width, height, dark);
+        if (role is null) return visitor;
+        if (_entrances.TryGetValue((role, address), out var entrance))
+        {
+            await context.AddCookiesAsync(entrance.Cookies);
+            await visitor.GoAsync(entrance.Place);
+            return visitor;
+        }
+
+        await visitor.GoAsync(Site.LinkOf(role).PathAndQuery);
+        var cookies = (await context.CookiesAsync()).Select(c => new Cookie { Name = c.Name, Value = c.Value, Domain = c.Domain, Path = c.Path, HttpOnly = c.HttpOnly, Secure = c.Secure, SameSite = c.SameSite, Expires = c.Expires });
+        _entrances[(role, address)] = new Entrance([.. cookies], new Uri(visitor.Page.Url).AbsolutePath);
+        return visitor;
+    }
+
+    private async Task<(IBrowserContext Context, Visitor Visitor)> OpenAsync(Uri address, int width, int height, bool dark)
     {
         var context = await _browser!.NewContextAsync(new()
         {
             ViewportSize = new() { Width = width, Height = height },
             ColorScheme = dark ? ColorScheme.Dark : ColorScheme.Light,
-            BaseURL = (underHallName ? Site.HallAddress : Site.Address).ToString(),
+            BaseURL = address.ToString(),
             Locale = "en-GB",
         });
-        var visitor = new Visitor(context, await context.NewPageAsync());
-        if (role is not null) await visitor.GoAsync(Site.LinkOf(role).PathAndQuery);
-        return visitor;
+        return (context, new Visitor(context, await context.NewPageAsync()));
     }
+
+    /// <summary>What a role got at the door, and where it was led.</summary>
+    private sealed record Entrance(IReadOnlyList<Cookie> Cookies, string Place);
 }

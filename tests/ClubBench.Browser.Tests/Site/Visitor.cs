@@ -30,6 +30,9 @@ public sealed class Visitor : IAsyncDisposable
     /// <summary>Whether lost connections are part of the test.</summary>
     public bool NetworkMayFail { get; set; }
 
+    /// <summary>Whether a missing page is part of the test.</summary>
+    public bool AnswersMayBeMissing { get; set; }
+
     public IReadOnlyCollection<string> ForeignRequests => _foreign;
 
     public IReadOnlyCollection<string> Errors => _errors;
@@ -37,7 +40,7 @@ public sealed class Visitor : IAsyncDisposable
     public async Task<IResponse?> GoAsync(string path)
     {
         var answer = await Page.GotoAsync(path);
-        await SettledAsync();
+        if (answer is not { Ok: false }) await SettledAsync();
         return answer;
     }
 
@@ -58,5 +61,7 @@ public sealed class Visitor : IAsyncDisposable
         Assert.Empty(_errors);
     }
 
-    private bool MayFail(string text) => NetworkMayFail && (text.Contains("net::ERR_", StringComparison.Ordinal) || text.Contains("WebSocket", StringComparison.Ordinal));
+    private bool MayFail(string text) =>
+        (AnswersMayBeMissing && text.Contains("status of 404", StringComparison.Ordinal))
+        || (NetworkMayFail && (text.Contains("net::ERR_", StringComparison.Ordinal) || text.Contains("WebSocket", StringComparison.Ordinal)));
 }
