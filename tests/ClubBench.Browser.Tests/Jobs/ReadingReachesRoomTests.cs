@@ -20,7 +20,7 @@ public sealed class ReadingReachesRoomTests(Hall hall)
         Assert.False(await phone.Page.EvaluateAsync<bool>("() => isSecureContext"));
         var bench = await BenchScreen.OfAsync(phone);
         var point = bench.PointAt(0);
-        var before = await coordinator.Page.Locator("[data-last-readings] li").AllTextContentsAsync();
+        var before = await coordinator.Page.EvaluateAsync<long>("() => Math.max(0, ...[...document.querySelectorAll('[data-reading]')].map(l => Number(l.dataset.reading)))");
         var text = point.Typed(0.03);
 
         await bench.GoToAsync(point);
@@ -30,7 +30,7 @@ public sealed class ReadingReachesRoomTests(Hall hall)
 
         var saved = Stopwatch.StartNew();
         await coordinator.Page.WaitForFunctionAsync(
-            "([tag, label, before]) => [...document.querySelectorAll('[data-last-readings] li')].some(l => l.textContent.includes(tag) && l.textContent.includes(label) && !before.includes(l.textContent))",
+            "([tag, label, before]) => [...document.querySelectorAll('[data-reading]')].some(l => Number(l.dataset.reading) > before && l.textContent.includes(tag) && l.textContent.includes(label))",
             new object[] { bench.Tag, point.Label, before },
             new() { Timeout = OneSecond, PollingInterval = 20 });
         TestContext.Current.TestOutputHelper?.WriteLine($"In the room after {saved.ElapsedMilliseconds.ToString(CultureInfo.InvariantCulture)} ms.");

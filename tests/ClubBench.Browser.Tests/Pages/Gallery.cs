@@ -36,7 +36,7 @@ internal static class Gallery
     {
         var sheet = new StringBuilder($"<style>{Look}</style>");
         foreach (var file in Directory.GetFiles(Folder, "*.png").Order(StringComparer.Ordinal))
-            sheet.Append($"<figure><img src=\"data:image/png;base64,{Convert.ToBase64String(await File.ReadAllBytesAsync(file))}\"><figcaption>{Path.GetFileNameWithoutExtension(file)}</figcaption></figure>");
+            sheet.Append("<figure><img src=\"data:image/png;base64,").Append(Convert.ToBase64String(await File.ReadAllBytesAsync(file))).Append("\"><figcaption>").Append(Path.GetFileNameWithoutExtension(file)).Append("</figcaption></figure>");
         await page.SetContentAsync(sheet.ToString());
         await page.ScreenshotAsync(new() { Path = Path.Combine(Sources.Artefacts, "contact-sheet.png"), FullPage = true });
     }
