@@ -30,8 +30,8 @@ internal static class WindSection
         var shows = card.Context.Instruments.TryGetValue(InstrumentClass.LcMeter, out var meter) ? Texts.Say("card.shows", meter) : Texts.Of("card.meter-shows");
         var columns = new Column[]
         {
-            new(Texts.Of("card.coil"), 34), new(Texts.Of("card.turns"), 46), new(Texts.Of("card.cut"), 82),
-            new(Texts.Of("card.passes"), 246), new(shows, 74, TextSide.End), new(Texts.Of("card.yours"), 51, TextSide.End),
+            new(Texts.Of("card.coil"), 34), new(Texts.Of("card.turns"), 46), new(Texts.Of("card.cut"), 80),
+            new(Texts.Of("card.passes"), 246), new(shows, 80, TextSide.End), new(Texts.Of("card.yours"), 47, TextSide.End),
         };
         return new Table(columns, [.. card.Content.Windings.SelectMany(RowsOf)]);
     }

@@ -65,6 +65,17 @@ public class CardPagesTests
         Assert.Equal(3, with - without);
     }
 
+    [Fact]
+    public void Draw_ManyTurns_GiveOneBoxForEveryFivePassesWithItsCount()
+    {
+        var card = SampleCards.LowPass with { Windings = [.. SampleCards.LowPass.Windings.Select(w => w with { Turns = 22 })] };
+        var surface = Drawn(card);
+
+        Assert.Equal(3, surface.Texts.Count(t => t.Text == "22"));
+        Assert.Equal(3, surface.Texts.Count(t => t.Text == "20"));
+        Assert.Single(surface.Pages);
+    }
+
     [Theory]
     [InlineData("A4")]
     [InlineData("Letter")]
@@ -107,7 +118,7 @@ public class CardPagesTests
         {
             var surface = Drawn(card);
 
-            Assert.InRange(surface.Pages.Count, 1, 2);
+            Assert.Single(surface.Pages);
             Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, PaperSize.A4.Height - PaperSize.Millimetres(5)));
             Assert.All(CardFigures.Of(card), f => Assert.Contains(f.Text.Replace('\u00A0', ' '), Joined(surface), StringComparison.Ordinal));
         }
