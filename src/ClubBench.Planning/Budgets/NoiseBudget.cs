@@ -14,6 +14,9 @@ public sealed class NoiseBudget : IChainBudget
 {
     private static readonly Resistance System = Resistance.FromOhm(50);
 
+    /// <summary>A loss below this nobody hears or measures.</summary>
+    private static readonly Decibels Noticeable = Decibels.FromDb(0.1);
+
     /// <inheritdoc/>
     public string Id => "noise";
 
@@ -46,6 +49,8 @@ public sealed class NoiseBudget : IChainBudget
 
     private static Finding FindingOf(PreamplifierVerdict verdict, string stage, IReadOnlyList<Figure> figures) => verdict switch
     {
+        PreamplifierVerdict.NotNeeded when figures.Single(f => f.Name == "degradation").Si < Noticeable.Db =>
+            new Finding("budget.preamplifier-nothing-lost", Severity.Note, stage, null, [.. figures, Figure.Of("noticeable", Noticeable)], StageAction.Keep),
         PreamplifierVerdict.NotNeeded => new Finding("budget.preamplifier-not-needed", Severity.Note, stage, null, figures, StageAction.Keep),
         PreamplifierVerdict.Adequate => new Finding("budget.preamplifier-adequate", Severity.Note, stage, null, figures, StageAction.Keep),
         PreamplifierVerdict.Marginal => new Finding("budget.preamplifier-marginal", Severity.Warning, stage, null, figures, StageAction.Keep),

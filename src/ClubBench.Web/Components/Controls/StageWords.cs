@@ -21,11 +21,7 @@ public sealed class StageWords(Kit kit)
 
     public string Say(Finding finding) => Phrases.Say(finding, KindOf(finding.Stage));
 
-    public string NameOf(Figure figure, string stage) => LabelOf(figure, KindOf(stage));
-
-    /// <summary>Label of a figure. Inputs of workings and lines of sums are many; one without a text of its own is shown by its plain name.</summary>
-    public static string LabelOf(Figure figure, string? kind) =>
-        Phrases.Has($"figure.{figure.Name}", kind) ? Phrases.NameOf(figure, kind) : figure.Name.Replace('-', ' ');
+    public string NameOf(Figure figure, string stage) => Phrases.NameOf(figure, KindOf(stage));
 
     public string Role(string stage, string role) => Phrases.Say($"role.{role}", KindOf(stage));
 

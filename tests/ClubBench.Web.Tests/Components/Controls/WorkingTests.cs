@@ -7,7 +7,7 @@ namespace ClubBench.Web.Tests.Components.Controls;
 
 public sealed class WorkingTests : PageContext
 {
-    private static readonly Figure Given = Figure.Stated("span", QuantityKind.FrequencyShift, 12_000);
+    private static readonly Figure Given = Figure.Stated("bandwidth", QuantityKind.FrequencyShift, 12_000);
 
     [Fact]
     public void Figure_WithoutWorking_IsPlainText()
@@ -21,7 +21,7 @@ public sealed class WorkingTests : PageContext
     [Fact]
     public void Figure_WithWorking_OpensItByButton()
     {
-        var computed = Figure.Of("span", QuantityKind.FrequencyShift, 12_000, new Working("difference", [Given with { Si = 10_111_000, Kind = QuantityKind.Frequency }], SourceRef.CommonPractice("subtraction")));
+        var computed = Figure.Of("bandwidth", QuantityKind.FrequencyShift, 12_000, new Working("resonance", [Given with { Name = "resonance", Si = 10_111_000, Kind = QuantityKind.Frequency }], SourceRef.CommonPractice("subtraction")));
         var scope = Render<WorkingScope>(p => p.AddChildContent<FigureText>(f => f.Add(x => x.Figure, computed)));
 
         scope.Find("button.figure-button").Click();
