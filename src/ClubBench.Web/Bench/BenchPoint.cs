@@ -31,9 +31,6 @@ public sealed record BenchPoint(
     IReadOnlyList<BenchSpelling> Spellings,
     IReadOnlyList<BenchInstrument> Instruments)
 {
-    /// <summary>Digits that tell the ends of the window apart.</summary>
-    private const int MostDigits = 7;
-
     public static BenchPoint Of(ExpectedReading expected, string label, IEnumerable<Instrument> instruments) => new(
         expected.Point,
         label,
@@ -44,7 +41,7 @@ public sealed record BenchPoint(
         IsLevel(expected.Kind) || expected.Kind is QuantityKind.Temperature or QuantityKind.FrequencyShift,
         !IsLevel(expected.Kind),
         !IsLevel(expected.Kind) && expected.Sides == WindowSides.Both && expected.Nominal != 0,
-        DigitsOf(expected),
+        expected.Digits,
         expected.Instrument.ToString(),
         BenchUnits.Switch(expected.Kind, expected.Nominal),
         BenchUnits.Spellings(expected.Kind),
@@ -59,12 +56,4 @@ public sealed record BenchPoint(
     };
 
     private static bool IsLevel(QuantityKind kind) => kind is QuantityKind.Decibels or QuantityKind.PowerLevel or QuantityKind.RelativeLevel;
-
-    private static int DigitsOf(ExpectedReading e)
-    {
-        var width = Math.Abs(e.HighSi - e.LowSi);
-        if (e.Sides != WindowSides.Both || width == 0) return 3;
-        var size = Math.Max(Math.Abs(e.HighSi), Math.Abs(e.LowSi));
-        return Math.Clamp(2 + (int)Math.Ceiling(Math.Log10(size / width)), 3, MostDigits);
-    }
 }
