@@ -6,14 +6,17 @@ namespace ClubBench.Web.Api;
 
 /// <summary>One example request and answer of an operation, shown in the description of the interface.</summary>
 /// <param name="Request">Example body as JSON; null where there is none.</param>
-/// <param name="Answer">Example answer as JSON; null where it is a file.</param>
-internal sealed record ApiExample(string? Request, string? Answer);
+/// <param name="Answer">Example answer, JSON unless another type is named; null where it is a file of bytes.</param>
+/// <param name="AnswerType">Media type of the answer.</param>
+internal sealed record ApiExample(string? Request, string? Answer, string AnswerType);
 
 internal static class ApiExamples
 {
+    private const string Json = "application/json";
+
     /// <summary>Adds summary and example to an operation.</summary>
-    public static RouteHandlerBuilder Described(this RouteHandlerBuilder builder, string name, string summary, string? request = null, string? answer = null) =>
-        builder.WithName(name).WithSummary(summary).WithMetadata(new ApiExample(request, answer));
+    public static RouteHandlerBuilder Described(this RouteHandlerBuilder builder, string name, string summary, string? request = null, string? answer = null, string answerType = Json) =>
+        builder.WithName(name).WithSummary(summary).WithMetadata(new ApiExample(request, answer, answerType));
 
     /// <summary>Puts the examples into the document.</summary>
     public static Task Fill(OpenApiOperation operation, OpenApiOperationTransformerContext context, CancellationToken cancellation)
@@ -24,7 +27,7 @@ internal static class ApiExamples
             var body = operation.RequestBody as OpenApiRequestBody ?? new OpenApiRequestBody();
             operation.RequestBody = body;
             body.Content ??= new Dictionary<string, OpenApiMediaType>();
-            Put(body.Content, request);
+            Put(body.Content, Json, JsonNode.Parse(request));
         }
 
         if (example.Answer is { } answer)
@@ -32,16 +35,15 @@ internal static class ApiExamples
             operation.Responses ??= [];
             if (operation.Responses.FirstOrDefault(r => r.Key.StartsWith('2')).Value is not OpenApiResponse response) operation.Responses["200"] = response = new OpenApiResponse { Description = "OK" };
             response.Content ??= new Dictionary<string, OpenApiMediaType>();
-            Put(response.Content, answer);
+            Put(response.Content, example.AnswerType, example.AnswerType == Json ? JsonNode.Parse(answer) : JsonValue.Create(answer));
         }
 
         return Task.CompletedTask;
     }
 
-    private static void Put(IDictionary<string, OpenApiMediaType> content, string json)
+    private static void Put(IDictionary<string, OpenApiMediaType> content, string type, JsonNode? example)
     {
-        const string Json = "application/json";
-        if (!content.TryGetValue(Json, out var media)) content[Json] = media = new OpenApiMediaType();
-        media.Example = JsonNode.Parse(json);
+        if (!content.TryGetValue(type, out var media)) content[type] = media = new OpenApiMediaType();
+        media.Example = example;
     }
 }

@@ -1,5 +1,6 @@
 using System.Net;
 using ClubBench.Web.Commands;
+using Microsoft.AspNetCore.Diagnostics;
 using Microsoft.OpenApi;
 
 namespace ClubBench.Web.Api;
@@ -8,9 +9,11 @@ namespace ClubBench.Web.Api;
 public static class ApiFeature
 {
     private const string Document = "v1";
+    private const string Root = "/api/v1";
 
     public static void AddApi(this WebApplicationBuilder builder)
     {
+        builder.Services.Configure<RouteHandlerOptions>(options => options.ThrowOnBadRequest = false);
         builder.Services.AddOpenApi(Document, options =>
         {
             options.OpenApiVersion = OpenApiSpecVersion.OpenApi3_1;
@@ -24,9 +27,23 @@ public static class ApiFeature
         });
     }
 
+    /// <summary>Whatever goes wrong before a use case is asked, such as a body that is no JSON, is said as problem details and never as a page.</summary>
+    public static void UseApiProblems(this WebApplication app) => app.Use(async (http, next) =>
+    {
+        if (!http.Request.Path.StartsWithSegments(Root, StringComparison.OrdinalIgnoreCase))
+        {
+            await next(http);
+            return;
+        }
+
+        if (http.Features.Get<IStatusCodePagesFeature>() is { } pages) pages.Enabled = false;
+        await next(http);
+        if (!http.Response.HasStarted && http.Response.StatusCode >= StatusCodes.Status400BadRequest) await Results.Problem(statusCode: http.Response.StatusCode).ExecuteAsync(http);
+    });
+
     public static void MapApi(this WebApplication app)
     {
-        var api = app.MapGroup("/api/v1").DisableAntiforgery().ProducesProblem(StatusCodes.Status400BadRequest).ProducesProblem(StatusCodes.Status401Unauthorized).ProducesProblem(StatusCodes.Status403Forbidden);
+        var api = app.MapGroup(Root).DisableAntiforgery().ProducesProblem(StatusCodes.Status400BadRequest).ProducesProblem(StatusCodes.Status401Unauthorized).ProducesProblem(StatusCodes.Status403Forbidden);
         api.MapKits();
         api.MapPlans();
         api.MapBoards();

@@ -3,13 +3,14 @@ using ClubBench.Club.Access;
 using ClubBench.Club.UseCases.Boards;
 using ClubBench.Planning.Figures;
 using ClubBench.Planning.Text;
+using ClubBench.Web.State;
 using ClubBench.Web.Texts;
 using Microsoft.Extensions.Localization;
 
 namespace ClubBench.Web.Bench;
 
 /// <summary>Opens boards for the builder's page.</summary>
-public sealed class BenchModels(ListBoards list, OpenBoard open, IStringLocalizer<NightTexts> texts)
+public sealed class BenchModels(ListBoards list, OpenBoard open, ClubTimes times, IStringLocalizer<NightTexts> texts)
 {
     private readonly BenchWords _words = new(texts);
 
@@ -28,6 +29,7 @@ public sealed class BenchModels(ListBoards list, OpenBoard open, IStringLocalize
     public async Task<OpenedBoard?> OpenAsync(Actor actor, string tag, CancellationToken cancellation)
     {
         if (await FindAsync(actor, tag, cancellation) is not { } board) return null;
+        await times.LoadAsync(actor, cancellation);
         var opened = await open.Run(actor, new OpenBoardInput(board.Id), cancellation);
         return opened.Succeeded ? opened.Value : null;
     }
@@ -63,5 +65,5 @@ public sealed class BenchModels(ListBoards list, OpenBoard open, IStringLocalize
             advice.Heading,
             advice);
 
-    private static string TimeOf(DateTime utc) => utc.ToLocalTime().ToString("HH:mm", CultureInfo.CurrentCulture);
+    private string TimeOf(DateTime utc) => times.Of(utc).ToString("HH:mm", CultureInfo.CurrentCulture);
 }

@@ -16,6 +16,9 @@ public abstract class NotebookPage : ComponentBase
     protected OpenPlace Place { get; set; } = default!;
 
     [Inject]
+    protected ClubTimes Times { get; set; } = default!;
+
+    [Inject]
     protected NavigationManager Navigation { get; set; } = default!;
 
     /// <summary>Who looks at the page.</summary>
@@ -30,6 +33,7 @@ public abstract class NotebookPage : ComponentBase
     protected sealed override async Task OnParametersSetAsync()
     {
         Actor = await Current.GetAsync();
+        await Times.LoadAsync(Actor);
         await LoadAsync();
     }
 

@@ -23,6 +23,7 @@ public static class Composition
     {
         app.UseSecurityHeaders();
         app.UseProblemPages();
+        app.UseApiProblems();
         app.UseRouting();
         app.UseRateLimiter();
         app.UseAuthentication();
@@ -33,7 +34,6 @@ public static class Composition
         app.MapSignIn();
         app.MapBench();
         app.MapApi();
-        app.MapOrderFiles();
         app.MapPages();
         return app;
     }

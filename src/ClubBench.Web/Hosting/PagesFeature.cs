@@ -15,6 +15,7 @@ internal static class PagesFeature
         services.AddMudServices();
         services.AddCascadingAuthenticationState();
         services.AddScoped<OpenPlace>();
+        services.AddScoped<ClubTimes>();
         services.AddRazorComponents().AddInteractiveServerComponents(options => options.DetailedErrors = builder.Environment.IsDevelopment());
     }
 

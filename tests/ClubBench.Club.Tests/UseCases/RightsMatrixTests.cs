@@ -12,7 +12,7 @@ public sealed class RightsMatrixTests
     /// <summary>V visitor, B builder, M mentor, C coordinator, H the program itself.</summary>
     private static readonly Dictionary<string, string> MayRun = new(StringComparer.Ordinal)
     {
-        ["AddBoards"] = "C", ["AddInstrument"] = "C", ["AddPerson"] = "C", ["AnswerCall"] = "MC", ["AssignBoard"] = "C", ["CallForHelp"] = "BMC", ["CancelSearch"] = "C", ["CardStatus"] = "BMC",
+        ["AboutClub"] = "BMC", ["AddBoards"] = "C", ["AddInstrument"] = "C", ["AddPerson"] = "C", ["AnswerCall"] = "MC", ["AssignBoard"] = "C", ["CallForHelp"] = "BMC", ["CancelSearch"] = "C", ["CardStatus"] = "VBMCH",
         ["ChangeInstrument"] = "C", ["ChangePlan"] = "C", ["CheckIn"] = "C", ["CloseNight"] = "C", ["CreateGroupBuild"] = "C", ["CreateNight"] = "C", ["CreatePlan"] = "C",
         ["EndMembership"] = "C", ["FindByToken"] = "VBMCH", ["FirstSetUp"] = "VBMCH", ["ImportKit"] = "C", ["IssuePlan"] = "C", ["JoinByCode"] = "VBMCH", ["ListBoards"] = "BMC",
         ["ListCards"] = "BMC", ["ListGroupBuilds"] = "BMC", ["ListKits"] = "BMC", ["ListNights"] = "BMC", ["ListPlans"] = "BMC", ["LogPrint"] = "MC", ["MakeSignInLink"] = "C",

@@ -8,23 +8,24 @@ namespace ClubBench.Club.UseCases.Plans;
 /// <summary>Asks whether a printed card may still be built by.</summary>
 public sealed record CardStatusInput(Guid CardId);
 
-/// <summary>Whether a card is current.</summary>
+/// <summary>Whether a card is current, and besides that only what stands on the paper.</summary>
+/// <param name="PlanId">Plan of the card; opening it asks for more than the paper.</param>
 /// <param name="ReplacedBy">Number of the card that replaced it; null while it is current.</param>
-/// <param name="NewestCardId">The card to build by.</param>
-public sealed record CardStanding(Guid PlanId, string PlanName, string BandName, string Stage, int Number, int? ReplacedBy, Guid NewestCardId);
+public sealed record CardStanding(Guid PlanId, string BandName, string Stage, int Number, int? ReplacedBy);
 
-/// <summary>Says whether a card is current or what replaced it: what the code on the printed card leads to.</summary>
+/// <summary>Says whether a card is current or what replaced it: what the code on the printed card leads to. Whoever holds the paper may ask.</summary>
 public sealed class CardStatus(ClubStore store) : Query<CardStatusInput, CardStanding>(store)
 {
     /// <inheritdoc/>
-    public override Right Required => Right.See;
+    public override Right Required => Right.ComeIn;
 
     /// <inheritdoc/>
     protected override async Task<Outcome<CardStanding>> Handle(Work work, CardStatusInput input, CancellationToken cancellation)
     {
-        if (await work.Db.Cards.FirstOrDefaultAsync(c => c.Id == input.CardId, cancellation) is not { } card) return NotFound("cardId");
-        var newest = await work.Db.Cards.Where(c => c.PlanId == card.PlanId && c.Stage == card.Stage).OrderByDescending(c => c.Number).FirstAsync(cancellation);
-        var plan = await work.Db.Plans.SingleAsync(p => p.Id == card.PlanId, cancellation);
-        return Success(new CardStanding(plan.Id, plan.Name, plan.BandName, card.Stage, card.Number, newest.Number == card.Number ? null : newest.Number, newest.Id));
+        if (await work.Db.Cards.IgnoreQueryFilters().FirstOrDefaultAsync(c => c.Id == input.CardId, cancellation) is not { } card) return NotFound("cardId");
+        work.Enter(card.ClubId);
+        var newest = await work.Db.Cards.Where(c => c.PlanId == card.PlanId && c.Stage == card.Stage).MaxAsync(c => c.Number, cancellation);
+        var band = await work.Db.Plans.Where(p => p.Id == card.PlanId).Select(p => p.BandName).SingleAsync(cancellation);
+        return Success(new CardStanding(card.PlanId, band, card.Stage, card.Number, newest == card.Number ? null : newest));
     }
 }
