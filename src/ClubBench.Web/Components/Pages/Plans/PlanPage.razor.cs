@@ -12,9 +12,10 @@ public partial class PlanPage
 {
     private OpenedPlan? _opened;
     private Plan? _shown;
-    private PlanMoves? _moves;
+    private PlanDifference? _moves;
     private string _chosen = "";
     private IReadOnlyList<Choice>? _before;
+    private (string Stage, IReadOnlyList<Alternative> Alternatives) _found = ("", []);
     private bool _busy;
 
     [Parameter]
@@ -61,8 +62,16 @@ public partial class PlanPage
         if (_opened is not { Plan: var plan }) return Task.CompletedTask;
         var stage = StageOf(plan);
         _chosen = stage;
-        return ApplyAsync([.. plan.Inputs.Choices.Where(c => c.Stage != stage), new Choice(stage, alternative, By: Actor.DisplayName)], plan.Inputs.Choices);
+        var choice = FoundHere.FirstOrDefault(a => a.Id == alternative) is { } found && OpenNow(plan).Alternatives.All(a => a.Id != alternative)
+            ? ThoroughSearches.Freeze(stage, found, Actor.DisplayName)
+            : new Choice(stage, alternative, By: Actor.DisplayName);
+        return ApplyAsync([.. plan.Inputs.Choices.Where(c => c.Stage != stage), choice], plan.Inputs.Choices);
     }
+
+    /// <summary>What a thorough search found for the open stage.</summary>
+    private IReadOnlyList<Alternative> FoundHere => _opened is { Plan: var plan } && _found.Stage == StageOf(plan) ? _found.Alternatives : [];
+
+    private void OnFound(SearchStatus search) => _found = (search.Stage, search.Found);
 
     private Task UndoAsync() => _before is { } before ? ApplyAsync(before, null) : Task.CompletedTask;
 
@@ -80,7 +89,7 @@ public partial class PlanPage
             _shown = Take(await Preview.Run(Actor, new PreviewPlanInput(opened.KitId, opened.Plan.Inputs.Target, choices, opened.Plan.Inputs.Kit.Revision))) ?? _shown;
         }
 
-        if (Refused.Count == 0) (_moves, _before) = (PlanMoves.Between(old, _shown ?? _opened.Plan, _chosen), before);
+        if (Refused.Count == 0) (_moves, _before) = (PlanDifference.Between(old, _shown ?? _opened.Plan, _chosen), before);
         _busy = false;
     }
 
@@ -93,5 +102,7 @@ public partial class PlanPage
         _busy = false;
     }
 
-    private string StageOf(Plan plan) => PlanSheet.OpenStage(_shown ?? plan, Stage).Stage;
+    private StagePlan OpenNow(Plan plan) => PlanSheet.OpenStage(_shown ?? plan, Stage);
+
+    private string StageOf(Plan plan) => OpenNow(plan).Stage;
 }
