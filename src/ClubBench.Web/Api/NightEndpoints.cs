@@ -17,6 +17,6 @@ internal static class NightEndpoints
         api.MapGet("/nights/{id:guid}/room", async (Guid id, HttpContext http, OpenRoom open, CancellationToken cancellation) =>
                 Answers.Of(await open.Run(http.User.ToActor(), new OpenRoomInput(id), cancellation), room => room))
             .Described("OpenRoom", "The live picture of a night: boards by stages, the help queue, instruments.",
-                answer: """{ "boards": [ { "tag": "Q05", "bandName": "20 m", "stages": [ { "stage": "A5", "progress": "measured", "hold": "none" } ] } ], "calls": [] }""");
+                answer: """{ "title": "Transmit", "boards": [ { "tag": "Q05", "bandName": "20 m", "isPresent": true, "cells": [ { "stage": "A5", "action": "change", "progress": "measured", "hold": "none", "lastVerdict": "good" } ] } ], "help": [], "lastReadings": [ { "ordinal": 41, "tag": "Q05", "stage": "A5", "point": "A5.L4.L", "kind": "inductance", "valueSi": 6.76e-7, "verdict": "good" } ], "alerts": [] }""");
     }
 }
