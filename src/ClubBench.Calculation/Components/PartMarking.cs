@@ -52,9 +52,9 @@ public static partial class PartMarking
         return ValueNotation.Value(code.Groups["figures"].Value, exponent, kind) with { ToleranceLetter = letter.Length == 0 ? null : letter[0] };
     }
 
-    [GeneratedRegex(@"^(?<figures>\d\d)(?<zeros>\d?)(?<tolerance>[A-Z]?)$", RegexOptions.ExplicitCapture, 1000)]
+    [GeneratedRegex(@"^(?<figures>[0-9][0-9])(?<zeros>[0-9]?)(?<tolerance>[A-Z]?)$", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex Digits();
 
-    [GeneratedRegex(@"^(?<whole>\d*)R(?<fraction>\d+)$", RegexOptions.ExplicitCapture, 1000)]
+    [GeneratedRegex(@"^(?<whole>[0-9]*)R(?<fraction>[0-9]+)$", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex PicofaradMark();
 }

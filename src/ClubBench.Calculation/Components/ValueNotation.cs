@@ -104,9 +104,9 @@ public static partial class ValueNotation
         return plain.ToString();
     }
 
-    [GeneratedRegex(@"^(?<number>(\d+([.,]\d*)?|[.,]\d+)([eE][+-]?\d{1,3})?)(?<letters>" + Letter + "*)$", RegexOptions.ExplicitCapture, 1000)]
+    [GeneratedRegex(@"^(?<number>([0-9]+([.,][0-9]*)?|[.,][0-9]+)([eE][+-]?[0-9]{1,3})?)(?<letters>" + Letter + "*)$", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex NumberThenLetters();
 
-    [GeneratedRegex(@"^(?<whole>\d*)(?<letter>" + Letter + @")(?<fraction>\d+)(?<rest>" + Letter + "*)$", RegexOptions.ExplicitCapture, 1000)]
+    [GeneratedRegex(@"^(?<whole>[0-9]*)(?<letter>" + Letter + @")(?<fraction>[0-9]+)(?<rest>" + Letter + "*)$", RegexOptions.ExplicitCapture, 1000)]
     private static partial Regex LetterAsMark();
 }

@@ -23,6 +23,24 @@ public class ValueNotationTests
         Assert.Equal(row.Has("value") ? row.Number("value") : null, read.Si);
     }
 
+    // Arabic-Indic, Devanagari and full-width digits: read as numbers by a looser pattern, but not by the number reader behind it.
+    [Theory]
+    [InlineData("\u0664n\u0667")]
+    [InlineData("4n\u0667")]
+    [InlineData("\u096A.7 nF")]
+    [InlineData("\uFF14.7 nF")]
+    public void Parse_DigitsOfOtherScripts_IsRefused(string text) => Assert.Equal(ValueRefusal.NotANumber, ValueNotation.Parse(text, PartKind.Capacitor).Refusal);
+
+    [Theory]
+    [InlineData("\u0661\u0660\u0664")]
+    [InlineData("10\u0664")]
+    public void MarkingParse_DigitsOfOtherScripts_IsRefused(string text) => Assert.Equal(ValueRefusal.NotANumber, PartMarking.Parse(text, PartKind.Capacitor).Refusal);
+
+    [Theory]
+    [InlineData("4n7")]
+    [InlineData("4.7 nF")]
+    public void Parse_PlainDigits_IsRead(string text) => Assert.Equal(4.7e-9, ValueNotation.Parse(text, PartKind.Capacitor).Si);
+
     [Theory]
     [MemberData(nameof(Formats))]
     public void Format_Value_GivesTheText(ReferenceRow row) =>
