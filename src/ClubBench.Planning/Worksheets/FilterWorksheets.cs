@@ -1,42 +1,35 @@
 using ClubBench.Calculation.Filters;
-using ClubBench.Calculation.Networks;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tables;
 using ClubBench.Planning.Figures;
+using static ClubBench.Planning.Worksheets.WorksheetAnswer;
 
 namespace ClubBench.Planning.Worksheets;
 
 /// <summary>Output filters.</summary>
 internal static class FilterWorksheets
 {
-    private static readonly Resistance Line = Resistance.FromOhm(50);
+    /// <summary>Resistance on both sides of every filter here.</summary>
+    internal static readonly Resistance Line = Resistance.FromOhm(50);
+
+    /// <summary>Low-pass prototypes with even ripple.</summary>
+    internal static readonly SourceRef Prototype = new("matthaei-young-jones", "sections 4.03 to 4.05", SourceStatus.Published);
+
+    /// <summary>Return loss a design with even ripple can be asked for: the limits of the prototype.</summary>
+    internal static readonly WorksheetInput ReturnLoss = new("return-loss", QuantityKind.Decibels, 20, 3.1, 46);
 
     public static IReadOnlyList<Worksheet> All { get; } =
     [
-        new("chebyshev-low-pass", "filters", SourceRef.Derived(), [new("order", QuantityKind.Count, 7), new("edge", QuantityKind.Frequency, 16e6), new("return-loss", QuantityKind.Decibels, 20)], v =>
-            v["order"] is 3 or 5 or 7 or 9 ? Elements(LowPassPrototype.Chebyshev((int)v["order"], PassBandRipple.FromReturnLoss(Decibels.FromDb(v["return-loss"]))).Denormalise(Frequency.FromHertz(v["edge"]), Line)) : null),
-        new("five-element-ladder", "filters", SourceRef.Derived(), Ladder(("first-capacitor", 390e-12), ("first-coil", 1.254e-6), ("second-capacitor", 750e-12), ("second-coil", 1.254e-6), ("third-capacitor", 390e-12)), v =>
-        {
-            var ladder = new Ladder(
-            [
-                LadderElement.ShuntCapacitor(Capacitance.FromFarad(v["first-capacitor"]), 1000), LadderElement.SeriesInductor(Inductance.FromHenry(v["first-coil"]), 150),
-                LadderElement.ShuntCapacitor(Capacitance.FromFarad(v["second-capacitor"]), 1000), LadderElement.SeriesInductor(Inductance.FromHenry(v["second-coil"]), 150),
-                LadderElement.ShuntCapacitor(Capacitance.FromFarad(v["third-capacitor"]), 1000),
-            ]);
-            var at = Frequency.FromHertz(v["frequency"]);
-            return [Figure.Of("loss", ladder.Loss(at, Line, Line)), Figure.Of("return-loss", ladder.ReturnLoss(at, Line, Line)), Figure.Of("second-harmonic", ladder.Loss(at.Harmonic(2), Line, Line)), Figure.Of("third-harmonic", ladder.Loss(at.Harmonic(3), Line, Line))];
-        }),
+        new("chebyshev-low-pass", "filters", Prototype, [new("order", QuantityKind.Count, 5, 3, 9), new("edge", QuantityKind.Frequency, 8e6), ReturnLoss], v =>
+            v.Whole("order") % 2 == 0 ? Conflict("worksheet-conflict.order-even", "order") : Of([.. Elements(Design(v, v.Whole("order")))])),
+        LadderSheets.FiveElements,
+        LadderSheets.SevenElements,
+        LowPassSearchSheet.Sheet,
     ];
 
-    private static IReadOnlyList<WorksheetInput> Ladder(params IReadOnlyList<(string Name, double Si)> elements) =>
-    [
-        .. elements.Select((e, i) => new WorksheetInput(e.Name, i % 2 == 0 ? QuantityKind.Capacitance : QuantityKind.Inductance, e.Si)),
-        new("frequency", QuantityKind.Frequency, 7.03e6),
-    ];
+    internal static LowPassDesign Design(WorksheetValues v, int order) =>
+        LowPassPrototype.Chebyshev(order, PassBandRipple.FromReturnLoss(v.Db("return-loss"))).Denormalise(v.Hertz("edge"), Line);
 
-    private static IReadOnlyList<Figure> Elements(LowPassDesign design) =>
-    [
-        .. design.Capacitors.Select(c => Figure.Of("shunt-capacitor", c)),
-        .. design.Coils.Select(l => Figure.Of("series-coil", l)),
-    ];
+    internal static IEnumerable<Figure> Elements(LowPassDesign design) =>
+        design.Capacitors.Select(c => Figure.Of("shunt-capacitor", c)).Concat(design.Coils.Select(l => Figure.Of("series-coil", l)));
 }

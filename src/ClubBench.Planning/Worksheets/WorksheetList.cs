@@ -4,7 +4,14 @@ namespace ClubBench.Planning.Worksheets;
 public static class WorksheetList
 {
     /// <summary>Every worksheet, by subject.</summary>
-    public static IReadOnlyList<Worksheet> All { get; } = [.. PartWorksheets.All, .. FilterWorksheets.All, .. TransmitterWorksheets.All, .. ReceiverWorksheets.All];
+    public static IReadOnlyList<Worksheet> All { get; } =
+    [
+        .. PartWorksheets.All,
+        .. FilterWorksheets.All,
+        .. OscillatorWorksheets.All,
+        .. TransmitterWorksheets.All,
+        .. ReceiverWorksheets.All,
+    ];
 
     /// <summary>The worksheet with this id, or null.</summary>
     public static Worksheet? Find(string id) => All.FirstOrDefault(w => w.Id == id);

@@ -26,7 +26,7 @@ internal static class WorksheetEndpoints
         if (WorksheetList.Find(method) is not { } sheet) return Answers.Problem([FieldMessage.Error("method", "not-found")]);
         if (body.ValueKind != JsonValueKind.Object) return Answers.Problem([FieldMessage.Error("", "field.needed")]);
         var values = sheet.Inputs.Select(i => (i.Name, Si: NumberOf(body, Property(i)))).Where(v => v.Si is not null).ToDictionary(v => v.Name, v => v.Si!.Value, StringComparer.Ordinal);
-        return Answers.Of(Named(sheet, sheet.Run(values)), figures => new { figures = Shapes.Of(figures) });
+        return Answers.Of(Named(sheet, sheet.Run(values)), a => new { figures = Shapes.Of(a.Figures), verdict = a.VerdictCode is { } code ? new { code, text = Phrases.Say(code) } : null });
     }
 
     /// <summary>Faults name the property as the request does, with its unit.</summary>

@@ -1,5 +1,4 @@
 using ClubBench.Planning;
-using ClubBench.Planning.Figures;
 using ClubBench.Planning.Text;
 using ClubBench.Planning.Worksheets;
 using Microsoft.AspNetCore.Components;
@@ -12,7 +11,7 @@ public partial class WorksheetPage
     private readonly Dictionary<string, string> _typed = new(StringComparer.Ordinal);
     private Worksheet? _sheet;
     private IReadOnlyList<FieldMessage> _messages = [];
-    private IReadOnlyList<Figure> _figures = [];
+    private WorksheetAnswer? _answer;
 
     [Parameter]
     public string? Method { get; set; }
@@ -20,7 +19,7 @@ public partial class WorksheetPage
     protected override void OnParametersSet()
     {
         if (_sheet?.Id == Method) return;
-        (_sheet, _messages, _figures) = (WorksheetList.Find(Method ?? ""), [], []);
+        (_sheet, _messages, _answer) = (WorksheetList.Find(Method ?? ""), [], null);
         _typed.Clear();
         foreach (var input in _sheet?.Inputs ?? []) _typed[input.Name] = QuantityText.Format(input.Kind, input.DefaultSi);
     }
@@ -29,10 +28,10 @@ public partial class WorksheetPage
     {
         var read = _sheet!.Inputs.Select(i => (i.Name, Read: QuantityText.Parse(_typed[i.Name], i.Kind, Unit(i), mayBeNegative: true, path: i.Name))).ToList();
         _messages = [.. read.SelectMany(r => r.Read.Messages)];
-        _figures = [];
+        _answer = null;
         if (_messages.Count > 0) return;
         var computed = _sheet.Run(read.ToDictionary(r => r.Name, r => r.Read.Value.Si, StringComparer.Ordinal));
-        (_messages, _figures) = (computed.Messages, computed.Succeeded ? computed.Value : []);
+        (_messages, _answer) = (computed.Messages, computed.Succeeded ? computed.Value : null);
     }
 
     /// <summary>A bare number is taken in the unit the default is written in.</summary>
