@@ -13,6 +13,7 @@ internal static class ServerFeature
     public static void UseProblemPages(this WebApplication app)
     {
         if (!app.Environment.IsDevelopment()) app.UseExceptionHandler("/problem", createScopeForErrors: true);
-        app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
+        // Only what a person asked to see is answered by a page: a refused form would run the page as that form again.
+        app.UseWhen(http => HttpMethods.IsGet(http.Request.Method), pages => pages.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true));
     }
 }
