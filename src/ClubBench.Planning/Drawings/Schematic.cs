@@ -96,6 +96,9 @@ public enum Orientation
 
     /// <summary>First terminal above, second below.</summary>
     Down,
+
+    /// <summary>First terminal below, second above: a diode that conducts upwards.</summary>
+    Up,
 }
 
 /// <summary>Whether a part changes.</summary>

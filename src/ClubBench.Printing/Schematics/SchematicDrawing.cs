@@ -14,6 +14,9 @@ public static class SchematicDrawing
     private const float ChangedHeavyWidth = 4f;
     private const float Margin = 5;
 
+    /// <summary>Points per unit at which names and values are 9 points high on paper.</summary>
+    public const float LegibleScale = 9 / SchematicLabels.Size;
+
     /// <summary>The drawing.</summary>
     /// <param name="schematic">What to draw.</param>
     /// <param name="title">Name of the stage.</param>

@@ -9,7 +9,9 @@ namespace ClubBench.Printing.Schematics;
 internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IReadOnlyList<PlacedSymbol> symbols)
 {
     private const float Away = 5;
-    private const float Size = 12.5f;
+    /// <summary>Size of names and values, in drawing units.</summary>
+    public const float Size = 12.5f;
+
     private const float LineHeight = 15;
     private const float TestPointRadius = 4.5f;
 
@@ -66,7 +68,7 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
     }
 
     /// <summary>Where the label may stand, best liked first: above and below what lies, right and left of what stands.</summary>
-    private static Area[] Places(PlacedSymbol placed, float width, float height)
+    private Area[] Places(PlacedSymbol placed, float width, float height)
     {
         var body = placed.Body;
         var centre = body.X + (body.Width / 2) - (width / 2);
@@ -76,7 +78,9 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
         var left = new Area(body.X - Away - width, body.Middle - (height / 2), width, height);
         return placed.Symbol.Kind switch
         {
+            SymbolKind.Terminal when EndsRight(placed) => [above with { X = placed.X + 2 - width }, below with { X = placed.X + 2 - width }, right, left],
             SymbolKind.Terminal => [above with { X = placed.X - 2 }, below with { X = placed.X - 2 }, left, right],
+            SymbolKind.Mixer => [above with { X = body.Right }, above with { X = body.X - width }, below with { X = body.Right }, below with { X = body.X - width }],
             SymbolKind.Supply or SymbolKind.Antenna => [above, right, left],
             SymbolKind.TransistorNpn or SymbolKind.TransistorPnp or SymbolKind.Mosfet or SymbolKind.Jfet => [right, left, above, below],
             SymbolKind.Block or SymbolKind.Regulator or SymbolKind.Amplifier => [below, above, right, left],
@@ -84,6 +88,9 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
             _ => [above, below, right, left],
         };
     }
+
+    /// <summary>Whether it stands in the right half: its word then ends at it and does not widen the drawing.</summary>
+    private bool EndsRight(PlacedSymbol terminal) => terminal.X > (symbols.Min(s => s.X) + symbols.Max(s => s.X)) / 2;
 
     private void Write(TextLine line, Area place, float baseline, TextSide side)
     {

@@ -5,10 +5,10 @@ namespace ClubBench.Printing.Schematics;
 
 /// <summary>
 /// Our drawings of the symbols, after the practice of IEC 60617. Lying across; a symbol that stands is mirrored on the diagonal, so
-/// that what lies below the first axis comes to lie right of it. Terminals, in this order, in grid units from the anchor:
+/// that what lies below the first axis comes to lie right of it; one that rises is turned instead. Terminals, in this order, in grid units from the anchor:
 /// two-terminal symbols (0,0), (4,0); transistors base or gate (0,0), collector or drain (2,-2), emitter or source (2,2), for PNP
 /// collector (2,2) and emitter (2,-2); transformer (0,0), (4,0), second winding (0,2), (4,2); potentiometer wiper (2,-2);
-/// amplifier inverting (0,0), other input (0,2), output (4,1); mixer third port (2,2); block (0,0), (4,0), (2,-1), (2,1);
+/// amplifier inverting (0,0), other input (0,2), output (4,1), supply (2,0); mixer third port (2,2), supply (2,-1); block (0,0), (4,0), (2,-1), (2,1);
 /// regulator ground (2,1); ground, supply, antenna and terminal (0,0).
 /// </summary>
 internal static class SymbolShapes
@@ -50,9 +50,9 @@ internal static class SymbolShapes
         [SymbolKind.TransistorPnp] = new("M0 0H14M14 -5L32 -16V-32M14 5L32 16V32" + TransistorCircle, "M14 -11V11", "M15.5 -5.9L25 -7.4L21.4 -13.6Z", s_circle, (0, 0), (2, 2), (2, -2)),
         [SymbolKind.Mosfet] = new("M0 0H10M16 -10H32V-32M16 10H32V32M16 0H32V10" + TransistorCircle, "M10 -10V10M16 -13v6M16 -3v6M16 7v6", "M17 0L25 -4V4Z", s_circle, s_transistor),
         [SymbolKind.Jfet] = new("M0 0H7M14 -8H32V-32M14 8H32V32" + TransistorCircle, "M14 -12V12", "M13 0L5 -4V4Z", s_circle, s_transistor),
-        [SymbolKind.Amplifier] = new("M0 0H8M0 32H8M60 16H64M8 -14V46L60 16ZM12 0h8M12 32h8M16 28v8", "", "", new(8, -14, 52, 60), (0, 0), (0, 2), (4, 1)),
+        [SymbolKind.Amplifier] = new("M0 0H8M0 32H8M60 16H64M8 -14V46L60 16ZM12 0h8M12 32h8M16 28v8", "", "", new(8, -14, 52, 60), (0, 0), (0, 2), (4, 1), (2, 0)),
         [SymbolKind.Block] = new(BlockPath, "", "", new(0, -16, 64, 32), (0, 0), (4, 0), (2, -1), (2, 1)),
-        [SymbolKind.Mixer] = new("M0 0H16M48 0H64M32 16V32M16 0a16 16 0 1 0 32 0a16 16 0 1 0-32 0M20.7 -11.3L43.3 11.3M43.3 -11.3L20.7 11.3", "", "", new(16, -16, 32, 32), (0, 0), (4, 0), (2, 2)),
+        [SymbolKind.Mixer] = new("M0 0H16M48 0H64M32 16V32M16 0a16 16 0 1 0 32 0a16 16 0 1 0-32 0M20.7 -11.3L43.3 11.3M43.3 -11.3L20.7 11.3", "", "", new(16, -16, 32, 32), (0, 0), (4, 0), (2, 2), (2, -1)),
         [SymbolKind.Ground] = new("M0 0V8", "M-9 8H9M-5.5 12H5.5M-2 16H2", "", new(-10, 4, 20, 14), s_one),
         [SymbolKind.Supply] = new("M0 0V-10", "", "M0 -19L-4.5 -9H4.5Z", new(-5, -19, 10, 15), s_one),
         [SymbolKind.Antenna] = new("M0 0V-32M0 -14L-12 -32H12L0 -14", "", "", new(-12, -32, 24, 18), s_one),

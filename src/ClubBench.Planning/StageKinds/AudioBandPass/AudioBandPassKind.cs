@@ -15,6 +15,7 @@ internal sealed class AudioBandPassKind : StageKind<BandPassStage, BandPassModel
 {
     public const string Input = "input";
     public const string Output = "output";
+    private const string HalfSupply = "half-supply";
 
     /// <summary>Section capacitors further apart than their usual tolerances are mixed up.</summary>
     private const double MostCapacitorRatio = 1.25;
@@ -51,9 +52,10 @@ internal sealed class AudioBandPassKind : StageKind<BandPassStage, BandPassModel
     {
         var s = new SchematicSketch(DescriptionOf, before, after);
         var capacitors = (after ?? before).InRole(Roles.SectionCapacitor).ToList();
-        s.Terminal(0, 8, Input);
-        s.Wire(0, 8, 2, 8);
-        s.Role(SymbolKind.Amplifier, 2, 8, Orientation.Across, Roles.PreamplifierCircuit);
+        s.Terminal(0, 7, Input);
+        s.Wire(0, 7, 2, 7);
+        s.Terminal(2, 9, HalfSupply);
+        s.Role(SymbolKind.Amplifier, 2, 7, Orientation.Across, Roles.PreamplifierCircuit);
         s.Wire(6, 8, 8, 8);
         s.Role(SymbolKind.Resistor, 8, 8, Orientation.Across, Roles.SectionInput);
         s.Role(SymbolKind.Resistor, 12, 8, Orientation.Down, Roles.SectionShunt);
@@ -62,6 +64,7 @@ internal sealed class AudioBandPassKind : StageKind<BandPassStage, BandPassModel
         s.Part(SymbolKind.Capacitor, 14, 8, Orientation.Across, capacitors[0]);
         s.Wire(18, 8, 20, 8);
         s.Role(SymbolKind.Amplifier, 20, 8, Orientation.Across, Roles.FilterCircuit);
+        s.Terminal(20, 10, HalfSupply);
         s.Wire(18, 4, 18, 8);
         s.Role(SymbolKind.Resistor, 18, 4, Orientation.Across, Roles.SectionFeedback);
         s.Wire(22, 4, 24, 4);
@@ -69,10 +72,10 @@ internal sealed class AudioBandPassKind : StageKind<BandPassStage, BandPassModel
         if (capacitors.Count > 1) s.Part(SymbolKind.Capacitor, 18, 0, Orientation.Across, capacitors[1]);
         s.Wire(12, 0, 18, 0);
         s.Wire(22, 0, 24, 0);
-        s.Wire(24, 0, 24, 8);
-        s.Wire(24, 8, 28, 8);
-        s.Terminal(28, 8, Output);
-        s.Point("A", 24, 8);
+        s.Wire(24, 0, 24, 9);
+        s.Wire(24, 9, 30, 9);
+        s.Terminal(30, 9, Output);
+        s.Point("A", 24, 9);
         return s.Finish();
     }
 

@@ -14,6 +14,7 @@ internal sealed class AudioOutputKind : StageKind<OutputStage, OutputModel>
 {
     public const string Input = "input";
     public const string Output = "output";
+    private const string Mute = "mute";
 
     /// <summary>A corner above this makes telegraphy thin (half the usual pitch; common practice).</summary>
     private const double MostCornerHertz = 350;
@@ -45,22 +46,39 @@ internal sealed class AudioOutputKind : StageKind<OutputStage, OutputModel>
     public override Schematic Draw(StageDocument before, StageDocument? after)
     {
         var s = new SchematicSketch(DescriptionOf, before, after);
-        s.Terminal(0, 6, Input);
-        if (s.Role(SymbolKind.Jfet, 2, 6, Orientation.Across, Roles.MuteTransistor)) s.Wire(0, 6, 2, 6);
-        s.Wire(4, 6, 8, 6);
-        s.Role(SymbolKind.Amplifier, 8, 6, Orientation.Across, Roles.Power);
-        s.Sign(SymbolKind.Supply, 4, 0);
-        if (s.Role(SymbolKind.Resistor, 4, 0, Orientation.Across, Roles.SupplyResistor)) s.Wire(8, 0, 10, 0);
-        s.Wire(10, 0, 10, 4);
-        if (s.Role(SymbolKind.Electrolytic, 14, 0, Orientation.Down, Roles.SupplyCapacitor)) s.Ground(14, 4);
-        s.Wire(10, 0, 14, 0);
-        s.Wire(12, 6, 18, 6);
-        s.Role(SymbolKind.Electrolytic, 18, 6, Orientation.Across, Roles.OutputCapacitor);
-        s.Wire(22, 6, 25, 6);
-        if (s.Role(SymbolKind.Resistor, 15, 6, Orientation.Down, Roles.DampingResistor)) s.Role(SymbolKind.Capacitor, 15, 10, Orientation.Down, Roles.DampingCapacitor);
-        s.Ground(15, 14);
-        s.Terminal(25, 6, Output);
-        s.Point("A", 22, 6);
+        s.Terminal(0, 7, Input);
+        if (s.Role(SymbolKind.Jfet, 2, 5, Orientation.Across, Roles.MuteTransistor))
+        {
+            s.Wire(0, 7, 4, 7);
+            s.Wire(0, 5, 2, 5);
+            s.Terminal(0, 5, Mute);
+            s.Wire(4, 3, 10, 3);
+        }
+        else
+        {
+            s.Wire(0, 7, 8, 7);
+            s.Wire(8, 7, 8, 3);
+            s.Wire(8, 3, 10, 3);
+        }
+
+        s.Role(SymbolKind.Amplifier, 10, 3, Orientation.Across, Roles.Power);
+        s.Ground(10, 5);
+        s.Wire(12, -1, 12, 3);
+        s.Wire(12, -1, 20, -1);
+        if (s.Role(SymbolKind.Electrolytic, 16, -1, Orientation.Down, Roles.SupplyCapacitor)) s.Ground(16, 3);
+        s.Sign(SymbolKind.Supply, s.Role(SymbolKind.Resistor, 20, -1, Orientation.Across, Roles.SupplyResistor) ? 24 : 20, -1);
+        s.Wire(14, 4, 14, 6);
+        s.Wire(14, 6, 22, 6);
+        s.Role(SymbolKind.Electrolytic, 22, 6, Orientation.Across, Roles.OutputCapacitor);
+        s.Wire(26, 6, 28, 6);
+        if (s.Role(SymbolKind.Resistor, 18, 6, Orientation.Down, Roles.DampingResistor))
+        {
+            s.Role(SymbolKind.Capacitor, 18, 10, Orientation.Down, Roles.DampingCapacitor);
+            s.Ground(18, 14);
+        }
+
+        s.Terminal(28, 6, Output);
+        s.Point("A", 26, 6);
         return s.Finish();
     }
 

@@ -56,18 +56,18 @@ internal sealed class GilbertProductDetectorKind : StageKind<DetectorStage, Dete
         s.Terminal(0, 6, Signal);
         s.Wire(0, 6, 8, 6);
         s.Role(SymbolKind.Mixer, 8, 6, Orientation.Across, Roles.Mixer);
-        s.Wire(10, 12, 10, 8);
-        s.Terminal(10, 12, Oscillator);
-        s.Wire(12, 6, 16, 6);
-        s.Role(SymbolKind.Capacitor, 16, 6, Orientation.Across, Roles.AudioCoupling);
-        s.Wire(20, 6, 24, 6);
-        s.Terminal(24, 6, Audio);
-        s.Sign(SymbolKind.Supply, 10, 0);
-        s.Wire(10, 0, 10, 4);
-        s.Wire(10, 0, 16, 0);
-        if (s.Role(SymbolKind.ZenerDiode, 16, 0, Orientation.Down, Roles.Regulator)) s.Ground(16, 4);
-        s.Point("A", 10, 12);
-        s.Point("B", 16, 0);
+        s.Wire(10, 10, 10, 8);
+        s.Terminal(10, 10, Oscillator);
+        s.Wire(12, 6, 14, 6);
+        s.Role(SymbolKind.Capacitor, 14, 6, Orientation.Across, Roles.AudioCoupling);
+        s.Wire(18, 6, 20, 6);
+        s.Terminal(20, 6, Audio);
+        s.Sign(SymbolKind.Supply, 10, 2);
+        s.Wire(10, 2, 10, 5);
+        s.Wire(8, 2, 10, 2);
+        if (s.Role(SymbolKind.ZenerDiode, 4, 2, Orientation.Across, Roles.Regulator)) s.Ground(4, 2);
+        s.Point("A", 10, 9);
+        s.Point("B", 10, 3);
         return s.Finish();
     }
 

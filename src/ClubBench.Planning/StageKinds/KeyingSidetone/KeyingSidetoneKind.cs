@@ -55,20 +55,23 @@ internal sealed class KeyingSidetoneKind : StageKind<KeyingStage, KeyingModel>
         if (s.Role(SymbolKind.Electrolytic, 6, 8, Orientation.Down, Roles.ShapingCapacitor)) s.Ground(6, 12);
         s.Sign(SymbolKind.Supply, 10, 4);
         s.Wire(10, 4, 10, 6);
-        s.Wire(10, 10, 14, 10);
-        s.Terminal(14, 10, KeyedSupply);
-        if (s.Role(SymbolKind.Block, 20, 6, Orientation.Across, Roles.Timer))
+        s.Wire(10, 10, 12, 10);
+        s.Terminal(12, 10, KeyedSupply);
+        if (s.Role(SymbolKind.Block, 24, 8, Orientation.Across, Roles.Timer))
         {
-            s.Role(SymbolKind.Resistor, 18, 0, Orientation.Down, Roles.TimerResistorA);
-            s.Role(SymbolKind.Resistor, 18, 4, Orientation.Down, Roles.TimerResistorB);
-            s.Role(SymbolKind.Capacitor, 18, 8, Orientation.Down, Roles.TimerCapacitor);
-            s.Ground(18, 12);
-            s.Wire(24, 6, 26, 6);
-            s.Role(SymbolKind.Resistor, 26, 6, Orientation.Across, Roles.SidetoneResistor);
-            s.Terminal(30, 6, Sidetone);
+            s.Role(SymbolKind.Resistor, 19, 0, Orientation.Down, Roles.TimerResistorA);
+            s.Sign(SymbolKind.Supply, 19, 0);
+            s.Wire(19, 4, 26, 4);
+            s.Wire(26, 4, 26, 7);
+            s.Wire(19, 8, 24, 8);
+            s.Role(SymbolKind.Resistor, 19, 4, Orientation.Down, Roles.TimerResistorB);
+            s.Role(SymbolKind.Capacitor, 19, 8, Orientation.Down, Roles.TimerCapacitor);
+            s.Ground(19, 12);
+            s.Role(SymbolKind.Resistor, 28, 8, Orientation.Across, Roles.SidetoneResistor);
+            s.Terminal(32, 8, Sidetone);
         }
 
-        s.Point("A", 14, 10);
+        s.Point("A", 12, 10);
         return s.Finish();
     }
 

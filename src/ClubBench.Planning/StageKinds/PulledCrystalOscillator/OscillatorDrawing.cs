@@ -27,25 +27,26 @@ internal static class OscillatorDrawing
             s.Wire(12, y, 12, y + 4);
         }
 
-        s.Wire(12, 4, 24, 4);
-        s.Role(SymbolKind.Capacitor, 18, 4, Orientation.Down, OscillatorStage.Roles.FeedbackUpper);
-        s.Role(SymbolKind.Capacitor, 18, 8, Orientation.Down, OscillatorStage.Roles.FeedbackLower);
-        s.Ground(18, 12);
-        s.Wire(18, 8, 34, 8);
-        s.Role(SymbolKind.TransistorNpn, 24, 4, Orientation.Across, OscillatorStage.Roles.Transistor);
-        s.Role(SymbolKind.Resistor, 34, 8, Orientation.Down, OscillatorStage.Roles.EmitterResistor);
-        s.Ground(34, 12);
+        s.Wire(12, 4, 21, 4);
+        s.Role(SymbolKind.Capacitor, 16, 4, Orientation.Down, OscillatorStage.Roles.FeedbackUpper);
+        s.Role(SymbolKind.Capacitor, 16, 8, Orientation.Down, OscillatorStage.Roles.FeedbackLower);
+        s.Ground(16, 12);
+        s.Wire(16, 8, 31, 8);
+        s.Role(SymbolKind.TransistorNpn, 21, 4, Orientation.Across, OscillatorStage.Roles.Transistor);
+        s.Sign(SymbolKind.Supply, 23, 2);
+        s.Wire(23, 6, 23, 8);
+        s.Role(SymbolKind.Resistor, 31, 8, Orientation.Down, OscillatorStage.Roles.EmitterResistor);
+        s.Ground(31, 12);
         if (stage.OffsetCapacitor is { } offset)
         {
-            s.Part(SymbolKind.Capacitor, 27, 8, Orientation.Down, offset);
-            s.Wire(27, 12, 27, 13);
-            s.Sign(SymbolKind.Switch, 27, 13, "offset");
-            s.Ground(27, 17);
+            s.Part(SymbolKind.Capacitor, 25, 8, Orientation.Down, offset);
+            s.Sign(SymbolKind.Switch, 25, 12, "offset");
+            s.Ground(25, 16);
         }
 
-        if (s.Role(SymbolKind.Capacitor, 40, 8, Orientation.Across, OscillatorStage.Roles.OutputCoupling)) s.Wire(34, 8, 40, 8);
-        s.Terminal(44, 8, PulledCrystalOscillatorKind.Output);
-        s.Point("A", 34, 8);
+        if (s.Role(SymbolKind.Capacitor, 34, 8, Orientation.Across, OscillatorStage.Roles.OutputCoupling)) s.Wire(31, 8, 34, 8);
+        s.Terminal(38, 8, PulledCrystalOscillatorKind.Output);
+        s.Point("A", 31, 8);
         return s.Finish();
     }
 

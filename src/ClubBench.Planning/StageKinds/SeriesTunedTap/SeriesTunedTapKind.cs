@@ -50,7 +50,8 @@ internal sealed class SeriesTunedTapKind : StageKind<TapStage, TapModel>
         {
             var x = 9 + (4 * (i / 2));
             if (x > 16) s.Wire(16, 4, x, 4);
-            s.Part(SymbolKind.Diode, x, 4 + (4 * (i % 2)), Orientation.Down, diodes[i]);
+            var (above, isBack) = (4 + (4 * (i % 2)), i / 2 % 2 == 1);
+            s.Part(SymbolKind.Diode, x, isBack ? above + 4 : above, isBack ? Orientation.Up : Orientation.Down, diodes[i]);
             if (i % 2 == 1 || i == diodes.Count - 1) s.Ground(x, 8 + (4 * (i % 2)));
         }
 

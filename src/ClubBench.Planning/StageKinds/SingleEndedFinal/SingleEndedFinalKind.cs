@@ -56,23 +56,22 @@ internal sealed class SingleEndedFinalKind : StageKind<FinalStage, FinalModel>
     public override Schematic Draw(StageDocument before, StageDocument? after)
     {
         var s = new SchematicSketch(DescriptionOf, before, after);
-        s.Terminal(0, 10, Input);
-        s.Wire(0, 10, 10, 10);
-        s.Role(SymbolKind.Resistor, 6, 10, Orientation.Down, Roles.BaseReturn);
-        s.Ground(6, 14);
-        s.Role(SymbolKind.Bead, 10, 10, Orientation.Across, Roles.BaseBead);
-        s.Role(SymbolKind.TransistorNpn, 16, 10, Orientation.Across, Roles.Transistor);
-        s.Wire(14, 10, 16, 10);
-        s.Wire(18, 12, 18, 14);
-        s.Ground(18, 14);
-        s.Wire(18, 6, 18, 8);
-        s.Wire(18, 6, 30, 6);
-        s.Role(SymbolKind.ToroidCoil, 18, 2, Orientation.Down, Roles.CollectorChoke);
-        s.Sign(SymbolKind.Supply, 18, 2);
-        if (s.Role(SymbolKind.ZenerDiode, 25, 6, Orientation.Down, Roles.ClampDiode)) s.Ground(25, 10);
-        s.Role(SymbolKind.Capacitor, 30, 6, Orientation.Across, Roles.CouplingCapacitor);
-        s.Terminal(34, 6, Output);
-        s.Point("B", 18, 6);
+        s.Terminal(0, 8, Input);
+        s.Wire(0, 8, 8, 8);
+        s.Role(SymbolKind.Resistor, 4, 8, Orientation.Down, Roles.BaseReturn);
+        s.Ground(4, 12);
+        s.Role(SymbolKind.Bead, 8, 8, Orientation.Across, Roles.BaseBead);
+        s.Role(SymbolKind.TransistorNpn, 13, 8, Orientation.Across, Roles.Transistor);
+        s.Wire(12, 8, 13, 8);
+        s.Wire(15, 10, 15, 11);
+        s.Ground(15, 11);
+        s.Wire(15, 6, 26, 6);
+        s.Role(SymbolKind.ToroidCoil, 15, 2, Orientation.Down, Roles.CollectorChoke);
+        s.Sign(SymbolKind.Supply, 15, 2);
+        if (s.Role(SymbolKind.ZenerDiode, 21, 10, Orientation.Up, Roles.ClampDiode)) s.Ground(21, 10);
+        s.Role(SymbolKind.Capacitor, 26, 6, Orientation.Across, Roles.CouplingCapacitor);
+        s.Terminal(30, 6, Output);
+        s.Point("B", 15, 6);
         return s.Finish();
     }
 

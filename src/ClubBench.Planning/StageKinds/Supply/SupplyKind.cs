@@ -58,7 +58,8 @@ internal sealed class SupplyKind : StageKind<SupplyStage, SupplyModel>
         if (s.Role(SymbolKind.Electrolytic, 14, 4, Orientation.Down, Roles.Reservoir)) s.Ground(14, 8);
         if (s.Role(SymbolKind.Regulator, 18, 4, Orientation.Across, Roles.Regulator))
         {
-            s.Ground(20, 8);
+            s.Wire(20, 5, 20, 6);
+            s.Ground(20, 6);
             s.Wire(22, 4, 28, 4);
             if (s.Role(SymbolKind.Capacitor, 25, 4, Orientation.Down, Roles.RegulatorCapacitor)) s.Ground(25, 8);
         }

@@ -54,26 +54,23 @@ internal sealed class TunedDriverKind : StageKind<DriverStage, DriverModel>
     public override Schematic Draw(StageDocument before, StageDocument? after)
     {
         var s = new SchematicSketch(DescriptionOf, before, after);
-        s.Terminal(0, 12, Input);
-        s.Wire(0, 12, 8, 12);
-        s.Role(SymbolKind.Resistor, 5, 12, Orientation.Down, Roles.BaseResistor);
-        s.Ground(5, 16);
-        s.Role(SymbolKind.TransistorNpn, 8, 12, Orientation.Across, Roles.Transistor);
-        s.Wire(10, 14, 10, 15);
-        s.Role(SymbolKind.Resistor, 10, 15, Orientation.Down, Roles.UnbypassedResistor);
-        s.Ground(10, 19);
-        s.Wire(10, 10, 10, 8);
-        s.Wire(10, 8, 26, 8);
-        s.Role(SymbolKind.Transformer, 26, 4, Orientation.Down, Roles.TankWinding);
-        s.Role(SymbolKind.Capacitor, 14, 4, Orientation.Down, Roles.TankCapacitor);
-        s.Role(SymbolKind.Trimmer, 20, 4, Orientation.Down, Roles.TankTrimmer);
-        s.Wire(14, 4, 26, 4);
-        s.Sign(SymbolKind.Supply, 20, 4);
-        s.Wire(28, 4, 33, 4);
-        s.Terminal(33, 4, Output);
-        s.Wire(28, 8, 30, 8);
-        s.Ground(30, 8);
-        s.Point("A", 10, 8);
+        s.Terminal(0, 6, Input);
+        s.Wire(0, 6, 8, 6);
+        s.Role(SymbolKind.Resistor, 4, 6, Orientation.Down, Roles.BaseResistor);
+        s.Ground(4, 10);
+        s.Role(SymbolKind.TransistorNpn, 8, 6, Orientation.Across, Roles.Transistor);
+        s.Role(SymbolKind.Resistor, 10, 8, Orientation.Down, Roles.UnbypassedResistor);
+        s.Ground(10, 12);
+        s.Wire(10, 4, 29, 4);
+        s.Role(SymbolKind.Transformer, 29, 4, Orientation.Down, Roles.TankWinding);
+        s.Role(SymbolKind.Capacitor, 17, 4, Orientation.Down, Roles.TankCapacitor);
+        s.Role(SymbolKind.Trimmer, 23, 4, Orientation.Down, Roles.TankTrimmer);
+        s.Wire(16, 8, 29, 8);
+        s.Sign(SymbolKind.Supply, 16, 8);
+        s.Wire(31, 4, 38, 4);
+        s.Terminal(38, 4, Output);
+        s.Ground(31, 8);
+        s.Point("A", 10, 4);
         return s.Finish();
     }
 
