@@ -8,6 +8,9 @@ namespace ClubBench.Printing.Layout;
 /// <param name="MostScale">Most points per unit of the drawing.</param>
 internal sealed record DrawingBlock(string Svg, float NaturalWidth, float NaturalHeight, float MostHeight, float MostScale) : IBlock
 {
+    /// <summary>The same drawing in less height.</summary>
+    public DrawingBlock NoHigherThan(float height) => this with { MostHeight = Math.Min(MostHeight, height) };
+
     public float Height(ICardSurface surface, float width) =>
         NaturalHeight * Math.Min(MostScale, Math.Min(width / NaturalWidth, MostHeight / NaturalHeight));
 

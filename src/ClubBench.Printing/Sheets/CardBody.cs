@@ -9,16 +9,19 @@ namespace ClubBench.Printing.Sheets;
 /// <summary>The blocks of a card, from why it changed to the signatures. What a stage does not have takes no room.</summary>
 internal static class CardBody
 {
+    /// <summary>Larger than this a small drawing only looks clumsy.</summary>
+    private const float MostDrawingScale = 1.3f;
+
     /// <summary>Blocks in order.</summary>
     /// <param name="card">The card.</param>
-    /// <param name="drawingHeight">Most height the drawing may take.</param>
-    public static IReadOnlyList<IBlock> Of(PrintedCard card, float drawingHeight)
+    /// <param name="drawing">Its drawing; null leaves it out.</param>
+    public static IReadOnlyList<IBlock> Of(PrintedCard card, DrawingBlock? drawing)
     {
         var content = card.Content;
         var blocks = new List<IBlock?>
         {
             Why(content),
-            Drawing(content, drawingHeight),
+            drawing,
             FitSection.Remove(content),
             FitSection.Of(card),
             WindSection.Of(card),
@@ -48,11 +51,12 @@ internal static class CardBody
 
     private static string Spaced(string sentence) => sentence.Length == 0 ? "" : " " + sentence;
 
-    private static DrawingBlock? Drawing(CardContent content, float mostHeight)
+    /// <summary>The drawing of the stage, no higher than allowed; null where there is nothing to draw.</summary>
+    public static DrawingBlock? Drawing(CardContent content, float mostHeight)
     {
         if (content.Drawing.Symbols.Count == 0) return null;
         var drawing = SchematicDrawing.Of(content.Drawing, CardText.TitleOf(content), content.Kind);
-        return new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, mostHeight, 1);
+        return new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, mostHeight, MostDrawingScale);
     }
 
     private static Section? BeforePower(CardContent content)

@@ -1,4 +1,5 @@
 using ClubBench.Printing.Layout;
+using ClubBench.Printing.Schematics;
 
 namespace ClubBench.Printing.Sheets;
 
@@ -14,8 +15,14 @@ internal static class CardPages
     private const float FooterHeight = 15;
     private const float BelowHeader = 6;
 
-    /// <summary>Spacings from roomy to tight: gap between blocks and most height of the drawing. The first that fits one page is taken.</summary>
-    private static readonly (float Gap, float Drawing)[] s_spacings = [(11, 165), (8, 125), (5, 110), (3, 95), (3, 78)];
+    /// <summary>Gaps between blocks from roomy to tight. The first that leaves the drawing enough room to be read is taken.</summary>
+    private static readonly float[] s_gaps = [11, 8, 5, 3, 2];
+
+    /// <summary>Share of the page a drawing may take.</summary>
+    private const float DrawingShare = 1 / 3f;
+
+    /// <summary>Least height of a drawing; below it only the fitting list can be read.</summary>
+    private const float LeastDrawing = 70;
 
     /// <summary>Draws the card.</summary>
     public static void Draw(ICardSurface surface, PrintedCard card)
@@ -37,16 +44,21 @@ internal static class CardPages
         }
     }
 
+    /// <summary>The drawing takes the room the rest leaves it. Where no gap leaves enough, the tightest that still fits one page; else two pages, roomy.</summary>
     private static IReadOnlyList<Stack> Broken(ICardSurface surface, PrintedCard card, Area body)
     {
-        var tries = s_spacings.Select(s => PageBreaks.Of(surface, CardBody.Of(card, s.Drawing), s.Gap, body.Width, body.Height));
-        IReadOnlyList<Stack>? roomy = null;
-        foreach (var pages in tries)
+        var drawing = CardBody.Drawing(card.Content, body.Height * DrawingShare);
+        var wanted = drawing is null ? 0 : Math.Min(drawing.Height(surface, body.Width), drawing.NaturalHeight * SchematicDrawing.LegibleScale);
+        IReadOnlyList<Stack>? fitting = null;
+        foreach (var gap in s_gaps)
         {
-            if (pages.Count == 1) return pages;
-            roomy ??= pages;
+            var room = body.Height - gap - new Stack(CardBody.Of(card, null), gap).Height(surface, body.Width);
+            var pages = PageBreaks.Of(surface, CardBody.Of(card, drawing?.NoHigherThan(Math.Max(room, LeastDrawing))), gap, body.Width, body.Height);
+            if (pages.Count > 1) continue;
+            fitting = pages;
+            if (room >= wanted) break;
         }
-        return roomy!;
+        return fitting ?? PageBreaks.Of(surface, CardBody.Of(card, drawing), s_gaps[0], body.Width, body.Height);
     }
 
     private static void DrawFooter(ICardSurface surface, PrintedCard card, Area body, int page, int pages)

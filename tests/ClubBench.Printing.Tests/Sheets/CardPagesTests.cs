@@ -1,6 +1,7 @@
 using ClubBench.Planning.Cards;
 using ClubBench.Planning.Plans;
 using ClubBench.Printing.Layout;
+using ClubBench.Printing.Schematics;
 using ClubBench.Printing.Sheets;
 using ClubBench.Printing.Tests.Layout;
 using ClubBench.Printing.Tests.Samples;
@@ -110,17 +111,36 @@ public class CardPagesTests
     }
 
     [Theory]
-    [InlineData("20 m")]
-    [InlineData("40 m")]
-    public void Draw_EveryCardOfAPlan_FitsItsPagesAndShowsItsFigures(string band)
+    [InlineData("20 m", "A4")]
+    [InlineData("40 m", "A4")]
+    [InlineData("20 m", "Letter")]
+    [InlineData("40 m", "Letter")]
+    public void Draw_EveryCardOfAPlan_FitsOnePageAndShowsItsFigures(string band, string name)
     {
-        foreach (var card in SamplePlans.QuernOn(band).Stages.Select(s => s.Card))
+        var paper = name == "A4" ? PaperSize.A4 : PaperSize.Letter;
+        var cards = SamplePlans.QuernOn(band).Stages.Select(s => s.Card).ToList();
+
+        Assert.Equal(12, cards.Count);
+        foreach (var card in cards)
         {
-            var surface = Drawn(card);
+            var surface = Drawn(card, SampleCards.Context with { Paper = paper });
 
             Assert.Single(surface.Pages);
-            Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, PaperSize.A4.Height - PaperSize.Millimetres(5)));
+            Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, paper.Height - PaperSize.Millimetres(5)));
             Assert.All(CardFigures.Of(card), f => Assert.Contains(f.Text.Replace('\u00A0', ' '), Joined(surface), StringComparison.Ordinal));
+        }
+    }
+
+    [Fact]
+    public void Draw_CardWithRoom_WritesTheDrawingsNamesInNinePointsAtLeast()
+    {
+        foreach (var card in SamplePlans.QuernOn("20 m").Stages.Where(s => s.Action == StageAction.Keep).Select(s => s.Card))
+        {
+            var natural = SchematicDrawing.Of(card.Drawing, "test", card.Kind);
+            var area = Drawn(card).Pages[0].Drawings[0];
+
+            Assert.True(Math.Min(area.Height / natural.Height, area.Width / natural.Width) * SchematicLabels.Size >= 9, card.Stage);
+            Assert.InRange(area.Height, 0, PaperSize.A4.Height / 3);
         }
     }
 
