@@ -5,28 +5,28 @@ using ClubBench.Planning.Text;
 
 namespace ClubBench.Planning.Orders;
 
-/// <summary>One row of an order as a table: text cells are safe to open in a spreadsheet, quantities stay numbers.</summary>
-/// <param name="Class">Sort of part in words.</param>
+/// <summary>One row of an order as people read it; quantities stay numbers.</summary>
+/// <param name="Part">Sort of part in words.</param>
 /// <param name="Type">Type.</param>
 /// <param name="Value">Value with its unit; empty for cores and devices.</param>
-/// <param name="Rating">Rated voltage with its unit; empty where none is asked.</param>
+/// <param name="Rating">Voltage it must stand, with its unit; empty where none is asked.</param>
 /// <param name="Needed">For all boards.</param>
 /// <param name="Spare">Spares.</param>
 /// <param name="InStock">From the drawers.</param>
 /// <param name="ToBuy">To be bought.</param>
-public sealed record OrderRow(string Class, string Type, string Value, string Rating, double Needed, double Spare, double InStock, double ToBuy);
+public sealed record OrderRow(string Part, string Type, string Value, string Rating, double Needed, double Spare, double InStock, double ToBuy);
 
-/// <summary>An order as rows for CSV and spreadsheets.</summary>
+/// <summary>An order as rows: the same ones on the page, in CSV and in a spreadsheet.</summary>
 public static class OrderTable
 {
     /// <summary>Rows in the order's own sequence. A null culture is the current one.</summary>
     public static IReadOnlyList<OrderRow> Rows(PartsOrder order, CultureInfo? culture = null) =>
     [
         .. order.Lines.Select(l => new OrderRow(
-            CellText.Safe(Phrases.Word(l.Class, culture)),
-            CellText.Safe(l.Type),
-            l.ValueSi is { } si ? CellText.Safe(QuantityText.Format(KindOf(l), si, culture: culture)) : "",
-            l.RatedVoltageV is { } volt ? CellText.Safe(QuantityText.Format(QuantityKind.Voltage, volt, culture: culture)) : "",
+            Phrases.Word(l.Class, culture),
+            l.Type == PartsOrder.Wire ? Phrases.Say("order.wire", culture: culture) : l.Type,
+            l.ValueSi is { } si ? QuantityText.Format(KindOf(l), si, culture: culture) : "",
+            l.RatedVoltageV is { } volt ? QuantityText.Format(QuantityKind.Voltage, volt, culture: culture) : "",
             Rounded(l.Needed),
             Rounded(l.Spare),
             Rounded(l.InStock),
@@ -36,10 +36,13 @@ public static class OrderTable
     private static QuantityKind KindOf(OrderLine line) => line.Class switch
     {
         PartClass.Winding => QuantityKind.Length,
-        PartClass.Crystal => QuantityKind.Frequency,
+        PartClass.Capacitor or PartClass.Trimmer or PartClass.VariableCapacitor => QuantityKind.Capacitance,
         PartClass.Resistor or PartClass.Potentiometer => QuantityKind.Resistance,
         PartClass.MouldedChoke => QuantityKind.Inductance,
-        _ => QuantityKind.Capacitance,
+        PartClass.Crystal => QuantityKind.Frequency,
+        PartClass.Hardware => QuantityKind.Current,
+        PartClass.Diode => QuantityKind.Voltage,
+        _ => QuantityKind.Number,
     };
 
     // Wire is told to the centimetre.

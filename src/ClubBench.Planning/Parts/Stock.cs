@@ -22,6 +22,8 @@ public static class Stock
         PartClass.Resistor or PartClass.Potentiometer => [(@class, part.Type, part.Value(PartValue.Resistance))],
         PartClass.MouldedChoke => [(@class, part.Type, part.Value(PartValue.Inductance))],
         PartClass.Crystal => [(@class, part.Type, part.Value(PartValue.Frequency))],
+        PartClass.Diode => [(@class, part.Type, part.Value(PartValue.Voltage))],
+        PartClass.Hardware => [(@class, part.Type, part.Value(PartValue.RatedCurrent))],
         _ => [(@class, part.Type, null)],
     };
 }

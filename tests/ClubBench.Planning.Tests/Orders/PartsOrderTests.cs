@@ -98,9 +98,29 @@ public class PartsOrderTests
     [Fact]
     public void Rows_OfAnOrder_CarryWordsUnitsAndNumbers()
     {
-        var row = OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture).Single(r => r.Class == "Crystal");
+        var row = OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture).Single(r => r.Part == "Crystal");
 
         Assert.Equal(("HC-49/U", "7.030\u00A0MHz", 3.0), (row.Type, row.Value, row.ToBuy));
+    }
+
+    [Theory]
+    [InlineData("Zener 1 W", "36\u00A0V")]
+    [InlineData("Zener 0.5 W", "6.2\u00A0V")]
+    [InlineData("fast, 5 x 20 mm", "1\u00A0A")]
+    [InlineData("1N4148", "")]
+    [InlineData("clip-on, 20 K/W", "")]
+    public void Rows_OfAnOrder_TellWhatMustBeAskedForInTheShop(string type, string value) =>
+        Assert.Equal(value, OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture).Single(r => r.Type == type).Value);
+
+    [Fact]
+    public void Rows_OfAnOrder_TellTheRatingThatPartsTwoLines()
+    {
+        var order = new PartsOrder([new(PartClass.Capacitor, "NP0", 100e-12, 50, 5, 1, 0, 6), new(PartClass.Capacitor, "NP0", 100e-12, 100, 5, 1, 0, 6), new(PartClass.Diode, "zener", 36, null, 5, 1, 0, 6)]);
+
+        var rows = OrderTable.Rows(order, CultureInfo.InvariantCulture);
+
+        Assert.Equal(["50\u00A0V", "100\u00A0V", ""], rows.Select(r => r.Rating));
+        Assert.Equal(["100\u00A0pF", "100\u00A0pF", "36\u00A0V"], rows.Select(r => r.Value));
     }
 
     [Theory]

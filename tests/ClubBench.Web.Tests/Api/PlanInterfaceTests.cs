@@ -83,7 +83,7 @@ public sealed class PlanInterfaceTests(DemoInterface api) : IClassFixture<DemoIn
         var one = await api.Program.GetStringAsync($"/api/v1/plans/{plan}/parts-order.csv?boards=1", Cancellation);
         var ten = await api.Program.GetStringAsync($"/api/v1/plans/{plan}/parts-order.csv?boards=10", Cancellation);
 
-        Assert.StartsWith("part,type,value,needed,spare,in_stock,to_buy\r\n", one.TrimStart('\uFEFF'), StringComparison.Ordinal);
+        Assert.StartsWith("part,type,value,rated_voltage,needed,spare,in_stock,to_buy\r\n", one.TrimStart('\uFEFF'), StringComparison.Ordinal);
         Assert.Equal(one.Split("\r\n").Length, ten.Split("\r\n").Length);
         Assert.NotEqual(one, ten);
     }
