@@ -11,7 +11,7 @@ namespace ClubBench.Planning.Parts;
 /// <summary>How a part is written: beside a symbol, in a table, in an order.</summary>
 public static class PartText
 {
-    /// <summary>Value of a part in short: "180 + 22 pF", "15 t T37-6", "14.060 MHz", "10-60 pF", "33 ohm", or its type.</summary>
+    /// <summary>Value of a part in short: "180 + 22 pF", "15 t T37-6", "14.060 MHz", "10-60 pF", "33 ohm", "36 V Zener 1 W", or its type.</summary>
     public static string Short(Part part, PartClass @class, CultureInfo culture) => @class switch
     {
         PartClass.Capacitor when part.Value(PartValue.Capacitance) is not null => Capacitors(part, culture),
@@ -21,6 +21,7 @@ public static class PartText
         PartClass.MouldedChoke when part.Value(PartValue.Inductance) is { } henry => QuantityText.Format(QuantityKind.Inductance, henry, null, culture),
         PartClass.Crystal when part.Value(PartValue.Frequency) is { } hertz => string.Create(culture, $"{hertz / 1e6:0.000###} MHz"),
         PartClass.Resistor or PartClass.Potentiometer when part.Value(PartValue.Resistance) is { } ohm => QuantityText.Format(QuantityKind.Resistance, ohm, null, culture),
+        PartClass.Diode when part.Value(PartValue.Voltage) is { } volt => $"{QuantityText.Format(QuantityKind.Voltage, volt, null, culture)} {part.Type}",
         PartClass.Hardware when part.Value(PartValue.RatedCurrent) is { } ampere => QuantityText.Format(QuantityKind.Current, ampere, null, culture),
         _ => part.Type,
     };
