@@ -35,9 +35,10 @@ internal static class CardText
         ? Texts.Say("card.inductance-of", winding.Designator)
         : Phrases.Say("point." + reading.Point[(reading.Point.IndexOf('.', StringComparison.Ordinal) + 1)..], content.Kind);
 
-    /// <summary>The value to expect.</summary>
-    public static string ExpectedOf(ExpectedReading reading) =>
-        QuantityText.Format(Figure.Of("expected", reading.Kind, reading.Nominal));
+    /// <summary>The value to expect; an expected nothing in the unit of the reader's own reading.</summary>
+    public static string ExpectedOf(ExpectedReading reading) => reading.Nominal == 0
+        ? new QuantityParts("0", UnitOf(reading)).ToString()
+        : QuantityText.Format(Figure.Of("expected", reading.Kind, reading.Nominal));
 
     /// <summary>The window, by the ends that count.</summary>
     public static string WindowOf(ExpectedReading reading) => reading.Sides switch
