@@ -38,12 +38,12 @@ public partial class PlanPage
 
     private bool MayIssue => _opened is { State: not PlanState.Issued, Plan.OpenItems.Count: 0 } && !_busy;
 
+    /// <summary>Why the plan cannot be issued now; empty where it can.</summary>
     private string Missing => _opened switch
     {
-        null => "",
         { State: PlanState.Issued } => L["plan.is-issued"],
         { Plan.OpenItems: { Count: > 0 } items } => L["plan.missing", items.Count, string.Join(", ", items.Select(i => i.Stage.Length > 0 ? $"{i.Stage} {Phrases.Say(i)}" : Phrases.Say(i)))],
-        _ => L["open.none"],
+        _ => "",
     };
 
     protected override async Task LoadAsync()

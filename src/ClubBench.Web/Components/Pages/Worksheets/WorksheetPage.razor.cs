@@ -21,7 +21,7 @@ public partial class WorksheetPage
         if (_sheet?.Id == Method) return;
         (_sheet, _messages, _answer) = (WorksheetList.Find(Method ?? ""), [], null);
         _typed.Clear();
-        foreach (var input in _sheet?.Inputs ?? []) _typed[input.Name] = QuantityText.Format(input.Kind, input.DefaultSi);
+        foreach (var input in _sheet?.Inputs ?? []) _typed[input.Name] = QuantityText.Split(input.Kind, input.DefaultSi).Number;
     }
 
     private void Compute()
