@@ -84,15 +84,6 @@ internal sealed class SeriesTunedTapKind : StageKind<TapStage, TapModel>
 
     protected override IReadOnlyList<ExpectedReading> Expect(TapStage stage, TapModel model, Surroundings surroundings, string key) =>
     [
-        new(
-            $"{key}.trimmer-travel",
-            QuantityKind.Ratio,
-            model.Place.Travel(surroundings.Reference),
-            TunablePlace.BenchShare,
-            1 - TunablePlace.BenchShare,
-            "set-up.peak-on-noise",
-            InstrumentClass.Receiver,
-            WindowSides.Both,
-            new Dictionary<string, double>()),
+        TrimmerExpectation.For(key, model.Place, surroundings.Reference, TunablePlace.BenchShare, "set-up.peak-on-noise"),
     ];
 }

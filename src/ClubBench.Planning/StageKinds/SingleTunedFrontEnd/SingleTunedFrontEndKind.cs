@@ -83,15 +83,6 @@ internal sealed class SingleTunedFrontEndKind : StageKind<FrontEndStage, FrontEn
     protected override IReadOnlyList<ExpectedReading> Expect(FrontEndStage stage, FrontEndModel model, Surroundings surroundings, string key) =>
     [
         .. WindingPart.Of(stage.Winding, surroundings.Learnt) is { } w ? [WindingExpectation.For(key, w, model.Tank.TrimRange(surroundings.Reference))] : Array.Empty<ExpectedReading>(),
-        new(
-            $"{key}.trimmer-travel",
-            QuantityKind.Ratio,
-            model.Tank.Travel(surroundings.Reference),
-            TunablePlace.BenchShare,
-            1 - TunablePlace.BenchShare,
-            "set-up.peak-on-noise",
-            InstrumentClass.Receiver,
-            WindowSides.Both,
-            new Dictionary<string, double>()),
+        TrimmerExpectation.For(key, model.Tank, surroundings.Reference, TunablePlace.BenchShare, "set-up.peak-on-noise"),
     ];
 }

@@ -94,7 +94,7 @@ internal sealed class TunedDriverKind : StageKind<DriverStage, DriverModel>
         return
         [
             .. WindingPart.Of(stage.Winding, surroundings.Learnt) is { } w ? [WindingExpectation.For(key, w, model.Tank.TrimRange(surroundings.Reference))] : Array.Empty<ExpectedReading>(),
-            new($"{key}.trimmer-travel", QuantityKind.Ratio, model.Tank.Travel(surroundings.Reference), 0.1, 0.9, "set-up.peak-the-tank", InstrumentClass.Receiver, WindowSides.Both, new Dictionary<string, double>()),
+            TrimmerExpectation.For(key, model.Tank, surroundings.Reference, TunablePlace.ComfortableShare, "set-up.peak-the-tank"),
             new($"{key}.drive-voltage", QuantityKind.PeakToPeakVoltage, volts, 0.8 * volts, 1.25 * volts, "set-up.scope-at-link", InstrumentClass.Oscilloscope, WindowSides.Both, new Dictionary<string, double>()),
         ];
     }
