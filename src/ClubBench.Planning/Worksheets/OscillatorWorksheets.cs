@@ -52,6 +52,6 @@ internal static class OscillatorWorksheets
     [
         Figure.Of("lowest-frequency", range.Low) with { Digits = 7 },
         Figure.Of("highest-frequency", range.High) with { Digits = 7 },
-        Figure.Of("dial-span", QuantityKind.FrequencyShift, range.SpanHertz) with { Digits = 3 },
+        Figure.Of("dial-span", QuantityKind.Frequency, range.SpanHertz) with { Digits = 3 },
     ];
 }

@@ -8,7 +8,7 @@ namespace ClubBench.Planning.Worksheets;
 internal static class SeriesInductorSheet
 {
     public static Worksheet Sheet { get; } = new(
-        "series-inductor", "oscillators", OscillatorWorksheets.Loop, [.. OscillatorWorksheets.Parts, new("wanted-span", QuantityKind.FrequencyShift, 13.2e3)], v =>
+        "series-inductor", "oscillators", OscillatorWorksheets.Loop, [.. OscillatorWorksheets.Parts, new("wanted-span", QuantityKind.Frequency, 13.2e3)], v =>
         {
             var loop = OscillatorWorksheets.LoopOf(v, default);
             return OscillatorWorksheets.Refused(loop.Refusal()) ?? Answer(loop, PulledCrystalDesign.ForSpan(loop, v["wanted-span"]));

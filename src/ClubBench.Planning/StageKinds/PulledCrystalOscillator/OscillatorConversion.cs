@@ -42,7 +42,7 @@ internal static class OscillatorConversion
     public static Finding Rethink(StageDocument document, Surroundings to) =>
         to.Reference.Hertz > HighestFundamentalHertz
             ? new("oscillator.no-fundamental-crystal", Severity.Fault, document.Key, null, [Figure.Of("at", to.Reference), Figure.Of("half", Frequency.FromHertz(to.Reference.Hertz / 2)), Figure.Of("highest", Frequency.FromHertz(HighestFundamentalHertz)) with { Digits = 2 }], StageAction.Rethink, OpenItemCodes.Rethink)
-            : new("oscillator.segment-too-narrow", Severity.Fault, document.Key, null, [Figure.Of("width", QuantityKind.FrequencyShift, to.Band.WidthHertz)], StageAction.Rethink, OpenItemCodes.Rethink);
+            : new("oscillator.segment-too-narrow", Severity.Fault, document.Key, null, [Figure.Of("width", QuantityKind.Frequency, to.Band.WidthHertz) with { Digits = 3 }], StageAction.Rethink, OpenItemCodes.Rethink);
 
     /// <summary>The designer's span, kept as a share of the frequency.</summary>
     private static double WantedSpan(OscillatorStage old, Surroundings from, Surroundings to)

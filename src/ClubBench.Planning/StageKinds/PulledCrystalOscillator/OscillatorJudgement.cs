@@ -52,7 +52,7 @@ internal static class OscillatorJudgement
     {
         IReadOnlyList<Figure> figures =
         [
-            Figure.Of("span", QuantityKind.FrequencyShift, range.SpanHertz),
+            Figure.Of("span", QuantityKind.Frequency, range.SpanHertz) with { Digits = 3 },
             Figure.Of("share", QuantityKind.Ratio, -2 * range.AtMaximum.Sensitivities.Inductor),
             .. range.AtMaximum.InductorResonanceRatio is { } ratio ? [Figure.Of("distance", QuantityKind.Number, ratio)] : Array.Empty<Figure>(),
         ];
@@ -82,7 +82,7 @@ internal static class OscillatorJudgement
                 Severity.Warning,
                 key,
                 stage.Choke.Designator,
-                [Figure.Of("span", QuantityKind.FrequencyShift, range.SpanHertz), Figure.Of("least", QuantityKind.FrequencyShift, least)],
+                [Figure.Of("span", QuantityKind.Frequency, range.SpanHertz) with { Digits = 3 }, Figure.Of("least", QuantityKind.Frequency, least) with { Digits = 2 }],
                 StageAction.Change,
                 OpenItemCodes.OscillatorRange);
     }
@@ -121,5 +121,5 @@ internal static class OscillatorJudgement
     }
 
     private static IEnumerable<Figure> Ends(PulledCrystalRange range) =>
-        [Figure.Of("low", range.Low) with { Digits = 6 }, Figure.Of("high", range.High) with { Digits = 6 }, Figure.Of("span", QuantityKind.FrequencyShift, range.SpanHertz)];
+        [Figure.Of("low", range.Low) with { Digits = 6 }, Figure.Of("high", range.High) with { Digits = 6 }, Figure.Of("span", QuantityKind.Frequency, range.SpanHertz) with { Digits = 3 }];
 }

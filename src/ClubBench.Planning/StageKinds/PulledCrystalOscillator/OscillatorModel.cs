@@ -87,7 +87,7 @@ internal sealed class OscillatorModel : IStageModel, IGenerates
         var range = Range!;
         Add("lowest-frequency", QuantityKind.Frequency, range.Low.Hertz, 7);
         Add("highest-frequency", QuantityKind.Frequency, range.High.Hertz, 7);
-        Add("span", QuantityKind.FrequencyShift, range.SpanHertz, 3);
+        Add("span", QuantityKind.Frequency, range.SpanHertz, 3);
         if (QuotedOffsetHertz is { } quoted) Add("receive-offset", QuantityKind.FrequencyShift, quoted, 3);
         if (OffsetHertz(_stage.Least) is { } top) Add("offset-top", QuantityKind.FrequencyShift, top, 3);
         if (OffsetHertz(_stage.Most) is { } bottom) Add("offset-bottom", QuantityKind.FrequencyShift, bottom, 3);
@@ -97,7 +97,7 @@ internal sealed class OscillatorModel : IStageModel, IGenerates
         {
             Add("one-crystal-low", QuantityKind.Frequency, one.Low.Hertz, 7);
             Add("one-crystal-high", QuantityKind.Frequency, one.High.Hertz, 7);
-            Add("one-crystal-span", QuantityKind.FrequencyShift, one.SpanHertz, 3);
+            Add("one-crystal-span", QuantityKind.Frequency, one.SpanHertz, 3);
         }
     }
 
