@@ -23,15 +23,28 @@ public static class OrderTable
     public static IReadOnlyList<OrderRow> Rows(PartsOrder order, CultureInfo? culture = null) =>
     [
         .. order.Lines.Select(l => new OrderRow(
-            Phrases.Word(l.Class, culture),
-            l.Type == PartsOrder.Wire ? Phrases.Say("order.wire", culture: culture) : l.Type,
-            l.ValueSi is { } si ? QuantityText.Format(KindOf(l), si, culture: culture) : "",
+            PartOf(l, culture),
+            l.Type == PartsOrder.Wire ? Phrases.Say("order.wire.type", culture: culture) : l.Type,
+            ValueOf(l, culture),
             l.RatedVoltageV is { } volt ? QuantityText.Format(QuantityKind.Voltage, volt, culture: culture) : "",
             Rounded(l.Needed),
             Rounded(l.Spare),
             Rounded(l.InStock),
             Rounded(l.ToBuy))),
     ];
+
+    // What is bought for a winding is a core and wire.
+    private static string PartOf(OrderLine line, CultureInfo? culture) =>
+        line.Type == PartsOrder.Wire ? Phrases.Say("order.wire", culture: culture)
+        : line.Class == PartClass.Winding ? Phrases.Say("order.core", culture: culture)
+        : Phrases.Word(line.Class, culture);
+
+    private static string ValueOf(OrderLine line, CultureInfo? culture) => line switch
+    {
+        { ValueSi: { } highest, LowestSi: { } lowest } => QuantityText.FormatSpan(KindOf(line), lowest, highest, culture: culture),
+        { ValueSi: { } si } => QuantityText.Format(KindOf(line), si, culture: culture),
+        _ => "",
+    };
 
     private static QuantityKind KindOf(OrderLine line) => line.Class switch
     {

@@ -10,13 +10,14 @@ namespace ClubBench.Planning.Orders;
 /// <summary>One line of an order: everything of one sort, value and rating.</summary>
 /// <param name="Class">Sort of part.</param>
 /// <param name="Type">Dielectric, core, device or holder; <see cref="PartsOrder.Wire"/> for wire.</param>
-/// <param name="ValueSi">Main value in SI (wire: bare diameter); null for cores and devices.</param>
+/// <param name="ValueSi">Main value in SI (variable capacitors: the highest; wire: bare diameter); null for cores and devices.</param>
+/// <param name="LowestSi">Lowest value of a variable part; null for fixed ones.</param>
 /// <param name="RatedVoltageV">Voltage it must stand; null where none is asked.</param>
 /// <param name="Needed">Pieces for all boards (wire: metre).</param>
 /// <param name="Spare">Spare pieces (wire: metre).</param>
 /// <param name="InStock">Taken from the drawers, never more than needed and spare.</param>
 /// <param name="ToBuy">What remains to be bought, never negative.</param>
-public sealed record OrderLine(PartClass Class, string Type, double? ValueSi, double? RatedVoltageV, double Needed, double Spare, double InStock, double ToBuy);
+public sealed record OrderLine(PartClass Class, string Type, double? ValueSi, double? LowestSi, double? RatedVoltageV, double Needed, double Spare, double InStock, double ToBuy);
 
 /// <summary>All parts for all boards: merged, with spares, minus stock.</summary>
 /// <param name="Lines">Lines by class, type, value and rating.</param>
@@ -33,7 +34,8 @@ public sealed record PartsOrder(IReadOnlyList<OrderLine> Lines)
     {
         var pieces = plans.SelectMany(p => OrderPieces.Of(p.Plan, changesOnly).Select(piece => piece.Times(p.Boards))).Where(p => p.Quantity > 0).ToList();
         var drawers = new Drawers(shelf);
-        return new PartsOrder([.. pieces.GroupBy(p => p.Key).OrderBy(g => g.Key.Class).ThenBy(g => g.Key.Type, StringComparer.Ordinal).ThenBy(g => g.Key.ValueSi).ThenBy(g => g.Key.RatedVoltageV)
+        return new PartsOrder([.. pieces.GroupBy(p => p.Key)
+            .OrderBy(g => g.Key.Class == PartClass.Other).ThenBy(g => g.Key.Class).ThenBy(g => g.Key.Type, StringComparer.Ordinal).ThenBy(g => g.Key.ValueSi).ThenBy(g => g.Key.LowestSi).ThenBy(g => g.Key.RatedVoltageV)
             .Select(g => Line(g.Key, [.. g], drawers))]);
     }
 
@@ -42,10 +44,10 @@ public sealed record PartsOrder(IReadOnlyList<OrderLine> Lines)
         var needed = pieces.Sum(p => p.Quantity);
         var spare = Spares.Of(key, needed, pieces);
         var taken = drawers.Take(key, needed + spare);
-        return new OrderLine(key.Class, key.Type, key.ValueSi, key.RatedVoltageV, needed, spare, taken, needed + spare - taken);
+        return new OrderLine(key.Class, key.Type, key.ValueSi, key.LowestSi, key.RatedVoltageV, needed, spare, taken, needed + spare - taken);
     }
 
-    /// <summary>What is left in the drawers while lines take from them: lines that differ only in rating share a drawer.</summary>
+    /// <summary>What is left in the drawers while lines take from them: lines that differ only in rating or lowest value share a drawer.</summary>
     private sealed class Drawers(Shelf shelf)
     {
         private readonly Dictionary<(PartClass Class, string Type, double? ValueSi), double> _taken = [];
@@ -62,7 +64,7 @@ public sealed record PartsOrder(IReadOnlyList<OrderLine> Lines)
 }
 
 /// <summary>What makes two pieces the same to order.</summary>
-internal readonly record struct OrderKey(PartClass Class, string Type, double? ValueSi, double? RatedVoltageV)
+internal readonly record struct OrderKey(PartClass Class, string Type, double? ValueSi, double? LowestSi = null, double? RatedVoltageV = null)
 {
     public bool IsWire => Type == PartsOrder.Wire;
 }
@@ -92,9 +94,9 @@ internal static class OrderPieces
     private static IEnumerable<(OrderKey Key, double Quantity)> PiecesOf(Part part, string kind)
     {
         var @class = StageKindList.Find(kind)?.Description.Role(part.Role)?.Class ?? PartClass.Other;
-        var rating = part.Value(PartValue.RatedVoltage);
-        foreach (var (c, type, value) in Stock.PiecesOf(part, @class)) yield return (new OrderKey(c, type, SameValue(value), rating), 1);
-        if (WindingPart.Of(part, LearntValues.None) is { } winding) yield return (new OrderKey(PartClass.Winding, PartsOrder.Wire, winding.Wire.Bare.Metre, null), WireOf(winding).Metre);
+        var (lowest, rating) = (SameValue(part.Value(PartValue.MinimumCapacitance)), part.Value(PartValue.RatedVoltage));
+        foreach (var (c, type, value) in Stock.PiecesOf(part, @class)) yield return (new OrderKey(c, type, SameValue(value), lowest, rating), 1);
+        if (WindingPart.Of(part, LearntValues.None) is { } winding) yield return (new OrderKey(PartClass.Winding, PartsOrder.Wire, winding.Wire.Bare.Metre), WireOf(winding).Metre);
     }
 
     // The same value may have been computed in two ways; six digits are more than any part is marked with.

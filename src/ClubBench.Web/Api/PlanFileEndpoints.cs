@@ -15,6 +15,7 @@ internal static class PlanFileEndpoints
 {
     private const string Pdf = "application/pdf";
     private const string Csv = "text/csv";
+    private const string OrderExample = "part,type,value,rated_voltage,needed,spare,in_stock,to_buy\r\n\"Core\",\"T37-6\",\"\",\"\",21,3,24,0\r\n\"Capacitor\",\"NP0\",\"360 pF\",\"100 V\",14,2,0,16\r\n";
     private const string Spreadsheet = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
 
     public static void MapPlanFiles(this IEndpointRouteBuilder api)
@@ -23,19 +24,30 @@ internal static class PlanFileEndpoints
             .Described("PrintCards", "Build cards of a plan as one PDF; with stage, one card.")
             .Produces(StatusCodes.Status200OK, contentType: Pdf);
 
-        api.MapGet("/plans/{id:guid}/parts-order.csv", (Guid id, int? boards, PartsOrderOf order, HttpContext http) => OrderAsync(id, boards, order, http, OrderSheet.Csv, Csv, "parts-order.csv"))
-            .Described("OrderPartsAsCsv", "Parts for all boards of a plan, with spares, less stock; with boards, for that many.",
-                answer: "part,type,value,needed,spare,in_stock,to_buy\r\n\"toroid core\",\"T37-6\",\"\",18,2,30,0\r\n", answerType: Csv)
+        api.MapGet("/plans/{id:guid}/parts-order.csv", (Guid id, int? boards, PartsOrderOf order, HttpContext http) => CsvAsync(new PartsOrderOfInput(null, id, boards), order, http))
+            .Described("OrderPartsAsCsv", "Parts for all boards of a plan, with spares, less stock; with boards, for that many.", answer: OrderExample, answerType: Csv)
             .Produces(StatusCodes.Status200OK, contentType: Csv);
 
-        api.MapGet("/plans/{id:guid}/parts-order.xlsx", (Guid id, int? boards, PartsOrderOf order, HttpContext http) => OrderAsync(id, boards, order, http, OrderSheet.Xlsx, Spreadsheet, "parts-order.xlsx"))
+        api.MapGet("/plans/{id:guid}/parts-order.xlsx", (Guid id, int? boards, PartsOrderOf order, HttpContext http) => SpreadsheetAsync(new PartsOrderOfInput(null, id, boards), order, http))
             .Described("OrderPartsAsSpreadsheet", "The same order as a spreadsheet.")
+            .Produces(StatusCodes.Status200OK, contentType: Spreadsheet);
+
+        api.MapGet("/group-builds/{id:guid}/parts-order.csv", (Guid id, PartsOrderOf order, HttpContext http) => CsvAsync(new PartsOrderOfInput(id), order, http))
+            .Described("OrderPartsOfGroupBuildAsCsv", "Parts for all boards of a group build, whatever plan they follow.", answer: OrderExample, answerType: Csv)
+            .Produces(StatusCodes.Status200OK, contentType: Csv);
+
+        api.MapGet("/group-builds/{id:guid}/parts-order.xlsx", (Guid id, PartsOrderOf order, HttpContext http) => SpreadsheetAsync(new PartsOrderOfInput(id), order, http))
+            .Described("OrderPartsOfGroupBuildAsSpreadsheet", "The same order as a spreadsheet.")
             .Produces(StatusCodes.Status200OK, contentType: Spreadsheet);
     }
 
-    private static async Task<IResult> OrderAsync(Guid id, int? boards, PartsOrderOf order, HttpContext http, Func<PartsOrder, byte[]> write, string type, string name)
+    private static Task<IResult> CsvAsync(PartsOrderOfInput input, PartsOrderOf order, HttpContext http) => OrderAsync(input, order, http, OrderSheet.Csv, Csv, "parts-order.csv");
+
+    private static Task<IResult> SpreadsheetAsync(PartsOrderOfInput input, PartsOrderOf order, HttpContext http) => OrderAsync(input, order, http, OrderSheet.Xlsx, Spreadsheet, "parts-order.xlsx");
+
+    private static async Task<IResult> OrderAsync(PartsOrderOfInput input, PartsOrderOf order, HttpContext http, Func<PartsOrder, byte[]> write, string type, string name)
     {
-        var found = await order.Run(http.User.ToActor(), new PartsOrderOfInput(null, id, boards), http.RequestAborted);
+        var found = await order.Run(http.User.ToActor(), input, http.RequestAborted);
         return found.Succeeded ? Results.File(write(found.Value), type, name) : Answers.Problem(found.Messages);
     }
 

@@ -66,6 +66,7 @@ internal static class PagesToSee
     [
         new("group-builds", "coordinator", "/group-builds"),
         new("group-build", "coordinator", $"/group-builds/{groupBuild}"),
+        new("build-order", "coordinator", $"/group-builds/{groupBuild}/parts-order"),
         new("nights", "coordinator", "/nights"),
         new("night", "coordinator", $"/nights/{id}"),
         new("room", "coordinator", "/room"),

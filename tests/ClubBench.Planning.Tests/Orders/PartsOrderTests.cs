@@ -113,9 +113,44 @@ public class PartsOrderTests
         Assert.Equal(value, OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture).Single(r => r.Type == type).Value);
 
     [Fact]
+    public void Rows_OfAnOrder_TellBothEndsOfWhatCanBeTurned()
+    {
+        var rows = OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture);
+
+        Assert.Equal(["5\u201330\u00A0pF", "8\u201340\u00A0pF", "10\u201360\u00A0pF"], rows.Where(r => r.Part == "Trimmer").Select(r => r.Value));
+        Assert.Equal("5\u2013140\u00A0pF", rows.Single(r => r.Part == "Variable capacitor").Value);
+    }
+
+    [Fact]
+    public void Of_TrimmersOfOneHighestValue_AreTwoLinesOutOfOneDrawer()
+    {
+        var trimmer = Forty.Stages.SelectMany(s => s.After.Parts).First(p => p.Designator.StartsWith("TC", StringComparison.Ordinal));
+        var stage = Forty.Stages.First(s => s.After.Parts.Contains(trimmer));
+        var other = trimmer.With((PartValue.MinimumCapacitance, 1e-12)) with { Designator = "TC9" };
+        var both = stage with { After = stage.After with { Parts = [trimmer, other] } };
+        var shelf = new Shelf([new StockLine(PartClass.Trimmer, trimmer.Type, trimmer.Value(PartValue.MaximumCapacitance), 3, "", true)]);
+
+        var lines = PartsOrder.Of([(Forty with { Stages = [both] }, 1)], shelf).Lines;
+
+        Assert.Equal([1e-12, trimmer.Value(PartValue.MinimumCapacitance)], lines.Select(l => l.LowestSi));
+        Assert.Equal(3, lines.Sum(l => l.InStock));
+        Assert.Equal(1, lines.Sum(l => l.ToBuy));
+    }
+
+    [Fact]
+    public void Rows_OfAnOrder_NameCoreAndWireAndPutTheRestLast()
+    {
+        var rows = OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture);
+
+        Assert.Equal("Core", rows.First(r => r.Type == "T37-6").Part);
+        Assert.Equal("0.4\u00A0mm", rows.Single(r => r.Part == "Wire").Value);
+        Assert.Equal("Other part", rows[^1].Part);
+    }
+
+    [Fact]
     public void Rows_OfAnOrder_TellTheRatingThatPartsTwoLines()
     {
-        var order = new PartsOrder([new(PartClass.Capacitor, "NP0", 100e-12, 50, 5, 1, 0, 6), new(PartClass.Capacitor, "NP0", 100e-12, 100, 5, 1, 0, 6), new(PartClass.Diode, "zener", 36, null, 5, 1, 0, 6)]);
+        var order = new PartsOrder([new(PartClass.Capacitor, "NP0", 100e-12, null, 50, 5, 1, 0, 6), new(PartClass.Capacitor, "NP0", 100e-12, null, 100, 5, 1, 0, 6), new(PartClass.Diode, "zener", 36, null, null, 5, 1, 0, 6)]);
 
         var rows = OrderTable.Rows(order, CultureInfo.InvariantCulture);
 
@@ -136,6 +171,6 @@ public class PartsOrderTests
     [InlineData("", "")]
     public void Safe_Text_CannotBecomeAFormula(string text, string cell) => Assert.Equal(cell, CellText.Safe(text));
 
-    private static Dictionary<(PartClass, string, double?, double?), double> Needed(PartsOrder order) =>
-        order.Lines.ToDictionary(l => (l.Class, l.Type, l.ValueSi, l.RatedVoltageV), l => l.Needed);
+    private static Dictionary<(PartClass, string, double?, double?, double?), double> Needed(PartsOrder order) =>
+        order.Lines.ToDictionary(l => (l.Class, l.Type, l.ValueSi, l.LowestSi, l.RatedVoltageV), l => l.Needed);
 }

@@ -80,6 +80,8 @@ public sealed class HallInterfaceTests(DemoInterface api) : IClassFixture<DemoIn
     [InlineData("plans/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/cards.pdf")]
     [InlineData("plans/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/parts-order.csv")]
     [InlineData("plans/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/parts-order.xlsx")]
+    [InlineData("group-builds/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/parts-order.csv")]
+    [InlineData("group-builds/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/parts-order.xlsx")]
     [InlineData("boards")]
     [InlineData("nights")]
     [InlineData("nights/5f0f4b1e-2f5c-4f8e-9d0a-6f7c3c1e0a30/room")]

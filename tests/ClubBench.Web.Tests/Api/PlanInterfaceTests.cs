@@ -98,6 +98,19 @@ public sealed class PlanInterfaceTests(DemoInterface api) : IClassFixture<DemoIn
     }
 
     [Fact]
+    public async Task PartsOrder_OfAGroupBuild_HoldsThePartsOfBothPlans()
+    {
+        var build = (await api.ItemsAsync("nights"))[0]["groupBuildId"]!.GetValue<string>();
+
+        var both = await api.Program.GetStringAsync($"/api/v1/group-builds/{build}/parts-order.csv", Cancellation);
+        using var none = await api.Program.GetAsync($"/api/v1/group-builds/{Guid.NewGuid()}/parts-order.csv", Cancellation);
+
+        Assert.Contains("\"14.060\u00A0MHz\"", both, StringComparison.Ordinal);
+        Assert.Contains("\"7.030\u00A0MHz\"", both, StringComparison.Ordinal);
+        Assert.Equal("groupBuildId", Assert.Single(await DemoInterface.ProblemsOf(none, HttpStatusCode.NotFound)).Path);
+    }
+
+    [Fact]
     public async Task PartsOrder_ForNoBoards_NamesTheField()
     {
         using var answer = await api.Program.GetAsync($"/api/v1/plans/{await api.PlanIdAsync("20 m")}/parts-order.csv?boards=0", Cancellation);

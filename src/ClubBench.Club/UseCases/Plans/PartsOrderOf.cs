@@ -26,6 +26,7 @@ public sealed class PartsOrderOf(ClubStore store, PlanArchive archive) : Query<P
     {
         if (input.Boards is < 1 or > MostBoards) return Failure("boards", "order.boards-range");
         if (input is { GroupBuildId: null, PlanId: null }) return Failure("planId", "field.needed");
+        if (input.GroupBuildId is { } build && !await work.Db.GroupBuilds.AnyAsync(b => b.Id == build, cancellation)) return NotFound("groupBuildId");
         var counts = await work.Db.Boards.Where(b => (input.GroupBuildId == null || b.GroupBuildId == input.GroupBuildId) && (input.PlanId == null || b.PlanId == input.PlanId))
             .GroupBy(b => b.PlanId).Select(g => new { PlanId = g.Key, Boards = g.Count() }).ToDictionaryAsync(g => g.PlanId, g => g.Boards, cancellation);
         if (input.PlanId is { } one) counts[one] = input.Boards ?? Math.Max(1, counts.GetValueOrDefault(one));
