@@ -1,6 +1,7 @@
 using System.Text.Json;
 using ClubBench.Club.UseCases.Boards;
 using ClubBench.Planning.Cards;
+using ClubBench.Web.State;
 using ClubBench.Web.Texts;
 using Microsoft.AspNetCore.Components;
 using Microsoft.Extensions.Localization;
@@ -35,8 +36,7 @@ public sealed record BenchModel(
 
     public string Path => $"/bench/{Uri.EscapeDataString(Tag)}";
 
-    /// <summary>20 m is filled, every other band outlined; the word always stands there.</summary>
-    public string BandStyle => BandName == "20 m" ? "filled" : "outlined";
+    public string BandStyle => BandLook.Of(BandName);
 
     /// <summary>What the script starts from. The encoder leaves no angle bracket in it.</summary>
     public string Json => JsonSerializer.Serialize(
