@@ -17,7 +17,7 @@ public static class CardFigures
         .. content.Fit.SelectMany(row => row.Designators.Select(d => new CardFigure(d, CardText.ValueOf(content, row.Part)))),
         .. content.Windings.SelectMany(OfWinding),
         .. content.Notes.SupplyLimit is { } limit ? new[] { new CardFigure("supply", QuantityText.Format(limit)) } : [],
-        .. CardText.ReadingsAfterFitting(content).SelectMany(r => new[] { new CardFigure(r.Point, CardText.ExpectedOf(r)), new CardFigure(r.Point, CardText.WindowOf(r)) }),
+        .. CardText.ReadingsAfterFitting(content).SelectMany(r => new[] { new CardFigure(r.Point, ReadingText.Expected(r)), new CardFigure(r.Point, CardText.WindowOf(r)) }),
     ];
 
     private static IEnumerable<CardFigure> OfWinding(WindingRow winding)

@@ -35,22 +35,13 @@ internal static class CardText
         ? Texts.Say("card.inductance-of", winding.Designator)
         : Phrases.Say("point." + reading.Point[(reading.Point.IndexOf('.', StringComparison.Ordinal) + 1)..], content.Kind);
 
-    /// <summary>The value to expect; an expected nothing in the unit of the reader's own reading.</summary>
-    public static string ExpectedOf(ExpectedReading reading) => reading.Nominal == 0
-        ? new QuantityParts("0", UnitOf(reading)).ToString()
-        : QuantityText.Format(Figure.Of("expected", reading.Kind, reading.Nominal));
-
     /// <summary>The window, by the ends that count.</summary>
     public static string WindowOf(ExpectedReading reading) => reading.Sides switch
     {
-        WindowSides.AtMost => Texts.Say("card.at-most", QuantityText.Format(reading.Kind, reading.HighSi)),
-        WindowSides.AtLeast => Texts.Say("card.at-least", QuantityText.Format(reading.Kind, reading.LowSi)),
-        _ => QuantityText.FormatSpan(reading.Kind, reading.LowSi, reading.HighSi),
+        WindowSides.AtMost => Texts.Say("card.at-most", ReadingText.Window(reading)),
+        WindowSides.AtLeast => Texts.Say("card.at-least", ReadingText.Window(reading)),
+        _ => ReadingText.Window(reading),
     };
-
-    /// <summary>Unit to write beside one's own reading: that of the window's far end, which suits an expected nothing too.</summary>
-    public static string UnitOf(ExpectedReading reading) => QuantityText.Split(
-        reading.Kind, reading.Sides == WindowSides.AtLeast ? reading.Nominal : Math.Max(Math.Abs(reading.Nominal), Math.Abs(reading.HighSi))).Unit;
 
     /// <summary>Readings that are not already taken in the winding table.</summary>
     public static IEnumerable<ExpectedReading> ReadingsAfterFitting(CardContent content) =>

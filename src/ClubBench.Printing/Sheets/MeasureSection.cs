@@ -36,9 +36,9 @@ internal static class MeasureSection
         [
             new TextCell(number.ToString(CultureInfo.CurrentCulture), TextStyle.Strong),
             setUp.Length == 0 ? new TextCell(what, TextStyle.Body) : new TextCell(Texts.Say("card.what-how", what, setUp), TextStyle.Body),
-            new TextCell(CardText.ExpectedOf(reading), TextStyle.Key),
+            new TextCell(ReadingText.Expected(reading), TextStyle.Key),
             new TextCell(CardText.WindowOf(reading), TextStyle.Body),
-            new BlankCell(CardText.UnitOf(reading)),
+            new BlankCell(ReadingText.Unit(reading)),
             card.Context.Instruments.TryGetValue(reading.Instrument, out var name) ? new TextCell(name, TextStyle.Body) : new BlankCell(""),
         ];
     }

@@ -47,13 +47,5 @@ public sealed record BenchPoint(
         BenchUnits.Spellings(expected.Kind),
         [.. instruments.Where(i => i.Class == expected.Instrument).Select(i => BenchInstrument.Of(i, expected.Kind))]);
 
-    /// <summary>The window in words, for the page before its script has started.</summary>
-    public string WindowText(ExpectedReading expected) => expected.Sides switch
-    {
-        WindowSides.AtLeast => QuantityText.Format(expected.Kind, expected.LowSi, Digits),
-        WindowSides.AtMost => QuantityText.Format(expected.Kind, expected.HighSi, Digits),
-        _ => QuantityText.FormatSpan(expected.Kind, expected.LowSi, expected.HighSi, Digits),
-    };
-
     private static bool IsLevel(QuantityKind kind) => kind is QuantityKind.Decibels or QuantityKind.PowerLevel or QuantityKind.RelativeLevel;
 }

@@ -106,9 +106,9 @@ public class PartsOrderTests
     [Theory]
     [InlineData("Zener 1 W", "36\u00A0V")]
     [InlineData("Zener 0.5 W", "6.2\u00A0V")]
-    [InlineData("fast, 5 x 20 mm", "1\u00A0A")]
+    [InlineData("fuse, fast, 5 x 20 mm", "1\u00A0A")]
     [InlineData("1N4148", "")]
-    [InlineData("clip-on, 20 K/W", "")]
+    [InlineData("heat sink, clip-on, 20 K/W", "")]
     public void Rows_OfAnOrder_TellWhatMustBeAskedForInTheShop(string type, string value) =>
         Assert.Equal(value, OrderTable.Rows(PartsOrder.Of([(Forty, 5)], DemoKits.DrawerStock), CultureInfo.InvariantCulture).Single(r => r.Type == type).Value);
 

@@ -10,6 +10,8 @@ namespace ClubBench.Web.Components.Pages.Plans;
 /// <summary>Makes a plan for a kit, or moves an existing plan elsewhere.</summary>
 public partial class TargetPage
 {
+    private const string WhichKit = "/bands";
+
     private Kit? _kit;
     private OpenedPlan? _plan;
     private TargetDraft? _draft;
@@ -44,6 +46,7 @@ public partial class TargetPage
         if (_draft is not null) return;
         if (Id is { } id) _plan = Take(await OpenPlan.Run(Actor, new OpenPlanInput(id)));
         else if (KitId is { } kit) _kit = Take(await Open.Run(Actor, new OpenKitInput(kit)))?.Kit;
+        else Navigation.NavigateTo(WhichKit);
         _kit ??= _plan?.Plan.Inputs.Kit;
         if (_plan is not null) _draft = TargetDraft.Of(_plan.Plan.Inputs.Target);
         else if (_kit is not null) TakeBand(Band ?? "20 m");
