@@ -7,8 +7,8 @@ namespace ClubBench.Calculation.Windings;
 /// <summary>All wire sizes of <c>wire.csv</c>. Immutable, thread safe.</summary>
 public static class Wires
 {
-    // One step of the R20 series of preferred diameters either way.
-    private const double SubstitutionWindow = 0.12;
+    // One step of the R20 series of preferred diameters either way; 0.50 to 0.56 mm is 12 % but for the last bit.
+    private const double SubstitutionWindow = 0.12 + 1e-9;
 
     /// <summary>Every listed size, by system and size.</summary>
     public static IReadOnlyList<Wire> All { get; } = CsvTable.Read("wire", Row);
