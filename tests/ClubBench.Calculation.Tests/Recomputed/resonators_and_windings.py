@@ -2,6 +2,7 @@
 whose note names this file. Run: python3 resonators_and_windings.py"""
 import cmath
 import math
+import statistics
 
 MU0, RHO = 4e-7 * math.pi, 1.7241e-8
 
@@ -75,6 +76,34 @@ def loops(diameter, n, pitch, wire):
     return n * own + 2 * sum((n - m) * mutual(m * pitch) for m in range(1, n))
 
 
+def copper_only_q(turns, index, outer, inner, height, overall, bare, f):
+    """w L over the resistance of the straight wire, exact skin effect."""
+    wire = turns * (outer - inner + 2 * height + math.pi * overall)
+    return 2 * math.pi * f * index * turns ** 2 / (RHO * wire / (math.pi * bare ** 2 / 4) * skin_factor(bare, f))
+
+
+def batch(boards, t, systematic=0.01):
+    """Index from the boards left: mean, deviation, standard and expanded uncertainty in nH per turn squared."""
+    indices = [uh * 1e3 / n ** 2 for uh, n in boards]
+    mean, deviation = statistics.mean(indices), statistics.stdev(indices)
+    u = math.hypot(deviation / math.sqrt(len(indices)), systematic * mean)
+    return mean, deviation, u, t * u
+
+
+def ferrite(turns, index, f, mu, loss, mu_initial, parallel=0.0):
+    w = 2 * math.pi * f
+    z = 1j * w * turns ** 2 * index * (mu - 1j * loss) / mu_initial
+    return 1 / (1 / z + 1j * w * parallel)
+
+
+def judgement(z, r):
+    """Ratio, insertion and dissipation in dB of an impedance across a line matched at both ends, by the voltages at its load."""
+    open_v, loaded = 0.5, (z * r / (z + r)) / (r + z * r / (z + r))
+    reached = abs(loaded / open_v) ** 2
+    taken = (abs(loaded) ** 2 * (1 / z).real) / (abs(loaded) ** 2 / r)
+    return abs(z) / r, -10 * math.log10(reached), 10 * math.log10(1 + taken)
+
+
 p = 1e-12
 print("yields", *(round(trimmer_yield(*c), 4) for c in (
     (5.2e-6, .05, 56 * p, .05, 8 * p, 40 * p, 3 * p, 8 * p, 7.0e6, 7.2e6),
@@ -86,3 +115,15 @@ print("dividers", *(tuple(round(v, 4) for v in (rp, cp / p)) for rp, cp in (
 print("capacities", *(placed_circles(*c) for c in (
     (7.7, .566, 30), (7.7, .459, 30), (5.21, .367, 30), (9.4, .566, 30), (3.05, .297, 30), (7.7, .566, 0))))
 print("loops", *(round(loops(*c) * 1e6, 4) for c in ((.01, 10, .001, .0008), (.008, 7, .0015, .00063), (.02, 15, .0012, .001))))
+print("copper only Q", round(copper_only_q(33, 4.9e-9, 12.7e-3, 7.70e-3, 4.83e-3, .566e-3, .5e-3, 7.1e6), 1))
+print("batch", *(round(v, 4) for v in batch([(5.30, 33), (5.45, 33), (5.38, 33), (5.02, 32), (5.52, 33), (5.41, 33)], 2.5706)))
+for name, case in (
+        ("choke 3.5 MHz", (10, 350e-9, 3.5e6, 500, 250, 800, 3 * p)), ("choke 7 MHz", (10, 350e-9, 7e6, 340, 270, 800, 3 * p)),
+        ("choke 10 MHz", (10, 350e-9, 10e6, 265, 245, 800, 3 * p)), ("choke 14 MHz", (10, 350e-9, 14e6, 203, 203, 800, 3 * p)),
+        ("choke 1 MHz", (10, 350e-9, 1e6, 711, 59, 800))):
+    print(name, complex(round(ferrite(*case).real, 1), round(ferrite(*case).imag, 1)))
+for name, case, r in (
+        ("10 t FT37-43", (10, 350e-9, 1e6, 711, 59, 800), 50), ("5 t FT37-43", (5, 350e-9, 7e6, 340, 270, 800), 50),
+        ("10 t FT37-61", (10, 55.3e-9, 5e6, 125, 1, 125), 50), ("8 t FT50-43", (8, 440e-9, 3.5e6, 500, 250, 800), 200)):
+    z = ferrite(*case)
+    print(name, complex(round(z.real, 2), round(z.imag, 2)), *(round(v, 3) for v in judgement(z, r)))

@@ -11,6 +11,7 @@ public class AirCoreSolenoidTests
 
     [Theory]
     [MemberData(nameof(Coils))]
+    [Evidence(typeof(AirCoreSolenoid), EvidenceKind.IndependentRecomputation)]
     public void Inductance_Coil_MatchesTableAndLoops(ReferenceRow row)
     {
         var coil = Coil(row);
@@ -25,10 +26,12 @@ public class AirCoreSolenoidTests
 
     [Theory]
     [MemberData(nameof(Coefficients))]
+    [Evidence(typeof(AirCoreSolenoid), EvidenceKind.PublishedValue)]
     public void NagaokaCoefficient_PublishedRatios_MatchThePrintedDigits(ReferenceRow row) =>
         Assert.Equal(row.Number("coefficient"), AirCoreSolenoid.NagaokaCoefficient(row.Number("diameter_over_length")), 6e-7);
 
     [Fact]
+    [Evidence(typeof(AirCoreSolenoid), EvidenceKind.ClosedFormLimit)]
     public void NagaokaCoefficient_VeryLongCoil_IsNearlyOne() => Assert.Equal(1, AirCoreSolenoid.NagaokaCoefficient(0.001), 0.0005);
 
     [Fact]
@@ -42,6 +45,7 @@ public class AirCoreSolenoidTests
     }
 
     [Fact]
+    [Evidence(typeof(AirCoreSolenoid), EvidenceKind.Identity)]
     public void Inductance_StretchedCoil_Falls()
     {
         var coil = new AirCoreSolenoid(Length.FromMillimetre(10), 10, Length.FromMillimetre(1), Length.FromMillimetre(0.8));

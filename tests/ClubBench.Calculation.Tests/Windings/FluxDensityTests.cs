@@ -20,6 +20,7 @@ public class FluxDensityTests
     [InlineData(14, 42)]
     [InlineData(28, 30)]
     [InlineData(0.05, 500)]
+    [Evidence(typeof(FluxDensity), EvidenceKind.ClosedFormLimit)]
     public void GuideLimit_AtListedPoints_IsTheListedValue(double mhz, double gauss) =>
         Assert.Equal(gauss, FluxDensity.GuideLimit(Frequency.FromMegahertz(mhz)).Gauss, 9);
 
@@ -44,6 +45,7 @@ public class FluxDensityTests
     }
 
     [Fact]
+    [Evidence(typeof(FluxDensity), EvidenceKind.Identity)]
     public void Alternating_TwiceTheTurns_HalvesTheFlux()
     {
         var (e, f, a) = (Voltage.FromVolt(10), Frequency.FromMegahertz(7), Area.FromSquareCentimetre(0.1));
@@ -72,6 +74,7 @@ public class FluxDensityTests
     public void BiasShare_MixWithoutAListedValue_IsNotStated() => Assert.Null(FluxDensity.BiasShare(Cores.FindToroid("T50-2")!, 10, Current.FromAmpere(1)));
 
     [Fact]
+    [Evidence(typeof(FluxDensity), EvidenceKind.Identity)]
     public void Bias_FluxOfTheInductance_AgreesWithLIOverNA()
     {
         // B = L I/(N A) with the index that size and permeability give.
@@ -81,11 +84,34 @@ public class FluxDensityTests
     }
 
     [Fact]
+    [Evidence(typeof(FluxDensity), EvidenceKind.ClosedFormLimit)]
     public void TemperatureRise_OneMilliwattPerSquareCentimetre_IsOneKelvin()
     {
         var core = Cores.FindToroid("T50-2")!;
         var power = Power.FromMilliwatt(FluxDensity.Surface(core).SquareCentimetre);
 
         Assert.Equal(1, FluxDensity.TemperatureRise(core, power).Kelvin, 9);
+    }
+
+    [Fact]
+    [Evidence(typeof(FluxDensity), EvidenceKind.IndependentRecomputation)]
+    public void Alternating_SineSummedOverHalfACycle_IsHalfTheSwing()
+    {
+        const int Steps = 2000;
+        var (f, area, turns) = (Frequency.FromMegahertz(7.1), Area.FromSquareCentimetre(0.112), 16);
+        var step = 0.5 / f.Hertz / Steps;
+
+        var swing = Enumerable.Range(0, Steps).Sum(i => Math.Sqrt(2) * 15.8 * Math.Sin(f.RadiansPerSecond * (i + 0.5) * step) * step) / (turns * area.SquareMetre);
+
+        Assert.Equal(1, FluxDensity.Alternating(Voltage.FromVolt(15.8), f, turns, area).Tesla / (swing / 2), 1e-6);
+    }
+
+    [Fact]
+    [Evidence(typeof(FluxDensity), EvidenceKind.Identity)]
+    public void GuideLimit_GrowingFrequency_NeverRises()
+    {
+        double[] limits = [.. Enumerable.Range(0, 100).Select(i => FluxDensity.GuideLimit(Frequency.FromMegahertz(0.1 * Math.Pow(1.07, i))).Gauss)];
+
+        Assert.Equal(limits.OrderDescending(), limits);
     }
 }

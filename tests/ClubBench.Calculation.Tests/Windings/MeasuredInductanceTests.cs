@@ -27,6 +27,7 @@ public class MeasuredInductanceTests
     }
 
     [Fact]
+    [Evidence(typeof(InductanceFromResonance), EvidenceKind.RoundTrip)]
     public void FromTwo_KnownCoilAndStray_RecoversBoth() =>
         Gen.Select(Gen.Double[0.1, 50], Gen.Double[0.5, 25], Gen.Double[20, 100], Gen.Double[2, 10]).Sample((uh, stray, pf, step) =>
         {
@@ -35,6 +36,7 @@ public class MeasuredInductanceTests
         });
 
     [Fact]
+    [Evidence(typeof(InductanceFromResonance), EvidenceKind.IndependentRecomputation)]
     public void FromTwo_SimulatedErrors_ScatterAsTheUncertaintySays()
     {
         var random = new SeededRandom(3);
@@ -70,6 +72,7 @@ public class MeasuredInductanceTests
     }
 
     [Fact]
+    [Evidence(typeof(InductanceFromResonance), EvidenceKind.RoundTrip)]
     public void FromOne_StrayAssumed_CarriesItsUncertainty()
     {
         var result = InductanceFromResonance.FromOne(Forward(5, 6, 220), Capacitance.FromPicofarad(6), 1e-4, 0.01, Capacitance.FromPicofarad(3));
@@ -79,6 +82,7 @@ public class MeasuredInductanceTests
     }
 
     [Fact]
+    [Evidence(typeof(BatchInductanceFactor), EvidenceKind.IndependentRecomputation)]
     public void BatchFrom_SevenBoards_FindsTheMiscountedOne()
     {
         var batch = BatchInductanceFactor.From(Seven, 0.01, 0.01);
@@ -86,6 +90,7 @@ public class MeasuredInductanceTests
         var unfit = Assert.Single(batch.Unfit);
         Assert.Equal(("6", 32), (unfit.Board.Board, unfit.LikelyTurns));
         Assert.Equal(6, batch.Used.Count);
+        // Recomputed/resonators_and_windings.py.
         Assert.Equal(4.958, batch.Mean.NanohenryPerTurnSquared, 0.0005);
         Assert.Equal(0.0725, batch.Deviation, 0.0004);
         Assert.Equal(0.0577, batch.StandardUncertainty, 0.0003);
@@ -139,6 +144,14 @@ public class MeasuredInductanceTests
 
         Assert.Contains(batch.OtherMixes((IronPowderCore)Cores.Find("T37-6")!), c => c.Designation == "T37-2");
         Assert.Empty(batch.OtherMixes((IronPowderCore)Cores.Find("T37-2")!));
+    }
+
+    [Fact]
+    [Evidence(typeof(InductanceFromResonance), EvidenceKind.ClosedFormLimit)]
+    public void Uncertainty_FrequencyAlone_CountsTwice()
+    {
+        Assert.Equal(2e-4, InductanceFromResonance.FromOne(Forward(5, 0, 220), default, 1e-4, 0, default).RelativeUncertainty, 12);
+        Assert.Equal(0, InductanceFromResonance.FromTwo(Point(220, 5.118), Point(100, 7.463)).InductanceUncertainty.Henry);
     }
 
     private static ResonancePoint Point(double picofarad, double megahertz) =>

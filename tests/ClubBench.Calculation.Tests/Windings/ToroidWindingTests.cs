@@ -28,6 +28,7 @@ public class ToroidWindingTests
     }
 
     [Fact]
+    [Evidence(typeof(TurnsChoice), EvidenceKind.Identity)]
     public void TurnsChoiceFor_AnyInductance_BestIsNoWorseThanTheOther() =>
         Gen.Select(Gen.Double[1, 1000], Gen.Double[0.01, 500]).Sample((nh, uh) =>
         {
@@ -36,6 +37,7 @@ public class ToroidWindingTests
         });
 
     [Fact]
+    [Evidence(typeof(TurnsChoice), EvidenceKind.ClosedFormLimit)]
     public void TurnsChoiceFor_LessThanOneTurn_OffersOneTurnOnly()
     {
         var choice = TurnsChoice.For(InductanceFactor.FromNanohenryPerTurnSquared(350), Inductance.FromNanohenry(50));
@@ -49,6 +51,7 @@ public class ToroidWindingTests
         Assert.Equal(0.16, TurnsChoice.For(InductanceFactor.FromNanohenryPerTurnSquared(3), Inductance.FromMicrohenry(0.47)).Best.StepUp, 0.005);
 
     [Fact]
+    [Evidence(typeof(TurnsChoice), EvidenceKind.RoundTrip)]
     public void MakesExact_CapacitorForRoundedTurns_KeepsTheResonance()
     {
         var (wanted, designed) = (Inductance.FromMicrohenry(5.2), Capacitance.FromPicofarad(96.632));
@@ -61,12 +64,14 @@ public class ToroidWindingTests
 
     [Theory]
     [MemberData(nameof(Capacities))]
+    [Evidence(typeof(ToroidWinding), EvidenceKind.IndependentRecomputation)]
     public void CapacityOf_HoleAndWire_MatchesPlacedCircles(ReferenceRow row) =>
         Assert.Equal(
             row.Number("turns"),
             ToroidWinding.CapacityOf(Length.FromMillimetre(row.Number("hole_mm")), Length.FromMillimetre(row.Number("overall_mm")), row.Number("gap_degrees")));
 
     [Fact]
+    [Evidence(typeof(ToroidWinding), EvidenceKind.Identity)]
     public void CapacityOf_AnyWireWithoutGap_LeavesNeighboursApartAndNoRoomForOneMore() =>
         Gen.Select(Gen.Double[3, 20], Gen.Double[0.1, 1.2]).Sample((hole, wire) =>
         {
@@ -76,6 +81,7 @@ public class ToroidWindingTests
         });
 
     [Fact]
+    [Evidence(typeof(ToroidWinding), EvidenceKind.ClosedFormLimit)]
     public void CapacityOf_ThickWire_PassesOnceOrNotAtAll()
     {
         var hole = Length.FromMillimetre(2);
@@ -100,6 +106,7 @@ public class ToroidWindingTests
     }
 
     [Fact]
+    [Evidence(typeof(ToroidWinding), EvidenceKind.RoundTrip)]
     public void LargestWire_FittingTurns_IsTheLastThatFits()
     {
         var core = Cores.FindToroid("T50-2")!;

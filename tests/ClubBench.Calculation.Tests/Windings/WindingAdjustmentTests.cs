@@ -1,4 +1,6 @@
 using ClubBench.Calculation.Quantities;
+using ClubBench.Calculation.Resonators;
+using ClubBench.Calculation.Statistics;
 using ClubBench.Calculation.Windings;
 using CsCheck;
 
@@ -27,6 +29,7 @@ public class WindingAdjustmentTests
     }
 
     [Fact]
+    [Evidence(typeof(WindingAdjustment), EvidenceKind.Identity)]
     public void For_AnyReading_NeverMovesAwayFromTheTarget() =>
         Readings.Sample(r =>
         {
@@ -36,6 +39,7 @@ public class WindingAdjustmentTests
         });
 
     [Fact]
+    [Evidence(typeof(WindingAdjustment), EvidenceKind.Identity)]
     public void For_AnyReading_StepsTheRightWayAndNoFurtherThanAsked() =>
         Readings.Sample(r =>
         {
@@ -48,6 +52,7 @@ public class WindingAdjustmentTests
         });
 
     [Fact]
+    [Evidence(typeof(WindingAdjustment), EvidenceKind.RoundTrip)]
     public void For_RepeatedOnAnExactReading_EndsWithoutTurnsToChange() =>
         Readings.Sample(r =>
         {
@@ -80,6 +85,7 @@ public class WindingAdjustmentTests
     }
 
     [Fact]
+    [Evidence(typeof(WindingAdjustment), EvidenceKind.ClosedFormLimit)]
     public void For_CapacitorToChange_BringsTheCircuitToResonance()
     {
         var advice = WindingAdjustment.For(new WindingReading(8, 1.15, 0.02));
@@ -88,6 +94,7 @@ public class WindingAdjustmentTests
     }
 
     [Fact]
+    [Evidence(typeof(WindingAdjustment), EvidenceKind.ClosedFormLimit)]
     public void ExpectedReading_AfterRemovingTurns_RisesWithTheTurns()
     {
         var reading = new WindingReading(33, 1.10, 0.02);
@@ -97,13 +104,16 @@ public class WindingAdjustmentTests
     }
 
     [Fact]
+    [Evidence(typeof(WindingReading), EvidenceKind.ClosedFormLimit)]
     public void RatioFrom_LowFrequency_IsALargeCoil() =>
         Assert.Equal(1.21, WindingReading.RatioFrom(Frequency.FromMegahertz(7.7), Frequency.FromMegahertz(7)), 12);
 
     [Fact]
+    [Evidence(typeof(WindingReading), EvidenceKind.ClosedFormLimit)]
     public void UncertaintyFrom_CapacitorAlone_IsTwiceIt() => Assert.Equal(0.02, WindingReading.UncertaintyFrom(0, 0.01), 12);
 
     [Fact]
+    [Evidence(typeof(AdjustmentLimits), EvidenceKind.ClosedFormLimit)]
     public void TrimRange_TrimmerOffCentre_CountsTheNearerEndLessAFifth()
     {
         var range = AdjustmentLimits.TrimRange(Capacitance.FromPicofarad(100), Capacitance.FromPicofarad(90), Capacitance.FromPicofarad(130));
@@ -118,5 +128,41 @@ public class WindingAdjustmentTests
         Assert.Equal(AdjustmentLimits.Usual, AdjustmentLimits.For(new(Cores.FindToroid("T37-6")!, 15, Wire.Millimetre(0.4))));
         Assert.Equal(AdjustmentLimits.Crowded, AdjustmentLimits.For(new(Cores.FindToroid("T37-6")!, 28, Wire.Millimetre(0.4))));
         Assert.Equal(AdjustmentLimits.Ferrite, AdjustmentLimits.For(new(Cores.FindToroid("FT37-61")!, 15, Wire.Millimetre(0.4))));
+    }
+
+    [Fact]
+    [Evidence(typeof(WindingReading), EvidenceKind.Identity)]
+    public void RatioFrom_ReadingsSwapped_IsTheInverse() =>
+        Gen.Select(Gen.Double[1, 60], Gen.Double[1, 60]).Sample((a, b) =>
+        {
+            var (f, g) = (Frequency.FromMegahertz(a), Frequency.FromMegahertz(b));
+            return Math.Abs((WindingReading.RatioFrom(f, g) * WindingReading.RatioFrom(g, f)) - 1) < 1e-12 && WindingReading.RatioFrom(f, g) > 1 == a > b;
+        });
+
+    [Fact]
+    [Evidence(typeof(WindingReading), EvidenceKind.RoundTrip)]
+    public void RatioFrom_ResonancesOfTwoCoils_IsTheRatioOfTheCoils() =>
+        Gen.Select(Gen.Double[0.1, 50], Gen.Double[0.5, 2], Gen.Double[20, 500]).Sample((uh, ratio, pf) =>
+        {
+            var (wanted, c) = (Inductance.FromMicrohenry(uh), Capacitance.FromPicofarad(pf));
+            return Math.Abs((WindingReading.RatioFrom(TunedCircuit.ResonantFrequency(wanted, c), TunedCircuit.ResonantFrequency(wanted * ratio, c)) / ratio) - 1) < 1e-9;
+        });
+
+    [Fact]
+    [Evidence(typeof(WindingReading), EvidenceKind.IndependentRecomputation)]
+    public void UncertaintyFrom_SimulatedErrors_IsTwiceTheirDeviation()
+    {
+        var random = new SeededRandom(5);
+        double Ratio()
+        {
+            var (f, c) = (random.Normal(1, 0.004), random.Normal(1, 0.01));
+            return 1 / (f * f * c);
+        }
+
+        var ratios = Enumerable.Range(0, 20_000).Select(_ => Ratio()).ToList();
+        var mean = ratios.Average();
+        var deviation = Math.Sqrt(ratios.Average(r => (r - mean) * (r - mean)));
+
+        Assert.Equal(1, WindingReading.UncertaintyFrom(0.004, 0.01) / (2 * deviation), 0.02);
     }
 }
