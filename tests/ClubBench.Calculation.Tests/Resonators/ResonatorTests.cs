@@ -17,6 +17,7 @@ public class ResonatorTests
 
     [Theory]
     [MemberData(nameof(Moves))]
+    [Evidence(typeof(Resonator), EvidenceKind.ClosedFormLimit)]
     public void MovedTo_AnotherBand_KeepsWhatTheMoveSays(ReferenceRow row)
     {
         var start = new Resonator(Inductance.FromMicrohenry(row.Number("inductance_uh")), Capacitance.FromPicofarad(row.Number("capacitance_pf")));
@@ -28,6 +29,7 @@ public class ResonatorTests
     }
 
     [Fact]
+    [Evidence(typeof(Resonator), EvidenceKind.Identity)]
     public void MovedTo_AnyMove_ResonatesAtTheTarget() =>
         Gen.Select(Gen.Double[0.1, 50], Gen.Double[5, 2000], Gen.Double[1, 60], Gen.Enum<ResonatorMove>()).Sample((uh, pf, mhz, move) =>
         {
@@ -46,6 +48,7 @@ public class ResonatorTests
     }
 
     [Fact]
+    [Evidence(typeof(Resonator), EvidenceKind.ClosedFormLimit)]
     public void TryFixedCapacitor_StraysExceedTheTotal_SaysByHowMuch()
     {
         var resonator = new Resonator(Inductance.FromMicrohenry(5), Capacitance.FromPicofarad(25));
@@ -58,6 +61,7 @@ public class ResonatorTests
 
     [Theory]
     [MemberData(nameof(Dividers))]
+    [Evidence(typeof(CapacitiveDivider), EvidenceKind.IndependentRecomputation)]
     public void AtTop_Divider_MatchesComplexArithmetic(ReferenceRow row)
     {
         var divider = new CapacitiveDivider(Capacitance.FromPicofarad(row.Number("top_pf")), Capacitance.FromPicofarad(row.Number("bottom_pf")));
@@ -70,6 +74,7 @@ public class ResonatorTests
     }
 
     [Fact]
+    [Evidence(typeof(CapacitiveDivider), EvidenceKind.IndependentRecomputation)]
     public void AtTop_AnyDivider_EqualsTheNetworkComputedInComplexNumbers() =>
         Gen.Select(Gen.Double[1, 2000], Gen.Double[1, 5000], Gen.Double[5, 5000], Gen.Double[1, 60]).Sample((c1, c2, r, mhz) =>
         {
@@ -82,6 +87,7 @@ public class ResonatorTests
         });
 
     [Fact]
+    [Evidence(typeof(CapacitiveDivider), EvidenceKind.RoundTrip)]
     public void Design_ThenAtTop_ComesBackToWhatWasWanted() =>
         Gen.Select(Gen.Double[20, 400], Gen.Double[1.2, 200], Gen.Double[1.05, 20]).Sample((r, step, excess) =>
         {
@@ -144,6 +150,7 @@ public class ResonatorTests
     }
 
     [Fact]
+    [Evidence(typeof(ResonatorLoading), EvidenceKind.RoundTrip)]
     public void UnloadedQFrom_LossOfAKnownCoil_ReturnsItsQ()
     {
         ResonatorLoading.TryMatchedLoss(20, 120, out var loss);
@@ -171,4 +178,14 @@ public class ResonatorTests
         Assert.Equal(28.6, links.Single(l => l.Turns == 2).ExternalQ, 0.05);
         Assert.Equal(12.7, links.Single(l => l.Turns == 3).ExternalQ, 0.05);
     }
+
+    [Fact]
+    [Evidence(typeof(Resonator), EvidenceKind.RoundTrip)]
+    public void MovedTo_ThereAndBack_IsTheFirstCircuit() =>
+        Gen.Select(Gen.Double[0.1, 50], Gen.Double[5, 2000], Gen.Double[1, 60], Gen.Enum<ResonatorMove>()).Sample((uh, pf, mhz, move) =>
+        {
+            var first = new Resonator(Inductance.FromMicrohenry(uh), Capacitance.FromPicofarad(pf));
+            var back = first.MovedTo(Frequency.FromMegahertz(mhz), move).MovedTo(first.Resonance, move);
+            return Math.Abs((back.Inductance / first.Inductance) - 1) < 1e-12 && Math.Abs((back.Capacitance / first.Capacitance) - 1) < 1e-12;
+        });
 }

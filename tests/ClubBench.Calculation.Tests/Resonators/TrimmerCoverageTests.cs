@@ -13,6 +13,7 @@ public class TrimmerCoverageTests
 
     [Theory]
     [MemberData(nameof(Circuits))]
+    [Evidence(typeof(TrimmerCoverage), EvidenceKind.IndependentRecomputation)]
     public void Coverage_WorstCaseAndYield_MatchTheTable(ReferenceRow row)
     {
         var coverage = TrimmerCoverage.Of(Circuit(row));
@@ -33,9 +34,11 @@ public class TrimmerCoverageTests
     }
 
     [Fact]
+    [Evidence(typeof(TrimmerCoverage), EvidenceKind.Identity)]
     public void Yield_Covered_IsEveryBoard() => Assert.Equal(20_000, TrimmerCoverage.Of(Sound).Yield(1).Count);
 
     [Fact]
+    [Evidence(typeof(TrimmerCoverage), EvidenceKind.RoundTrip)]
     public void CentredFixedCapacitor_Used_MakesMarginsEqual()
     {
         var centred = TrimmerCoverage.Of(Sound).CentredFixedCapacitor!.Value;
@@ -45,6 +48,7 @@ public class TrimmerCoverageTests
     }
 
     [Fact]
+    [Evidence(typeof(TrimmerCoverage), EvidenceKind.RoundTrip)]
     public void NeededTrimmerMaximum_Used_JustCovers()
     {
         var small = Sound with { TrimmerMaximum = Capacitance.FromPicofarad(20) };
@@ -70,6 +74,17 @@ public class TrimmerCoverageTests
     [Fact]
     public void Of_TrimmerUpsideDown_Throws() =>
         Assert.Throws<ArgumentOutOfRangeException>(() => TrimmerCoverage.Of(Sound with { TrimmerMaximum = Capacitance.FromPicofarad(4) }));
+
+    [Fact]
+    [Evidence(typeof(TrimmerCoverage), EvidenceKind.ClosedFormLimit)]
+    public void Margins_PartsWithoutTolerance_AreThePlainDifferences()
+    {
+        var exact = TrimmerCoverage.Of(Sound with { InductanceTolerance = 0, FixedTolerance = 0, StrayMinimum = Capacitance.FromPicofarad(5), StrayMaximum = Capacitance.FromPicofarad(5) });
+        double Needed(double mhz) => 1e12 / (Math.Pow(2 * Math.PI * mhz * 1e6, 2) * 1.4e-6);
+
+        Assert.Equal(Needed(14.35) - (68 + 5 + 5), exact.MarginHighPicofarad, 9);
+        Assert.Equal((68 + 5 + 30) - Needed(14.0), exact.MarginLowPicofarad, 9);
+    }
 
     private static TrimmedCircuit Circuit(ReferenceRow r) => new(
         Inductance.FromMicrohenry(r.Number("inductance_uh")),

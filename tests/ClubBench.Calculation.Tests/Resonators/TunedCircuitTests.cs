@@ -12,6 +12,7 @@ public class TunedCircuitTests
 
     [Theory]
     [MemberData(nameof(Resonances))]
+    [Evidence(typeof(TunedCircuit), EvidenceKind.RoundTrip)]
     public void Resonance_EachOfThree_FollowsFromTheOtherTwo(ReferenceRow row)
     {
         var (l, c) = (Inductance.FromMicrohenry(row.Number("inductance_uh")), Capacitance.FromPicofarad(row.Number("capacitance_pf")));
@@ -24,6 +25,7 @@ public class TunedCircuitTests
     }
 
     [Fact]
+    [Evidence(typeof(TunedCircuit), EvidenceKind.Identity)]
     public void Reactances_AtResonance_AreEqual() =>
         Gen.Select(Gen.Double[0.01, 100], Gen.Double[1, 10_000]).Sample((uh, pf) =>
         {
@@ -33,6 +35,7 @@ public class TunedCircuitTests
         });
 
     [Fact]
+    [Evidence(typeof(TunedCircuit), EvidenceKind.RoundTrip)]
     public void Reactance_ThereAndBack_ReturnsThePart()
     {
         var f = Frequency.FromMegahertz(10.12);
@@ -51,6 +54,7 @@ public class TunedCircuitTests
     }
 
     [Fact]
+    [Evidence(typeof(TunedCircuit), EvidenceKind.ClosedFormLimit)]
     public void Rejection_HalfABandwidthOff_Is3Decibel()
     {
         // Exact 3 dB edges lie where QL (f/f0 - f0/f) = 1.
@@ -62,6 +66,7 @@ public class TunedCircuitTests
     }
 
     [Fact]
+    [Evidence(typeof(TunedCircuit), EvidenceKind.IndependentRecomputation)]
     public void FrequencyShift_SmallChange_MatchesTheDifferenceOfResonances()
     {
         var (l, c) = (Inductance.FromMicrohenry(2), Capacitance.FromPicofarad(100));
