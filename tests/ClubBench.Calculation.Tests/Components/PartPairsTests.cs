@@ -1,4 +1,5 @@
 using ClubBench.Calculation.Components;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Components;
 
@@ -19,6 +20,7 @@ public class PartPairsTests
     }
 
     [Fact]
+    [Evidence(typeof(PartPairs), EvidenceKind.ClosedFormLimit)]
     public void For_DrawerHolds180_Makes360OfTwoEqualParts()
     {
         double[] drawer = [33, 47, 180, 330];
@@ -67,6 +69,7 @@ public class PartPairsTests
     [Theory]
     [InlineData(PairKind.Sum)]
     [InlineData(PairKind.Harmonic)]
+    [Evidence(typeof(PartPair), EvidenceKind.IndependentRecomputation)]
     public void Tolerance_SmallDeviations_IsTheDerivativeOfTheValue(PairKind kind)
     {
         const double Step = 1e-6;
@@ -77,5 +80,52 @@ public class PartPairsTests
     }
 
     [Fact]
+    [Evidence(typeof(PartPairs), EvidenceKind.ClosedFormLimit)]
     public void For_NoParts_IsEmpty() => Assert.Empty(PartPairs.For(100, new([], PairKind.Sum)));
+
+    [Theory]
+    [InlineData(PairKind.Sum)]
+    [InlineData(PairKind.Harmonic)]
+    [Evidence(typeof(PartPairs), EvidenceKind.IndependentRecomputation)]
+    public void For_EveryPairTriedInTwoLoops_HasNoneBetter(PairKind kind)
+    {
+        var parts = PreferredValues.Between(10, 1000, ESeries.E12);
+
+        Gen.Double[20, 900].Sample(wanted =>
+        {
+            var smallest = parts.Min(a => Math.Abs(a - wanted));
+            foreach (var a in parts)
+            {
+                foreach (var b in parts)
+                    smallest = Math.Min(smallest, Math.Abs((kind == PairKind.Sum ? a + b : 1 / ((1 / a) + (1 / b))) - wanted));
+            }
+
+            return Math.Abs(PartPairs.For(wanted, new(parts, kind) { PartTolerance = 0 })[0].Value - wanted) <= smallest + (1e-6 * wanted);
+        });
+    }
+
+    [Fact]
+    [Evidence(typeof(PartPairs), EvidenceKind.Identity)]
+    public void For_MorePartsToChooseFrom_NeverIncreasesTheError() =>
+        Gen.Select(Gen.Double[10, 1000].Array[1, 8], Gen.Double[10, 1000], Gen.Double[20, 900], Gen.Enum<PairKind>()).Sample((parts, extra, wanted, kind) =>
+            Math.Abs(PartPairs.For(wanted, new([.. parts, extra], kind))[0].Error) <= Math.Abs(PartPairs.For(wanted, new(parts, kind))[0].Error) + 1e-6);
+
+    [Fact]
+    [Evidence(typeof(PartPair), EvidenceKind.ClosedFormLimit)]
+    public void ValueAndTolerance_EqualParts_AreDoubleOrHalfAndTheMean()
+    {
+        Assert.Equal((200, 50), (new PartPair(100, 100, PairKind.Sum, 200).Value, new PartPair(100, 100, PairKind.Harmonic, 50).Value));
+        Assert.Equal(0.05, new PartPair(100, 100, PairKind.Sum, 200).Tolerance(0.05, 0.05).WorstCase, 12);
+        Assert.Equal(0.05 / Math.Sqrt(2), new PartPair(100, 100, PairKind.Harmonic, 50).Tolerance(0.05, 0.05).RootSumSquare, 12);
+        Assert.Equal(0.05, new PartPair(100, null, PairKind.Sum, 100).Tolerance(0.05, 1).WorstCase);
+    }
+
+    [Fact]
+    [Evidence(typeof(PartPair), EvidenceKind.Identity)]
+    public void Tolerance_AnyPair_IsNeverAboveTheWiderPartNorTheRootAboveTheWorstCase() =>
+        Gen.Select(Gen.Double[10, 1000], Gen.Double[1, 10], Gen.Double[0.001, 0.2], Gen.Double[0.001, 0.2], Gen.Enum<PairKind>()).Sample((a, b, x, y, kind) =>
+        {
+            var tolerance = new PartPair(a, b, kind, 100).Tolerance(x, y);
+            return tolerance.RootSumSquare <= tolerance.WorstCase && tolerance.WorstCase <= Math.Max(x, y) + 1e-12 && tolerance.WorstCase >= Math.Min(x, y) - 1e-12;
+        });
 }

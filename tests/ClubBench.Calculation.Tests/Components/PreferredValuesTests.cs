@@ -9,6 +9,7 @@ public class PreferredValuesTests
 
     [Theory]
     [MemberData(nameof(Nearest))]
+    [Evidence(typeof(PreferredValues), EvidenceKind.PublishedValue)]
     public void Nearest_BothSenses_MatchTheTable(ReferenceRow row)
     {
         var series = Enum.Parse<ESeries>(row["series"]);
@@ -34,6 +35,7 @@ public class PreferredValuesTests
     }
 
     [Fact]
+    [Evidence(typeof(PreferredValues), EvidenceKind.PublishedValue)]
     public void Mantissas_E192_HasTheExceptionOfTheStandard()
     {
         Assert.Contains(920, PreferredValues.Mantissas(ESeries.E192));
@@ -50,10 +52,12 @@ public class PreferredValuesTests
     }
 
     [Fact]
+    [Evidence(typeof(PreferredValues), EvidenceKind.PublishedValue)]
     public void Mantissas_E96_MiddleOfTheDecade_MatchesThePrintedList() =>
         Assert.Equal([287, 294, 301, 309, 316], PreferredValues.Mantissas(ESeries.E96).Skip(44).Take(5));
 
     [Fact]
+    [Evidence(typeof(PreferredValues), EvidenceKind.Identity)]
     public void Mantissas_CoarserSeries_AreContainedInTheFiner()
     {
         Assert.Equal([10, 22, 47], PreferredValues.Mantissas(ESeries.E3));
@@ -62,6 +66,7 @@ public class PreferredValuesTests
     }
 
     [Fact]
+    [Evidence(typeof(PreferredValues), EvidenceKind.Identity)]
     public void Nearest_AnyValue_IsNoFurtherThanBothNeighbours() =>
         Gen.Select(Gen.Double[1e-13, 1e9], Gen.Enum<ESeries>()).Sample((value, series) =>
         {
@@ -72,6 +77,7 @@ public class PreferredValuesTests
         });
 
     [Fact]
+    [Evidence(typeof(PreferredValues), EvidenceKind.RoundTrip)]
     public void Nearest_OfAMember_IsThatMemberExactly() =>
         Gen.Select(Gen.Int[0, 23], Gen.Int[-12, 6]).Sample((i, decade) =>
         {

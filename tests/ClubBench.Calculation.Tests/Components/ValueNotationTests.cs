@@ -15,6 +15,7 @@ public class ValueNotationTests
 
     [Theory]
     [MemberData(nameof(Texts))]
+    [Evidence(typeof(ValueNotation), EvidenceKind.PublishedValue)]
     public void Parse_Text_GivesValueOrRefusal(ReferenceRow row)
     {
         var read = ValueNotation.Parse(row["text"], Enum.Parse<PartKind>(row["kind"]));
@@ -50,6 +51,7 @@ public class ValueNotationTests
     [InlineData("en-US")]
     [InlineData("de-DE")]
     [InlineData("")]
+    [Evidence(typeof(ValueNotation), EvidenceKind.Identity)]
     public void Parse_AnyCulture_ReadsCommaAsDecimalMark(string culture)
     {
         var before = CultureInfo.CurrentCulture;
@@ -67,6 +69,7 @@ public class ValueNotationTests
     }
 
     [Fact]
+    [Evidence(typeof(ValueNotation), EvidenceKind.RoundTrip)]
     public void Parse_OfWhatFormatWrote_GivesTheValueToThreeDigits() =>
         Gen.Select(Gen.Double[-12, 0], Gen.Enum<PartKind>()).Sample((exponent, kind) =>
         {
@@ -84,12 +87,15 @@ public class ValueNotationTests
     }
 
     [Fact]
+    [Evidence(typeof(ValueNotation), EvidenceKind.Identity)]
     public void Parse_AnyTextOfPrintableCharacters_NeverThrows() =>
         Gen.Select(Gen.String[Gen.Char[' ', '~'], 0, 12], Gen.Enum<PartKind>())
             .Sample((text, kind) => ValueNotation.Parse(text, kind).IsUnderstood == ValueNotation.Parse(text, kind).Si.HasValue);
 
     [Theory]
     [MemberData(nameof(Markings))]
+    [Evidence(typeof(PartMarking), EvidenceKind.PublishedValue)]
+    [Evidence(typeof(PartMarking), EvidenceKind.RoundTrip)]
     public void Marking_BothWays_Agree(ReferenceRow row)
     {
         var (kind, value) = (Enum.Parse<PartKind>(row["kind"]), row.Number("value"));
@@ -113,6 +119,7 @@ public class ValueNotationTests
     }
 
     [Fact]
+    [Evidence(typeof(PartMarking), EvidenceKind.RoundTrip)]
     public void MarkingParse_EveryTwoFigureCapacitor_ComesBack() =>
         Gen.Select(Gen.Int[0, 23], Gen.Int[-1, 6]).Sample((member, zeros) =>
         {
@@ -132,5 +139,19 @@ public class ValueNotationTests
     {
         Assert.Equal((-0.2, 0.8), (ToleranceLetter.Read('Z')!.Value.Below, ToleranceLetter.Read('Z')!.Value.Above));
         Assert.Null(ToleranceLetter.Read('X'));
+    }
+
+    [Fact]
+    [Evidence(typeof(PartMarking), EvidenceKind.IndependentRecomputation)]
+    public void MarkingParse_EveryThreeFigures_IsTheFirstTwoWithThatManyNoughtsBehind()
+    {
+        for (var code = 100; code < 1000; code++)
+        {
+            var text = code.ToString(CultureInfo.InvariantCulture);
+            var picofarad = decimal.Parse(text[..2] + new string('0', text[2] - '0'), CultureInfo.InvariantCulture);
+
+            Assert.Equal(1, PartMarking.Parse(text, PartKind.Capacitor).Si!.Value * 1e12 / (double)picofarad, 12);
+            Assert.Equal((double)picofarad, PartMarking.Parse(text, PartKind.Resistor).Si!.Value, 1e-6);
+        }
     }
 }

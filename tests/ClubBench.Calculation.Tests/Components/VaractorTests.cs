@@ -21,6 +21,7 @@ public class VaractorTests
     }
 
     [Fact]
+    [Evidence(typeof(Varactor), EvidenceKind.RoundTrip)]
     public void TryFit_ThenAt_PassesThroughBothPoints() =>
         Gen.Select(Gen.Double[0, 3], Gen.Double[0.5, 10], Gen.Double[5, 50], Gen.Double[1.2, 6]).Sample((v, dv, pf, ratio) =>
         {
@@ -37,6 +38,7 @@ public class VaractorTests
     }
 
     [Fact]
+    [Evidence(typeof(Varactor), EvidenceKind.ClosedFormLimit)]
     public void BackToBackAt_AnyVoltage_IsHalf() =>
         Assert.Equal(36, new Varactor(Capacitance.FromPicofarad(72), 0.5).BackToBackAt(Voltage.FromVolt(0)).Picofarad, 9);
 
@@ -46,6 +48,25 @@ public class VaractorTests
         Assert.True(Varactor.WouldConduct(Voltage.FromVolt(1), Voltage.FromVolt(1.8)));
         Assert.False(Varactor.WouldConduct(Voltage.FromVolt(1), Voltage.FromVolt(1.6)));
     }
+
+    [Fact]
+    [Evidence(typeof(Varactor), EvidenceKind.ClosedFormLimit)]
+    public void At_NoVoltageAndTheBuiltInOne_AreTheWholeAndItsRootShare()
+    {
+        var abrupt = new Varactor(Capacitance.FromPicofarad(72), 0.5);
+
+        Assert.Equal(72, abrupt.At(default).Picofarad, 12);
+        Assert.Equal(72 / Math.Sqrt(2), abrupt.At(Varactor.BuiltIn).Picofarad, 9);
+    }
+
+    [Fact]
+    [Evidence(typeof(Varactor), EvidenceKind.Identity)]
+    public void At_MoreVoltage_FallsMoreSteeplyTheLargerTheExponent() =>
+        Gen.Select(Gen.Double[0.3, 2], Gen.Double[0, 10], Gen.Double[0.1, 10]).Sample((exponent, volt, more) =>
+        {
+            double Fall(double m) => new Varactor(Capacitance.FromPicofarad(50), m).At(Voltage.FromVolt(volt + more)) / new Varactor(Capacitance.FromPicofarad(50), m).At(Voltage.FromVolt(volt));
+            return Fall(exponent) < 1 && Math.Abs(Fall(2 * exponent) - (Fall(exponent) * Fall(exponent))) < 1e-12;
+        });
 
     private static VaractorPoint Point(double volt, double picofarad) => new(Voltage.FromVolt(volt), Capacitance.FromPicofarad(picofarad));
 }
