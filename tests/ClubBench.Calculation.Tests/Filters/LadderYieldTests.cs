@@ -6,12 +6,14 @@ namespace ClubBench.Calculation.Tests.Filters;
 
 public class LadderYieldTests
 {
+    // Shares of good boards as tests/Recomputed/ladder_stress_and_yield.py finds them.
     [Theory]
     [InlineData(0.05, 0.05, 0.904)]
     [InlineData(0.10, 0.05, 0.649)]
     [InlineData(0.05, 0.02, 0.998)]
     [InlineData(0.03, 0.02, 1.000)]
-    public void Of_IndependentParts_MatchesPublishedYields(double coil, double capacitor, double expected)
+    [Evidence(typeof(LadderYield), EvidenceKind.IndependentRecomputation)]
+    public void Of_IndependentParts_MatchesNodalAnalysis(double coil, double capacitor, double expected)
     {
         var result = LadderYield.Of(Question(new(capacitor, 0, coil)));
 
@@ -28,6 +30,8 @@ public class LadderYieldTests
     }
 
     [Fact]
+    [Evidence(typeof(LadderYield), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(LowPassFigures), EvidenceKind.IndependentRecomputation)]
     public void Of_NoScatter_IsTheAnalysedFilter()
     {
         var question = Question(new(0, 0, 0)) with { Trials = 100 };
@@ -42,6 +46,8 @@ public class LadderYieldTests
     }
 
     [Fact]
+    [Evidence(typeof(LadderYield), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(LowPassFigures), EvidenceKind.IndependentRecomputation)]
     public void Of_UnequalEnds_IsTheAnalysedFilter()
     {
         var unequal = new LowPassDesign(F7.Form, F7.Capacitors, F7.Coils, FiftyOhm, Resistance.FromOhm(80));
@@ -53,6 +59,7 @@ public class LadderYieldTests
     }
 
     [Fact]
+    [Evidence(typeof(LadderYield), EvidenceKind.Identity)]
     public void Of_OneBatchInsteadOfIndependentCoils_WidensTheScatter()
     {
         var requirement = Question(new(0, 0, 0)).Requirement with { ReturnLoss = Decibels.FromDb(10) };
@@ -64,6 +71,7 @@ public class LadderYieldTests
     }
 
     [Fact]
+    [Evidence(typeof(LadderYield), EvidenceKind.Identity)]
     public void Of_TwoBatchesOfOneCoilEach_IsTheIndependentCase()
     {
         var two = LadderYield.Of(Question(new(0.05, 0.05, 0)) with { CoreBatches = [0, 1] });

@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Filters;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
 
 namespace ClubBench.Calculation.Tests.Filters;
@@ -14,6 +15,7 @@ public class LowPassPrototypeTests
 
     [Theory]
     [MemberData(nameof(Chebyshev))]
+    [Evidence(typeof(LowPassPrototype), EvidenceKind.PublishedValue)]
     public void Chebyshev_OrderAndRipple_MatchesTheRow(ReferenceRow row)
     {
         var ripple = PassBandRipple.FromRipple(Decibels.FromDb(row.Number("ripple_db")));
@@ -32,6 +34,8 @@ public class LowPassPrototypeTests
     [Theory]
     [InlineData(LowPassForm.ShuntCapacitorFirst)]
     [InlineData(LowPassForm.SeriesInductorFirst)]
+    [Evidence(typeof(LowPassPrototype), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(LowPassDesign), EvidenceKind.RoundTrip)]
     public void Denormalise_EvenOrder_HasItsRippleBetweenTheToldResistances(LowPassForm form)
     {
         var prototype = LowPassPrototype.Chebyshev(4, PassBandRipple.FromRipple(Decibels.FromDb(0.1)));
@@ -59,6 +63,7 @@ public class LowPassPrototypeTests
     [Theory]
     [InlineData(5, 30.1072)]
     [InlineData(7, 42.1445)]
+    [Evidence(typeof(LowPassPrototype), EvidenceKind.ClosedFormLimit)]
     public void Attenuation_ButterworthAtTwiceTheEdge_MatchesPublishedFigures(int order, double db) =>
         Assert.Equal(db, LowPassPrototype.Butterworth(order).Attenuation(2).Db, 1e-4);
 
@@ -79,6 +84,8 @@ public class LowPassPrototypeTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassPrototype), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(LowPassDesign), EvidenceKind.RoundTrip)]
     public void Denormalise_Ladder_HasTheAttenuationOfThePrototype()
     {
         var prototype = LowPassPrototype.Chebyshev(7, PassBandRipple.FromRipple(Decibels.FromDb(0.01)));
@@ -89,6 +96,8 @@ public class LowPassPrototypeTests
 
     [Theory]
     [MemberData(nameof(Ripple))]
+    [Evidence(typeof(PassBandRipple), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(PassBandRipple), EvidenceKind.RoundTrip)]
     public void PassBandRipple_FromEachDress_IsOneFigure(ReferenceRow row)
     {
         var ripple = PassBandRipple.FromReflection(row.Number("reflection"));
@@ -122,6 +131,30 @@ public class LowPassPrototypeTests
     [Fact]
     public void Chebyshev_RippleAboveThreeDecibels_Throws() =>
         Assert.Throws<ArgumentOutOfRangeException>(() => LowPassPrototype.Chebyshev(5, PassBandRipple.FromRipple(Decibels.FromDb(3.5))));
+
+    [Theory]
+    [InlineData(0.3)]
+    [InlineData(1)]
+    [InlineData(1.5)]
+    [InlineData(3)]
+    [Evidence(typeof(LowPassPrototype), EvidenceKind.ClosedFormLimit)]
+    public void Attenuation_ChebyshevOfOrderThree_IsThePolynomialWrittenOut(double x)
+    {
+        var ripple = PassBandRipple.FromReflection(0.1);
+        var shape = ripple.Epsilon * ((4 * x * x * x) - (3 * x));
+
+        Assert.Equal(10 * Math.Log10(1 + (shape * shape)), LowPassPrototype.Chebyshev(3, ripple).Attenuation(x).Db, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(PassBandRipple), EvidenceKind.Identity)]
+    public void PassBandRipple_AnyReflection_SharesThePowerBetweenReflectedAndPassed() =>
+        Gen.Double[0.001, 0.9].Sample(reflection =>
+        {
+            var ripple = PassBandRipple.FromReflection(reflection);
+            return Math.Abs((-ripple.Ripple).PowerRatio + (-ripple.ReturnLoss).PowerRatio - 1) < 1e-12
+                && Math.Abs((ripple.Epsilon * ripple.Epsilon) - (ripple.Ripple.PowerRatio - 1)) < 1e-9;
+        });
 
     private static void Parts(double[] expected, IEnumerable<double> actual)
     {

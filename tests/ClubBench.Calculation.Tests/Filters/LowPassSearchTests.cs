@@ -40,6 +40,7 @@ public class LowPassSearchTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassSearch), EvidenceKind.RoundTrip)]
     public void Run_LosslessParts_RankingMarginIsTheMarginOfTheAnalysedLadder()
     {
         var result = LowPassSearch.Run(Question(F14, E24, 0.12, false, 3.0, Band20m));
@@ -64,6 +65,7 @@ public class LowPassSearchTests
     [InlineData(5, 0.14)]
     [InlineData(7, 0.12)]
     [InlineData(9, 0.06)]
+    [Evidence(typeof(LowPassSearch), EvidenceKind.Identity)]
     public void Run_Symmetric_IsTheUnrestrictedSearchAmongMirroredCombinations(int order, double window)
     {
         var exact = LowPassPrototype.Chebyshev(order, PassBandRipple.FromRipple(Decibels.FromDb(0.01))).Denormalise(Frequency.FromMegahertz(15.5), FiftyOhm);
@@ -79,6 +81,7 @@ public class LowPassSearchTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassSearch), EvidenceKind.IndependentRecomputation)]
     public void Run_EveryCombinationByHand_HasNoneBetter()
     {
         var question = Question(F7, E12, 0.15, false, 4.0, Band40m);
@@ -104,6 +107,7 @@ public class LowPassSearchTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassSearch), EvidenceKind.Identity)]
     public void Run_MoreThanAllowed_ThinsAndSaysSo()
     {
         var full = Question(F7, E12, 0.12, true, 4.0, Band40m);
@@ -149,6 +153,7 @@ public class LowPassSearchTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassCandidates), EvidenceKind.ClosedFormLimit)]
     public void Capacitors_EqualSums_KeepTheSinglePart()
     {
         var choices = LowPassCandidates.Capacitors(Capacitance.FromPicofarad(220), Values(E12), 0.01, pairs: true);

@@ -18,6 +18,9 @@ public class LadderTests
 
     [Theory]
     [MemberData(nameof(Nodal))]
+    [Evidence(typeof(Ladder), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(LadderElement), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
     public void At_SameNetworkByNodalAnalysis_AgreesToRounding(ReferenceRow row)
     {
         var ladder = new Ladder(row["elements"].Split(';').Select(Element));
@@ -80,6 +83,8 @@ public class LadderTests
     }
 
     [Fact]
+    [Evidence(typeof(Ladder), EvidenceKind.Identity)]
+    [Evidence(typeof(TwoPort), EvidenceKind.Identity)]
     public void At_AnyPassiveLadder_IsReciprocalAndLosslessOnesKeepTheEnergy()
     {
         foreach (var f in FrequencyRange.FromMegahertz(1, 60).Points(40))
@@ -95,6 +100,8 @@ public class LadderTests
     }
 
     [Fact]
+    [Evidence(typeof(Ladder), EvidenceKind.Identity)]
+    [Evidence(typeof(TwoPort), EvidenceKind.Identity)]
     public void S22_ReversedLadder_IsItsS11()
     {
         var ladder = new Ladder(F7.ToLadder(150).Elements.Take(4));
@@ -106,6 +113,8 @@ public class LadderTests
     }
 
     [Fact]
+    [Evidence(typeof(LadderElement), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(Ladder), EvidenceKind.ClosedFormLimit)]
     public void Loss_AtAnUnmovedNotchWithoutLosses_StaysFinite()
     {
         var (coil, capacitor) = (Inductance.FromMicrohenry(1), Capacitance.FromPicofarad(100));
@@ -119,6 +128,7 @@ public class LadderTests
     }
 
     [Fact]
+    [Evidence(typeof(Ladder), EvidenceKind.ClosedFormLimit)]
     public void CutOff3dB_Chebyshev_IsTheClosedForm()
     {
         var prototype = LowPassPrototype.Chebyshev(5, PassBandRipple.FromReflection(0.1));

@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Networks;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
 
 namespace ClubBench.Calculation.Tests.Networks;
@@ -21,6 +22,7 @@ public class ResistivePadTests
     [Theory]
     [InlineData(PadForm.Pi, 3)]
     [InlineData(PadForm.Tee, 10)]
+    [Evidence(typeof(ResistivePad), EvidenceKind.RoundTrip)]
     public void Attenuation_OfTheDesignedPad_ComesBack(PadForm form, double db)
     {
         var pad = ResistivePad.For(form, Decibels.FromDb(db), FiftyOhm);
@@ -46,4 +48,28 @@ public class ResistivePadTests
     [InlineData(20, 0.82)]
     public void InputResistorShare_Pi_GrowsWithTheAttenuation(double db, double share) =>
         Assert.Equal(share, ResistivePad.For(PadForm.Pi, Decibels.FromDb(db), FiftyOhm).InputResistorShare, 0.005);
+
+    [Theory]
+    [InlineData(0.1)]
+    [InlineData(3)]
+    [InlineData(10)]
+    [InlineData(60)]
+    [Evidence(typeof(ResistivePad), EvidenceKind.ClosedFormLimit)]
+    public void InputResistorShare_MatchedPi_IsTheRatioOfDifferenceAndSum(double db)
+    {
+        var k = Math.Pow(10, db / 20);
+
+        Assert.Equal((k - 1) / (k + 1), ResistivePad.For(PadForm.Pi, Decibels.FromDb(db), FiftyOhm).InputResistorShare, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(ResistivePad), EvidenceKind.Identity)]
+    public void For_PiAndTee_AreStarAndDeltaOfEachOther() =>
+        Gen.Select(Gen.Double[0.1, 60], Gen.Double[10, 600]).Sample((db, ohm) =>
+        {
+            var pi = ResistivePad.For(PadForm.Pi, Decibels.FromDb(db), Resistance.FromOhm(ohm));
+            var tee = ResistivePad.For(PadForm.Tee, Decibels.FromDb(db), Resistance.FromOhm(ohm));
+            var sum = (2 * pi.Outer.Ohm) + pi.Inner.Ohm;
+            return Math.Abs((tee.Outer.Ohm * sum / (pi.Outer.Ohm * pi.Inner.Ohm)) - 1) < 1e-9 && Math.Abs((tee.Inner.Ohm * sum / (pi.Outer.Ohm * pi.Outer.Ohm)) - 1) < 1e-9;
+        });
 }
