@@ -4,6 +4,7 @@ using ClubBench.Calculation.Tables;
 
 namespace ClubBench.Calculation.Tests.Bands;
 
+/// <summary>Edges are those of the ITU Radio Regulations, Article 5, table of allocations; segments and centres those of the IARU Region 1 HF band plan.</summary>
 public class AmateurBandsTests
 {
     [Fact]
@@ -16,16 +17,19 @@ public class AmateurBandsTests
     [InlineData("40 m", ItuRegion.Region1, 7.0, 7.2)]
     [InlineData("40 m", ItuRegion.Region2, 7.0, 7.3)]
     [InlineData("160 m", ItuRegion.Region1, 1.81, 1.85)]
+    [Evidence(typeof(AmateurBands), EvidenceKind.PublishedValue)]
     public void Allocation_BandInARegion_JoinsItsParts(string band, ItuRegion region, double low, double high) =>
         Assert.Equal(FrequencyRange.FromMegahertz(low, high), AmateurBands.Allocation(band, region)!.Range);
 
     [Fact]
+    [Evidence(typeof(AmateurBands), EvidenceKind.Identity)]
     public void Allocation_EveryBandAndRegion_HasPartsThatAdjoin() =>
         Assert.All(
             from n in AmateurBands.Names from r in Regions select AmateurBands.Allocation(n, r)!,
             a => Assert.All(a.Parts.Zip(a.Parts.Skip(1)), p => Assert.Equal(p.First.Range.High, p.Second.Range.Low)));
 
     [Fact]
+    [Evidence(typeof(AmateurBands), EvidenceKind.Identity)]
     public void Segments_EveryPlanRow_LiesInsideItsAllocation() =>
         Assert.All(
             AmateurBands.All.Where(s => s.Use >= BandUse.CwSegment),
@@ -35,6 +39,7 @@ public class AmateurBandsTests
     [InlineData("20 m", 14.0, 14.07, 14.06)]
     [InlineData("40 m", 7.0, 7.04, 7.03)]
     [InlineData("30 m", 10.1, 10.13, 10.116)]
+    [Evidence(typeof(AmateurBands), EvidenceKind.PublishedValue)]
     public void CwSegmentAndCentre_Region1_AreThoseOfThePlan(string band, double low, double high, double centre)
     {
         Assert.Equal(FrequencyRange.FromMegahertz(low, high), AmateurBands.CwSegment(band, ItuRegion.Region1)!.Range);
@@ -75,4 +80,11 @@ public class AmateurBandsTests
     public void All_Rows_NameAResolvableSource() => Assert.All(AmateurBands.All, s => Assert.NotNull(Sources.Find(s.Source.SourceId)));
 
     private static IEnumerable<ItuRegion> Regions => [ItuRegion.Region1, ItuRegion.Region2, ItuRegion.Region3];
+
+    [Fact]
+    [Evidence(typeof(AmateurBands), EvidenceKind.RoundTrip)]
+    public void Containing_EdgesAndMiddleOfEveryPart_NameTheBandAgain() =>
+        Assert.All(
+            from n in AmateurBands.Names from r in Regions from p in AmateurBands.Allocation(n, r)!.Parts from f in new[] { p.Range.Low, p.Range.Middle, p.Range.High } select (n, r, f),
+            x => Assert.Equal(x.n, AmateurBands.Containing(x.f, x.r)!.Band));
 }

@@ -27,6 +27,7 @@ public class SwitchingTests
     public void SeriesTunedTap_On30m_IsBroad() => Assert.Equal(2.594e6, Tap(10.12).BandwidthHertz, 2.594e6 * 0.005);
 
     [Fact]
+    [Evidence(typeof(SeriesTunedTap), EvidenceKind.Identity)]
     public void SeriesTunedTap_CoilScaledWithTheBand_KeepsItsReactance()
     {
         var scaled = new SeriesTunedTap(Inductance.FromMicrohenry(6.8 / 2), 40, Frequency.FromMegahertz(14.06), FiftyOhm, FiftyOhm);
@@ -36,6 +37,7 @@ public class SwitchingTests
     }
 
     [Fact]
+    [Evidence(typeof(SeriesTunedTap), EvidenceKind.Identity)]
     public void DiodeCurrent_HigherStandingWave_GrowsWithItsRoot() =>
         Assert.Equal(2 * Tap(7).DiodeCurrent(Power.FromWatt(1)).Ampere, Tap(7).DiodeCurrent(Power.FromWatt(1), 4).Ampere, 1e-12);
 
@@ -43,7 +45,8 @@ public class SwitchingTests
     [InlineData(3.5, 2.46, DiodeSwitchVerdict.CheckHarmonics)]
     [InlineData(14, 9.83, DiodeSwitchVerdict.Clean)]
     [InlineData(1.8, 1.264, DiodeSwitchVerdict.Unsuitable)]
-    public void DiodeSwitch_FiveWatt_MatchesPublishedRatios(double megahertz, double ratio, DiodeSwitchVerdict verdict)
+    [Evidence(typeof(DiodeSwitch), EvidenceKind.ClosedFormLimit)]
+    public void DiodeSwitch_FiveWatt_IsJudgedByItsChargeRatio(double megahertz, double ratio, DiodeSwitchVerdict verdict)
     {
         var f = Frequency.FromMegahertz(megahertz);
 
@@ -58,13 +61,14 @@ public class SwitchingTests
     [Theory]
     [InlineData(3.5, 47.1)]
     [InlineData(14, 35.1)]
-    public void OffIsolation_TwoPicofarad_MatchesPublishedFigures(double megahertz, double db) =>
+    public void OffIsolation_TwoPicofarad_FallsTwelveDecibelsInTwoOctaves(double megahertz, double db) =>
         Assert.Equal(db, DiodeSwitch.OffIsolation(Capacitance.FromPicofarad(2), FiftyOhm, Frequency.FromMegahertz(megahertz)).Db, 0.05);
 
     [Theory]
     [InlineData(10, 5, 45, true)]
     [InlineData(15, 5, 40, false)]
     [InlineData(70, 5, 0, false)]
+    [Evidence(typeof(SwitchSequence), EvidenceKind.ClosedFormLimit)]
     public void SwitchSequence_RelayAndRise_ShortenTheFirstDot(double relayMs, double riseMs, double leftMs, bool keeps)
     {
         var dot = Duration.FromMillisecond(60);
