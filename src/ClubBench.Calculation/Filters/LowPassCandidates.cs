@@ -1,3 +1,4 @@
+using ClubBench.Calculation.Components;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Filters;
@@ -28,7 +29,8 @@ public static class LowPassCandidates
             .Select(g => g.OrderBy(c => c.Parts).ThenBy(c => c.StockRank).ThenBy(c => c.First).First())
             .OrderBy(c => c.Value)];
 
-        bool IsNear(Capacitance value) => Math.Abs((value / exact) - 1) <= window;
+        // A part on the edge of the window is inside, whatever the last bit of the quotient says.
+        bool IsNear(Capacitance value) => Math.Abs((value / exact) - 1) <= window + PreferredValues.SameValue;
     }
 
     /// <summary>Whole turns around the exact value: the two neighbours, and two each side below ten turns, where one turn is a coarse step.</summary>

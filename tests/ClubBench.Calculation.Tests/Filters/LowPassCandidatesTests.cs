@@ -18,11 +18,18 @@ public class LowPassCandidatesTests
             foreach (var a in Picofarads.Append(0))
             {
                 foreach (var b in Picofarads)
-                    if (Math.Abs(a + b - exact) <= window * exact) sums.Add((long)Math.Round((a + b) * 1000));
+                    if (Math.Abs(a + b - exact) <= (window + 1e-9) * exact) sums.Add((long)Math.Round((a + b) * 1000));
             }
 
             return sums.SequenceEqual(Candidates(exact, window, pairs: true).Select(c => (long)Math.Round(c.Value.Picofarad * 1000)));
         });
+
+    [Theory]
+    [InlineData(100, 0.1, 110)]
+    [InlineData(100, 0.12, 112)]
+    [InlineData(100, 0.1, 90)]
+    public void Capacitors_PartOnTheEdgeOfTheWindow_IsInside(double exact, double window, double part) =>
+        Assert.Single(LowPassCandidates.Capacitors(Capacitance.FromPicofarad(exact), [(Capacitance.FromPicofarad(part), 0)], window, pairs: false));
 
     [Fact]
     [Evidence(typeof(LowPassCandidates), EvidenceKind.Identity)]
@@ -30,7 +37,7 @@ public class LowPassCandidatesTests
         Gen.Select(Gen.Double[30, 800], Gen.Double[0.01, 0.1], Gen.Double[1, 4]).Sample((exact, window, wider) =>
         {
             var narrow = Candidates(exact, window, pairs: false);
-            return narrow.All(c => Math.Abs((c.Value.Picofarad / exact) - 1) <= window + 1e-12)
+            return narrow.All(c => Math.Abs((c.Value.Picofarad / exact) - 1) <= window + 1.1e-9)
                 && !narrow.Except(Candidates(exact, window * wider, pairs: false)).Any() && !narrow.Except(Candidates(exact, window, pairs: true)).Any();
         });
 
