@@ -1,5 +1,6 @@
-"""Stress and yield of the five-element Chebyshev filter (20 dB return loss, edge 8.0 MHz, 50 ohm) by nodal analysis, a second route
-beside the chain matrix of the product. Prints what the tests of stress and yield expect. Run: python3 ladder_stress_and_yield.py"""
+"""Stress, yield, input impedance and slopes of the five-element Chebyshev filter (20 dB return loss, edge 8.0 MHz, 50 ohm) by nodal
+analysis, a second route beside the chain matrix of the product; two resistive pads. Prints what the tests expect. Run: python3 ladder_stress_and_yield.py"""
+import cmath
 import math
 import random
 
@@ -59,8 +60,45 @@ def share_good(coil, capacitor, boards=4000):
     return sum(good(filter_arms([1 + draw.uniform(-1, 1) * (coil if k % 2 else capacitor) for k in range(5)])) for _ in range(boards)) / boards
 
 
+def lossless(elements, frequency_hz, source_ohm, load_ohm):
+    """Loss, return loss and the voltage at the load for one volt, lossless parts."""
+    _, v = node_voltages(elements, frequency_hz, source_ohm, load_ohm, 1)
+    passed = abs(2 * v[-1]) * math.sqrt(source_ohm / load_ohm)
+    return -20 * math.log10(passed), -20 * math.log10(abs(2 * v[0] - 1)), v[-1]
+
+
+def input_impedance(load_ohm):
+    _, v = node_voltages(filter_arms(coil_q=0, capacitor_q=0), 7.1e6, 50, load_ohm, 1)
+    return v[0] / ((1 - v[0]) / 50)
+
+
+def group_delay(frequency_hz, step=1e-5):
+    ratio = (lossless(filter_arms(coil_q=0, capacitor_q=0), frequency_hz * (1 + step), 50, 50)[2]
+             / lossless(filter_arms(coil_q=0, capacitor_q=0), frequency_hz * (1 - step), 50, 50)[2])
+    return -cmath.phase(ratio) / (2 * math.pi * frequency_hz * 2 * step)
+
+
+def gain_slopes(frequency_hz, step=1e-5):
+    """dB for one per cent more of the first three parts."""
+    def gain(k, factor):
+        return -lossless(filter_arms([factor if i == k else 1 for i in range(5)], 0, 0), frequency_hz, 50, 50)[0]
+    return [round((gain(k, 1 + step) - gain(k, 1 - step)) / (2 * step) / 100, 5) for k in range(3)]
+
+
+def pad(outer, inner):
+    y = [[1 / 50 + 1 / outer + 1 / inner, -1 / inner], [-1 / inner, 1 / 50 + 1 / outer + 1 / inner]]
+    v = solve(y, [1 / 50, 0])
+    return -20 * math.log10(2 * v[1]), -20 * math.log10(abs(2 * v[0] - 1))
+
+
 if __name__ == "__main__":
     print("50 ohm", *stress(50))
     print("25 ohm", *stress(25))
     for tolerances in ((0.05, 0.05), (0.10, 0.05), (0.05, 0.02), (0.03, 0.02)):
         print("coils and capacitors", tolerances, share_good(*tolerances))
+    print("input impedance", *(complex(round(z.real, 3), round(z.imag, 3)) for z in map(input_impedance, (25, 50 + 20j, 50))))
+    for source, load in ((50, 25), (50, 100), (12.5, 50)):
+        print("ends", source, load, *(round(x, 4) for x in lossless(filter_arms(coil_q=0, capacitor_q=0), 7.1e6, source, load)[:2]))
+    print("group delay, ns", *(round(1e9 * group_delay(f), 3) for f in (1.0e6, 7.1e6, 8.0e6)))
+    print("slopes of the gain", *map(gain_slopes, (7.3e6, 8.0e6, 14.2e6)))
+    print("pads", *(tuple(round(x, 3) for x in pad(*p)) for p in ((300, 18), (62, 240))))

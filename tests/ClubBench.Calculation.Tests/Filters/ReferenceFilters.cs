@@ -14,7 +14,7 @@ internal static class ReferenceFilters
     /// <summary>Chebyshev 7, 0.01 dB ripple, edge 15.5 MHz: exact values.</summary>
     public static LowPassDesign F14 => LowPassPrototype.Chebyshev(7, PassBandRipple.FromRipple(Decibels.FromDb(0.01))).Denormalise(Frequency.FromMegahertz(15.5), FiftyOhm);
 
-    /// <summary>Kit A as published, 30 m.</summary>
+    /// <summary>Kit A on 30 m.</summary>
     public static LowPassDesign Seven30 => Of([270, 510, 510, 270], [0.900, 1.024, 0.900]);
 
     /// <summary>Kit A converted to 20 m.</summary>

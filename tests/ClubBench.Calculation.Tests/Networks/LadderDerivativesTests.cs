@@ -10,18 +10,18 @@ public class LadderDerivativesTests
     [InlineData(1.0, 64.544)]
     [InlineData(7.1, 90.059)]
     [InlineData(8.0, 113.384)]
-    public void GroupDelay_ChebyshevFive_MatchesPublishedFigures(double megahertz, double nanosecond) =>
+    public void GroupDelay_ChebyshevFive_MatchesDifferencesOfNodalAnalysis(double megahertz, double nanosecond) =>
         Assert.Equal(nanosecond, Derivatives(F7.ToLadder(), megahertz).GroupDelaySecond * 1e9, nanosecond * 1e-3);
 
     [Theory]
     [InlineData(7.3, -0.00196, 0.00121, 0.00579)]
     [InlineData(8.0, 0.00354, -0.00662, -0.01555)]
     [InlineData(14.2, -0.07316, -0.12635, -0.12500)]
-    public void Sensitivities_ChebyshevFive_MatchPublishedFigures(double megahertz, double end, double coil, double middle)
+    public void Sensitivities_ChebyshevFive_MatchDifferencesOfNodalAnalysis(double megahertz, double end, double coil, double middle)
     {
         var arms = Derivatives(F7.ToLadder(), megahertz).Sensitivities;
 
-        // The published figures are slopes of the gain, the product tells slopes of the loss.
+        // The figures are slopes of the gain (tests/Recomputed/ladder_stress_and_yield.py), the product tells slopes of the loss.
         Assert.Equal(-end, arms[0].LossPerPercentCapacitor!.Value.Db, 2e-4);
         Assert.Equal(-coil, arms[1].LossPerPercentCoil!.Value.Db, 2e-4);
         Assert.Equal(-middle, arms[2].LossPerPercentCapacitor!.Value.Db, 2e-4);

@@ -34,7 +34,7 @@ public class LadderTests
 
     [Theory]
     [MemberData(nameof(Chebyshev5))]
-    public void Loss_PublishedFilter_MatchesTheRow(ReferenceRow row)
+    public void Loss_ChebyshevFive_MatchesTheRow(ReferenceRow row)
     {
         var f = Frequency.FromMegahertz(row.Number("frequency_mhz"));
 
@@ -59,22 +59,26 @@ public class LadderTests
             Assert.Equal(row.Number(column), ladder.Loss(f.Harmonic(n), FiftyOhm, FiftyOhm).Db, Math.Max(row.Number("tolerance"), PrintedHalfUnit(row[column])));
     }
 
+    // As tests/Recomputed/ladder_stress_and_yield.py finds them.
     [Theory]
     [InlineData(25, 0, 24.823, -4.153)]
     [InlineData(50, 20, 52.895, 12.836)]
     [InlineData(50, 0, 49.378, -7.301)]
-    public void InputImpedance_ChebyshevFive_MatchesPublishedFigures(double loadOhm, double loadReactanceOhm, double ohm, double reactanceOhm)
+    [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
+    public void InputImpedance_ChebyshevFive_MatchesNodalAnalysis(double loadOhm, double loadReactanceOhm, double ohm, double reactanceOhm)
     {
         var z = F7.ToLadder().At(Frequency.FromMegahertz(7.1)).InputImpedance(new Complex(loadOhm, loadReactanceOhm));
 
         Close(new Complex(ohm, reactanceOhm), z, 1e-3);
     }
 
+    // As tests/Recomputed/ladder_stress_and_yield.py finds them.
     [Theory]
     [InlineData(50, 25, 0.5352, 9.357)]
     [InlineData(50, 100, 0.5402, 9.320)]
     [InlineData(12.5, 50, 1.9658, 4.388)]
-    public void Loss_UnequalEnds_MatchesPublishedFigures(double sourceOhm, double loadOhm, double lossDb, double returnLossDb)
+    [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
+    public void Loss_UnequalEnds_MatchesNodalAnalysis(double sourceOhm, double loadOhm, double lossDb, double returnLossDb)
     {
         var chain = F7.ToLadder().At(Frequency.FromMegahertz(7.1));
 
