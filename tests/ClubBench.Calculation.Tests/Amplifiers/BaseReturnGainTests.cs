@@ -11,10 +11,12 @@ public class BaseReturnGainTests
     private static readonly Resistance Fitted = Resistance.FromOhm(33);
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.RoundTrip)]
     public void DriveNeeded_AtTheKnownPoint_IsTheKnownDrive() =>
         Assert.Equal(80, Model().DriveNeeded(Design, Fitted).Milliwatt, 1e-9);
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.ClosedFormLimit)]
     public void LostByMoving_FarAboveTheGainsCorner_MatchesTheKitSheetAndTheLimit()
     {
         var lost = Model(currentGain: 10_000).LostByMoving(Design, Frequency.FromMegahertz(14.06)).Db;
@@ -28,6 +30,7 @@ public class BaseReturnGainTests
         Assert.True(Model(63).LostByMoving(Design, Frequency.FromMegahertz(14.06)) < Model(10_000).LostByMoving(Design, Frequency.FromMegahertz(14.06)));
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.Identity)]
     public void DriveNeeded_LargerResistor_AlwaysNeedsLess()
     {
         var needed = Enumerable.Range(1, 50).Select(k => Model().DriveNeeded(Frequency.FromMegahertz(14), Resistance.FromOhm(10 * k)).Watt).ToList();
@@ -36,6 +39,7 @@ public class BaseReturnGainTests
     }
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.ClosedFormLimit)]
     public void DriveNeeded_VeryLargeResistor_LeavesTheTransistorsShare()
     {
         var lost = 1.6 * 1.6 / (2 * 33) * 1000;
@@ -44,6 +48,7 @@ public class BaseReturnGainTests
     }
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.Identity)]
     public void Bought_AndMissing_AddUp()
     {
         var (f, larger) = (Frequency.FromMegahertz(14.06), Resistance.FromOhm(68));
@@ -54,6 +59,7 @@ public class BaseReturnGainTests
     }
 
     [Fact]
+    [Evidence(typeof(BaseReturnGain), EvidenceKind.RoundTrip)]
     public void ReturnFor_EnoughDrive_RoundTrips()
     {
         var f = Frequency.FromMegahertz(14.06);

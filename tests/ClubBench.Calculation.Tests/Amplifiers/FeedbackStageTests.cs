@@ -2,6 +2,7 @@ using ClubBench.Calculation.Amplifiers;
 using ClubBench.Calculation.Devices;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tests.Devices;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Amplifiers;
 
@@ -12,6 +13,7 @@ public class FeedbackStageTests
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("feedback_stage");
 
     [Theory]
+    [Evidence(typeof(FeedbackStage), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
     public void TryCreate_EmitterAndLoad_MatchesTheRow(ReferenceRow row)
     {
@@ -41,6 +43,7 @@ public class FeedbackStageTests
     }
 
     [Fact]
+    [Evidence(typeof(FeedbackStage), EvidenceKind.ClosedFormLimit)]
     public void TryCreate_EqualEnds_IsTheGeometricMean()
     {
         Assert.True(FeedbackStage.TryCreate(Resistance.FromOhm(10), Source, Source, out var stage));
@@ -52,4 +55,36 @@ public class FeedbackStageTests
     [Fact]
     public void TryCreate_EmitterResistorTooLarge_IsRefused() =>
         Assert.False(FeedbackStage.TryCreate(Resistance.FromOhm(60), Source, Resistance.FromOhm(50), out _));
+
+    [Theory]
+    [Evidence(typeof(FeedbackStage), EvidenceKind.IndependentRecomputation)]
+    [InlineData(10, 50, 50)]
+    [InlineData(7.3, 50, 200)]
+    [InlineData(15, 75, 150)]
+    public void TryCreate_IdealTransistorByItsNodes_Agrees(double emitter, double source, double load)
+    {
+        Assert.True(FeedbackStage.TryCreate(Resistance.FromOhm(emitter), Resistance.FromOhm(source), Resistance.FromOhm(load), out var stage));
+
+        // Node 1 is the base, node 2 the collector; the emitter current passes through the transistor whole.
+        NodalCircuit Transistor() => new NodalCircuit(2).Element(1, 2, stage!.Feedback.Ohm).CurrentSource(2, 0, 1, 0, 1 / emitter);
+        var loaded = Transistor().Element(2, 0, load);
+        var volt = loaded.Voltages(1, 1);
+
+        Assert.Equal(source, loaded.ImpedanceAt(1).Real, 1e-9);
+        Assert.Equal((volt[2] / volt[1]).Real, stage!.VoltageGain, 1e-9);
+        Assert.Equal(Transistor().Element(1, 0, source).ImpedanceAt(2).Real, stage.OutputResistance.Ohm, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(FeedbackStage), EvidenceKind.Identity)]
+    public void TryCreate_AllResistancesScaled_KeepsTheGain() =>
+        Gen.Select(Gen.Double[3, 20], Gen.Double[50, 300], Gen.Double[0.2, 5]).Sample((emitter, load, scale) =>
+        {
+            Assert.True(FeedbackStage.TryCreate(Resistance.FromOhm(emitter), Source, Resistance.FromOhm(load), out var one));
+            Assert.True(FeedbackStage.TryCreate(Resistance.FromOhm(emitter * scale), Source * scale, Resistance.FromOhm(load * scale), out var scaled));
+
+            Assert.Equal(one!.Gain.Db, scaled!.Gain.Db, 1e-9);
+            Assert.Equal(one.Feedback.Ohm * scale, scaled.Feedback.Ohm, 1e-9 * scaled.Feedback.Ohm);
+            Assert.Equal(one.OutputResistance.Ohm * scale, scaled.OutputResistance.Ohm, 1e-9 * scaled.OutputResistance.Ohm);
+        });
 }

@@ -11,6 +11,7 @@ public class MatchingNetworkTests
     private static readonly Resistance Low = Resistance.FromOhm(12.5);
 
     [Fact]
+    [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
     public void L_FiftyToTwelve_MatchesPublishedParts()
     {
         var network = MatchingNetwork.L(High, Low, F);
@@ -22,6 +23,7 @@ public class MatchingNetworkTests
     }
 
     [Fact]
+    [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
     public void TryPi_QThree_MatchesPublishedParts()
     {
         Assert.True(MatchingNetwork.TryPi(High, Low, F, 3, out var network));
@@ -31,6 +33,7 @@ public class MatchingNetworkTests
     }
 
     [Fact]
+    [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
     public void TryTee_QThree_MatchesPublishedParts()
     {
         Assert.True(MatchingNetwork.TryTee(Low, High, F, 3, out var network));
@@ -40,6 +43,7 @@ public class MatchingNetworkTests
     }
 
     [Theory]
+    [Evidence(typeof(MatchingNetwork), EvidenceKind.IndependentRecomputation)]
     [InlineData(2, 11.8, 22.6, 0.11)]
     [InlineData(3, 19.7, 31.5, 0.18)]
     [InlineData(5, 26.0, 38.0, 0.31)]
@@ -59,6 +63,7 @@ public class MatchingNetworkTests
     }
 
     [Fact]
+    [Evidence(typeof(MatchingNetwork), EvidenceKind.ClosedFormLimit)]
     public void TryPi_QBelowTheSmallest_IsRefused()
     {
         Assert.Equal(4.36, MatchingNetwork.SmallestQ(Resistance.FromOhm(200), Resistance.FromOhm(10)), 0.005);

@@ -1,6 +1,7 @@
 using ClubBench.Calculation.Amplifiers;
 using ClubBench.Calculation.Emissions;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Amplifiers;
 
@@ -9,6 +10,8 @@ public class OutputStageTests
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("output_stage");
 
     [Theory]
+    [Evidence(typeof(OutputStage), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(OutputStage), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
     public void LoadAndPower_Row_GoBothWays(ReferenceRow row)
     {
@@ -34,6 +37,7 @@ public class OutputStageTests
         Assert.Equal(0.164, new OutputStage(Voltage.FromVolt(12), Voltage.FromVolt(0.8)).DirectCurrent(Power.FromWatt(1.18), 0.6).Ampere, 5e-4);
 
     [Fact]
+    [Evidence(typeof(OutputStage), EvidenceKind.ClosedFormLimit)]
     public void PeakVoltage_ClassE_IsAboveTheTunedStages()
     {
         var stage = new OutputStage(Voltage.FromVolt(12), Voltage.FromVolt(0.5));
@@ -45,4 +49,13 @@ public class OutputStageTests
     [Fact]
     public void OutputStage_SaturationAboveTheSupply_Throws() =>
         Assert.Throws<ArgumentException>(() => new OutputStage(Voltage.FromVolt(1), Voltage.FromVolt(1)));
+
+    [Fact]
+    [Evidence(typeof(OutputStage), EvidenceKind.Identity)]
+    public void DirectCurrent_TimesTheSupply_IsOutputAndHeat() => Gen.Select(Gen.Double[6, 30], Gen.Double[0.1, 50], Gen.Double[0.1, 1]).Sample((volt, watt, efficiency) =>
+    {
+        var (stage, output) = (new OutputStage(Voltage.FromVolt(volt), Voltage.FromVolt(0.5)), Power.FromWatt(watt));
+        var heat = OutputStage.Dissipation(output, efficiency, Power.FromWatt(0));
+        Assert.Equal(watt + heat.Watt, stage.DirectCurrent(output, efficiency).Ampere * volt, 1e-9 * (watt + heat.Watt));
+    });
 }

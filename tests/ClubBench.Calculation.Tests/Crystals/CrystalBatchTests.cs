@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Crystals;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Crystals;
 
@@ -8,6 +9,7 @@ public class CrystalBatchTests
     private static readonly CrystalBatch Drawer = Batch(8998120, 8998310, 8998355, 8998402, 8998390, 8998650, 8998371, 8998010);
 
     [Fact]
+    [Evidence(typeof(CrystalBatch), EvidenceKind.ClosedFormLimit)]
     public void Match_FourOfEight_TakesTheTightestWindow()
     {
         var set = Drawer.Match(4)!;
@@ -30,6 +32,7 @@ public class CrystalBatchTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalBatch), EvidenceKind.ClosedFormLimit)]
     public void Statistics_KnownBatch_AreThoseByHand()
     {
         var batch = Batch(100, 102, 104, 106);
@@ -39,6 +42,7 @@ public class CrystalBatchTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalBatch), EvidenceKind.ClosedFormLimit)]
     public void Outliers_OneFarAway_IsNamedAndAnEvenBatchNamesNone()
     {
         Assert.Equal([3], Batch(9000000, 9000010, 9000020, 9002000, 9000015).Outliers());
@@ -63,6 +67,7 @@ public class CrystalBatchTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalDrive), EvidenceKind.ClosedFormLimit)]
     public void Drive_OneMilliampereRmsIn26Ohm_StaysBelowTheLimit()
     {
         var drive = CrystalDrive.Of(Current.FromMilliampere(1), Resistance.FromOhm(26.45));
@@ -70,6 +75,43 @@ public class CrystalBatchTests
         Assert.Equal(0.02645, drive.Milliwatt, 1e-9);
         Assert.True(drive < CrystalDrive.UsualLimit);
     }
+
+    [Fact]
+    [Evidence(typeof(CrystalBatch), EvidenceKind.IndependentRecomputation)]
+    public void Match_AgainstEveryChoiceOfThree_IsTheTightest() => Gen.Int[0, 500].Array[3, 9].Sample(offsets =>
+    {
+        var tightest = (from i in offsets.Index() from j in offsets.Index() from k in offsets.Index() where i.Index < j.Index && j.Index < k.Index
+                        select Math.Max(i.Item, Math.Max(j.Item, k.Item)) - Math.Min(i.Item, Math.Min(j.Item, k.Item))).Min();
+        Assert.Equal(tightest, Batch([.. offsets.Select(o => 9e6 + o)]).Match(3)!.SpreadHertz, 1e-6);
+    });
+
+    [Fact]
+    [Evidence(typeof(CrystalBatch), EvidenceKind.Identity)]
+    public void Statistics_BatchMovedAsAWhole_KeepDeviationOutliersAndSets() => Gen.Int[0, 500].Array[3, 9].Sample(offsets =>
+    {
+        var (here, there) = (Batch([.. offsets.Select(o => 9e6 + o)]), Batch([.. offsets.Select(o => 9.5e6 + o)]));
+        Assert.Equal(here.StandardDeviationHertz, there.StandardDeviationHertz, 1e-6);
+        Assert.Equal(here.MeanHertz + 5e5, there.MeanHertz, 1e-6);
+        Assert.Equal(here.Outliers(), there.Outliers());
+        Assert.Equal(here.MatchAll(2).Select(s => s.SpreadHertz), there.MatchAll(2).Select(s => s.SpreadHertz));
+    });
+
+    [Fact]
+    [Evidence(typeof(CrystalDrive), EvidenceKind.IndependentRecomputation)]
+    public void Drive_SineSampledOverACycle_IsItsMeanPower()
+    {
+        var milliwatt = Enumerable.Range(0, 1000).Average(k => Math.Pow(2 * Math.Sin(2 * Math.PI * k / 1000), 2) * 40 * 1e-3);
+
+        Assert.Equal(milliwatt, CrystalDrive.Of(Current.FromMilliampere(Math.Sqrt(2)), Resistance.FromOhm(40)).Milliwatt, 1e-12);
+    }
+
+    [Fact]
+    [Evidence(typeof(CrystalDrive), EvidenceKind.Identity)]
+    public void Drive_TwiceTheCurrentInHalfTheResistance_IsTwice() => Gen.Select(Gen.Double[0.1, 5], Gen.Double[5, 200]).Sample((milliampere, ohm) =>
+        Assert.Equal(
+            2 * CrystalDrive.Of(Current.FromMilliampere(milliampere), Resistance.FromOhm(ohm)).Watt,
+            CrystalDrive.Of(Current.FromMilliampere(2 * milliampere), Resistance.FromOhm(ohm / 2)).Watt,
+            1e-12));
 
     private static CrystalBatch Batch(params double[] hertz) => new([.. hertz.Select(Frequency.FromHertz)]);
 }

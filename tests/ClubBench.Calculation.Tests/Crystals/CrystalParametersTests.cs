@@ -11,6 +11,7 @@ public class CrystalParametersTests
     public static TheoryData<ReferenceRow> Published => ReferenceTable.Theory("crystals");
 
     [Theory]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Published))]
     public void Crystal_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -29,6 +30,7 @@ public class CrystalParametersTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.RoundTrip)]
     public void FromMarkedFrequency_AnyCrystal_ComesBackAtItsLoad() =>
         Gen.Select(Gen.Double[3, 25], Gen.Double[10, 28], Gen.Double[3, 7], Gen.Double[8, 60]).Sample((mhz, cmFf, c0Pf, loadPf) =>
         {
@@ -38,14 +40,17 @@ public class CrystalParametersTests
         });
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.ClosedFormLimit)]
     public void LoadedFrequency_NoLoad_IsTheParallelResonance() =>
         Assert.Equal(FortyMetres.ParallelResonance, FortyMetres.LoadedFrequency(default));
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.ClosedFormLimit)]
     public void LoadedFrequency_HugeLoad_IsTheSeriesResonance() =>
         Assert.Equal(7_030_000, FortyMetres.LoadedFrequency(Capacitance.FromMicrofarad(1)).Hertz, 0.1);
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.IndependentRecomputation)]
     public void LoadedSlope_AnyLoad_IsTheDifferenceQuotient()
     {
         var rise = FortyMetres.LoadedFrequency(Pf(30.001)).Hertz - FortyMetres.LoadedFrequency(Pf(29.999)).Hertz;
@@ -88,6 +93,7 @@ public class CrystalParametersTests
         Assert.Throws<ArgumentOutOfRangeException>(() => Quartz(7.03, 0, 4.5, 20));
 
     [Fact]
+    [Evidence(typeof(ParallelCrystals), EvidenceKind.ClosedFormLimit)]
     public void InParallel_TwoEqual_KeepBothResonances()
     {
         var pair = ParallelCrystals.Of(FortyMetres, 2);
@@ -106,6 +112,52 @@ public class CrystalParametersTests
     [InlineData(1119, PairMatch.DeadGap)]
     public void Judge_DifferenceInHertz_FollowsSeriesResonanceOverQ(double differenceHz, PairMatch expected) =>
         Assert.Equal(expected, ParallelCrystals.Judge(FortyMetres, differenceHz));
+
+    [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.IndependentRecomputation)]
+    public void LoadedFrequency_EquivalentCircuitByItsNodes_IsARealResistanceThere()
+    {
+        var w = FortyMetres.LoadedFrequency(Pf(30)).RadiansPerSecond;
+        var loaded = new NodalCircuit(2)
+            .Element(1, 2, Motional(FortyMetres, w)).Element(1, 2, NodalCircuit.Capacitor(w, 4.5e-12)).Element(2, 0, NodalCircuit.Capacitor(w, 30e-12));
+
+        var ohm = loaded.ImpedanceAt(1);
+
+        Assert.Equal(FortyMetres.EffectiveResistance(Pf(30)).Ohm, ohm.Real, 0.01);
+        Assert.Equal(0, ohm.Imaginary / ohm.Real, 0.02);
+    }
+
+    [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.Identity)]
+    public void OnOvertone_SamePlate_KeepsItsInductanceAndPullsLess() => Gen.Int[1, 4].Select(k => (2 * k) + 1).Sample(n =>
+    {
+        var overtone = FortyMetres.OnOvertone(n);
+        Assert.Equal(FortyMetres.MotionalInductance.Henry, overtone.MotionalInductance.Henry, 1e-12);
+        Assert.Equal(n * n, overtone.CapacitanceRatio / FortyMetres.CapacitanceRatio, 1e-9);
+    });
+
+    [Fact]
+    [Evidence(typeof(ParallelCrystals), EvidenceKind.IndependentRecomputation)]
+    public void MidwayResistance_TwoMotionalArmsByTheirNodes_Agrees()
+    {
+        var other = FortyMetres with { SeriesResonance = Frequency.FromHertz(7_030_300) };
+        var w = 2 * Math.PI * 7_030_150;
+
+        var ohm = new NodalCircuit(1).Element(1, 0, Motional(FortyMetres, w)).Element(1, 0, Motional(other, w)).ImpedanceAt(1);
+
+        Assert.Equal(ohm.Real, ParallelCrystals.MidwayResistance(FortyMetres, 300).Ohm, 1e-3 * ohm.Real);
+    }
+
+    [Fact]
+    [Evidence(typeof(ParallelCrystals), EvidenceKind.Identity)]
+    public void InParallel_PairOfPairs_IsFour()
+    {
+        Assert.Equal(ParallelCrystals.Of(FortyMetres, 4), ParallelCrystals.Of(ParallelCrystals.Of(FortyMetres, 2), 2));
+        Assert.Equal(FortyMetres, ParallelCrystals.Of(FortyMetres, 1));
+    }
+
+    private static System.Numerics.Complex Motional(CrystalParameters crystal, double w) =>
+        crystal.MotionalResistance.Ohm + NodalCircuit.Coil(w, crystal.MotionalInductance.Henry) + NodalCircuit.Capacitor(w, crystal.MotionalCapacitance.Farad);
 
     private static double Figure(CrystalParameters crystal, ReferenceRow row) => row["quantity"] switch
     {

@@ -15,6 +15,7 @@ public class MotionalMeasurementTests
     public static TheoryData<ReferenceRow> Swept => ReferenceTable.Theory("transmission-measurement");
 
     [Theory]
+    [Evidence(typeof(MotionalMeasurement), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Counted))]
     public void Measurement_ReferenceRow_GivesTheCrystal(ReferenceRow row)
     {
@@ -26,6 +27,7 @@ public class MotionalMeasurementTests
     }
 
     [Theory]
+    [Evidence(typeof(TransmissionMeasurement), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Swept))]
     public void Transmission_ReferenceRow_GivesTheMotionalArm(ReferenceRow row)
     {
@@ -40,6 +42,7 @@ public class MotionalMeasurementTests
     }
 
     [Fact]
+    [Evidence(typeof(MotionalMeasurement), EvidenceKind.RoundTrip)]
     public void ThreeLoads_ReadingsOfAnyCrystal_GiveThatCrystalBack() =>
         Gen.Select(Gen.Double[3.5, 21], Gen.Double[10, 28], Gen.Double[3, 7]).Sample((mhz, cmFf, c0Pf) =>
         {
@@ -51,6 +54,7 @@ public class MotionalMeasurementTests
         });
 
     [Fact]
+    [Evidence(typeof(MotionalMeasurement), EvidenceKind.RoundTrip)]
     public void OscillatorShift_ReadingsOfACrystal_GiveThatCrystalBack()
     {
         var (oscillator, series) = (Pf(235), Pf(33));
