@@ -33,6 +33,8 @@ public class HybridPiTests
     }
 
     [Fact]
+    [Evidence(typeof(HybridPi), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(AdmittanceTwoPort), EvidenceKind.ClosedFormLimit)]
     public void TransducerGain_VeryLowFrequency_IsTheResistiveClosedForm()
     {
         var model = Model();
@@ -45,6 +47,7 @@ public class HybridPiTests
     }
 
     [Fact]
+    [Evidence(typeof(HybridPi), EvidenceKind.ClosedFormLimit)]
     public void At_VanishingEmitterResistor_ApproachesTheGroundedEmitter()
     {
         var f = Frequency.FromMegahertz(14);
@@ -59,6 +62,7 @@ public class HybridPiTests
         Assert.False(HybridPi.TryCreate(Current.FromMilliampere(1), new(100, Frequency.FromMegahertz(300)), Capacitance.FromPicofarad(30), Resistance.FromOhm(20), out _));
 
     [Theory]
+    [Evidence(typeof(BaseShunt), EvidenceKind.RoundTrip)]
     [InlineData(7, 28.05, 24.4)]
     [InlineData(3.5, 28.05, 15.0)]
     [InlineData(14, 22.23, 17.2)]

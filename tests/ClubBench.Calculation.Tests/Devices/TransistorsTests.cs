@@ -1,6 +1,8 @@
+using System.Globalization;
 using ClubBench.Calculation.Devices;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tables;
+using CsvHelper;
 
 namespace ClubBench.Calculation.Tests.Devices;
 
@@ -29,6 +31,7 @@ public class TransistorsTests
     public void Find_UnknownType_IsNull() => Assert.Null(Transistors.Find("QX-1"));
 
     [Fact]
+    [Evidence(typeof(Transistor), EvidenceKind.ClosedFormLimit)]
     public void TransitionFrequencyForVerdict_TypicalOnly_IsHalved()
     {
         Assert.Equal(95, Transistors.Find("BD139")!.TransitionFrequencyForVerdict!.Value.Megahertz, 1e-9);
@@ -43,4 +46,31 @@ public class TransistorsTests
         Assert.False(Transistors.Find("PN2222A")!.IsFromMemory("max_power"));
         Assert.True(Transistors.Find("RD06HHF1")!.IsFromMemory("max_power"));
     }
+
+    [Fact]
+    [Evidence(typeof(Transistor), EvidenceKind.IndependentRecomputation)]
+    public void IsFromMemory_RawTableReadAgain_AgreesInEveryRow()
+    {
+        using var csv = new CsvReader(new StreamReader(typeof(Sources).Assembly.GetManifestResourceStream(TableName())!), CultureInfo.InvariantCulture);
+        csv.Read();
+        csv.ReadHeader();
+        while (csv.Read())
+        {
+            var whole = csv.GetField("status") == "from_memory";
+            var marked = $" {csv.GetField("fields_from_memory")} ";
+            foreach (var field in new[] { "ft", "hfe", "c_out", "max_power", "rth_ja" })
+                Assert.Equal(whole || marked.Contains($" {field} ", StringComparison.Ordinal), Transistors.Find(csv.GetField("type")!)!.IsFromMemory(field));
+        }
+    }
+
+    [Fact]
+    [Evidence(typeof(Transistor), EvidenceKind.Identity)]
+    public void TransitionFrequencyForVerdict_EveryType_NeverExceedsWhatTheSheetStates() => Assert.All(Transistors.All, t =>
+    {
+        Assert.Equal(t.TransitionFrequencyMin is null && t.TransitionFrequencyTypical is null, t.TransitionFrequencyForVerdict is null);
+        Assert.True(t.TransitionFrequencyForVerdict is not { } verdict || verdict <= (t.TransitionFrequencyMin ?? verdict));
+        Assert.True(t.TransitionFrequencyForVerdict is not { } judged || judged <= (t.TransitionFrequencyTypical ?? judged));
+    });
+
+    private static string TableName() => typeof(Sources).Assembly.GetManifestResourceNames().Single(n => n.EndsWith(".transistors.csv", StringComparison.Ordinal));
 }

@@ -1,6 +1,7 @@
 using ClubBench.Calculation.Emissions;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tables;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Emissions;
 
@@ -9,6 +10,8 @@ public class EmissionLimitSetTests
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("emission_limits");
 
     [Theory]
+    [Evidence(typeof(EmissionLimitSet), EvidenceKind.PublishedValue)]
+    [Evidence(typeof(EmissionLimitRule), EvidenceKind.PublishedValue)]
     [MemberData(nameof(Rows))]
     public void Required_PowerAndCarrier_MatchesTheRow(ReferenceRow row)
     {
@@ -19,6 +22,7 @@ public class EmissionLimitSetTests
     }
 
     [Fact]
+    [Evidence(typeof(EmissionLimitSet), EvidenceKind.ClosedFormLimit)]
     public void Required_EmptyLicence_RefusesInsteadOfJudging()
     {
         var answer = EmissionLimitSet.NationalLicence.Required(Power.FromWatt(5), Frequency.FromMegahertz(7.03));
@@ -40,6 +44,7 @@ public class EmissionLimitSetTests
             EmissionLimitSet.Find("itu-a-amateur")!.Required(Power.FromWatt(5), Frequency.FromMegahertz(7.03)).Rule!.Source.Status);
 
     [Fact]
+    [Evidence(typeof(EmissionLimitSet), EvidenceKind.ClosedFormLimit)]
     public void Required_FilledLicence_JudgesByTheEnteredFigure()
     {
         var rule = EmissionLimitSet.Find("fcc-97307d-new")!.Rules[0] with { Attenuation = Decibels.FromDb(47) };
@@ -56,6 +61,8 @@ public class EmissionLimitSetTests
     }
 
     [Theory]
+    [Evidence(typeof(EmissionLimitSet), EvidenceKind.Identity)]
+    [Evidence(typeof(EmissionLimitRule), EvidenceKind.Identity)]
     [InlineData("itu-a-amateur")]
     [InlineData("fcc-97307d-new")]
     public void Required_MorePower_NeverAsksForLess(string set)
@@ -64,4 +71,29 @@ public class EmissionLimitSetTests
 
         Assert.Equal(asked.Order(), asked);
     }
+
+    [Fact]
+    [Evidence(typeof(EmissionLimitRule), EvidenceKind.ClosedFormLimit)]
+    public void Required_OneFigureAlone_IsThatFigure()
+    {
+        var bare = EmissionLimitSet.Find("fcc-97307d-new")!.Rules[0] with { Attenuation = null };
+
+        Assert.Equal(0, bare.Required(Power.FromWatt(5)).Db);
+        Assert.Equal(43, (bare with { Attenuation = Decibels.FromDb(43) }).Required(Power.FromWatt(5)).Db);
+        Assert.Equal(40, (bare with { EmissionMax = PowerLevel.FromDbm(-10) }).Required(Power.FromWatt(1)).Db, 1e-9);
+        Assert.Equal(20, (bare with { Attenuation = Decibels.FromDb(43), AttenuationCap = Decibels.FromDb(20) }).Required(Power.FromWatt(1)).Db);
+    }
+
+    [Fact]
+    [Evidence(typeof(EmissionLimitRule), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(EmissionLimitSet), EvidenceKind.IndependentRecomputation)]
+    public void Required_WordsOfTheRuleWorkedOutInWatts_Agree() => Gen.Double[0.02, 24.9].Sample(watt =>
+    {
+        // At most 25 microwatt and at least 40 dB down, but never required below 10 microwatt.
+        var permitted = Math.Max(Math.Min(25e-6, watt / 10_000), 10e-6);
+
+        var asked = EmissionLimitSet.Find("fcc-97307e")!.Required(Power.FromWatt(watt), Frequency.FromMegahertz(50.1)).Attenuation!.Value;
+
+        Assert.Equal(10 * Math.Log10(watt / permitted), asked.Db, 1e-4);
+    });
 }

@@ -2,6 +2,7 @@ using ClubBench.Calculation.Emissions;
 using ClubBench.Calculation.Filters;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tables;
+using CsCheck;
 using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
 
 namespace ClubBench.Calculation.Tests.Emissions;
@@ -13,6 +14,7 @@ public class HarmonicTests
     public static TheoryData<ReferenceRow> Suppression => ReferenceTable.Theory("harmonic_suppression");
 
     [Theory]
+    [Evidence(typeof(ConductionAngle), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Angles))]
     public void ConductionAngle_Series_MatchesTheRow(ReferenceRow row)
     {
@@ -26,6 +28,7 @@ public class HarmonicTests
     }
 
     [Theory]
+    [Evidence(typeof(ConductionAngle), EvidenceKind.IndependentRecomputation)]
     [InlineData(70)]
     [InlineData(200)]
     public void ConductionAngle_NumericalFourier_Agrees(double degrees)
@@ -45,6 +48,7 @@ public class HarmonicTests
     }
 
     [Fact]
+    [Evidence(typeof(ConductionAngle), EvidenceKind.ClosedFormLimit)]
     public void ConductionAngle_HalfSine_SecondHarmonicIsTheClosedForm() =>
         Assert.Equal(20 * Math.Log10(4 / (3 * Math.PI)), ConductionAngle.FromDegrees(180).RelativeLevel(2)!.Value.Db, 1e-9);
 
@@ -78,6 +82,7 @@ public class HarmonicTests
     }
 
     [Theory]
+    [Evidence(typeof(HarmonicMargin), EvidenceKind.ClosedFormLimit)]
     [InlineData(-50, 5, HarmonicVerdict.ExpectedToMeet, HarmonicVerdict.Held)]
     [InlineData(-54, 5, HarmonicVerdict.ExpectedToMeet, HarmonicVerdict.Cleared)]
     [InlineData(-46, 5, HarmonicVerdict.TooCloseToTell, HarmonicVerdict.Held)]
@@ -90,6 +95,7 @@ public class HarmonicTests
     }
 
     [Fact]
+    [Evidence(typeof(HarmonicMargin), EvidenceKind.ClosedFormLimit)]
     public void AttenuationNeeded_ClassCAndWishMargin_Is41dB() =>
         Assert.Equal(41, HarmonicMargin.AttenuationNeeded(Decibels.FromDb(-12), Decibels.FromDb(43), Decibels.FromDb(10)).Db, 1e-9);
 
@@ -110,6 +116,7 @@ public class HarmonicTests
     }
 
     [Fact]
+    [Evidence(typeof(LearntRawLevel), EvidenceKind.ClosedFormLimit)]
     public void LearntRawLevel_OneBoard_StaysUncertain()
     {
         var learnt = LearntRawLevel.From([(Decibels.FromDb(-40), Decibels.FromDb(25.11))], HarmonicMargin.AnalyserUncertainty);

@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Keying;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Keying;
 
@@ -24,6 +25,7 @@ public class KeyingTests
     }
 
     [Theory]
+    [Evidence(typeof(KeyingEnvelope), EvidenceKind.Identity)]
     [InlineData(EdgeShape.Linear)]
     [InlineData(EdgeShape.RaisedCosine)]
     [InlineData(EdgeShape.ResistorCapacitor)]
@@ -36,6 +38,7 @@ public class KeyingTests
     }
 
     [Theory]
+    [Evidence(typeof(KeyingEnvelope), EvidenceKind.IndependentRecomputation)]
     [InlineData(EdgeShape.Linear)]
     [InlineData(EdgeShape.RaisedCosine)]
     public void EdgeLevel_NumericalTransformOfTheEdge_Agrees(EdgeShape shape)
@@ -64,6 +67,7 @@ public class KeyingTests
     }
 
     [Fact]
+    [Evidence(typeof(KeyingEnvelope), EvidenceKind.ClosedFormLimit)]
     public void EdgeLevel_NearTheCarrier_IsAHardEdge() =>
         Assert.All(Enum.GetValues<EdgeShape>(), s => Assert.Equal(0, new KeyingEnvelope(s, FiveMilliseconds).EdgeLevel(Frequency.FromHertz(0.1)).Db, 1e-4));
 
@@ -84,4 +88,38 @@ public class KeyingTests
     [InlineData(101)]
     public void FromWordsPerMinute_OutsideItsRange_Throws(double words) =>
         Assert.Throws<ArgumentOutOfRangeException>(() => TelegraphySpeed.FromWordsPerMinute(words));
+
+    // The example printed for telegraphy in itu-r-sm1138 (and cfr-47-2): 25 words a minute, B = 20 baud, K = 5.
+    [Fact]
+    [Evidence(typeof(TelegraphySpeed), EvidenceKind.PublishedValue)]
+    public void NecessaryBandwidth_WorkedExampleOfTheRecommendation_Is20BaudAnd100Hertz()
+    {
+        var speed = TelegraphySpeed.FromWordsPerMinute(25);
+
+        Assert.Equal(20, speed.DesignatorBaud, 1e-9);
+        Assert.Equal(100, speed.NecessaryBandwidthHertz(), 1e-9);
+    }
+
+    [Theory]
+    [Evidence(typeof(TelegraphySpeed), EvidenceKind.ClosedFormLimit)]
+    [InlineData(1, 1200)]
+    [InlineData(12, 100)]
+    [InlineData(20, 60)]
+    public void Dot_WordOfFiftyElements_FillsTheMinute(double words, double milliseconds)
+    {
+        var dot = TelegraphySpeed.FromWordsPerMinute(words).Dot;
+
+        Assert.Equal(milliseconds, dot.Millisecond, 1e-9);
+        Assert.Equal(60, words * 50 * dot.Second, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(TelegraphySpeed), EvidenceKind.Identity)]
+    public void NecessaryBandwidth_AnySpeed_GrowsInProportionAndByFiveThirdsWithFading() => Gen.Select(Gen.Double[1, 50], Gen.Double[1, 2]).Sample((words, faster) =>
+    {
+        var (slow, fast) = (TelegraphySpeed.FromWordsPerMinute(words), TelegraphySpeed.FromWordsPerMinute(words * faster));
+        Assert.Equal(faster, fast.NecessaryBandwidthHertz() / slow.NecessaryBandwidthHertz(), 1e-9);
+        Assert.Equal(5.0 / 3, slow.NecessaryBandwidthHertz() / slow.NecessaryBandwidthHertz(fading: false), 1e-9);
+        Assert.Equal(slow.Dot.Second * slow.DesignatorBaud, fast.Dot.Second * fast.DesignatorBaud, 1e-9);
+    });
 }

@@ -11,6 +11,8 @@ public class MeasuringTests
     public static TheoryData<ReferenceRow> Directivities => ReferenceTable.Theory("directivity");
 
     [Theory]
+    [Evidence(typeof(RfVoltage), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(RfVoltage), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Voltages))]
     public void RfVoltage_Power_MatchesTheRowBothWays(ReferenceRow row)
     {
@@ -28,6 +30,7 @@ public class MeasuringTests
         Assert.Equal(0.96, RfVoltage.ShareShown(Frequency.FromMegahertz(30), Frequency.FromMegahertz(100)), 0.005);
 
     [Theory]
+    [Evidence(typeof(PeakDetector), EvidenceKind.RoundTrip)]
     [InlineData(21.7, 1, 4.973)]
     [InlineData(10.1, 2, 4.580)]
     public void PeakDetector_Reading_MatchesPublishedFigures(double volt, double divider, double watt)
@@ -44,10 +47,12 @@ public class MeasuringTests
         Assert.False(new PeakDetector(Voltage.FromVolt(0.3), 1, FiftyOhm).TryPower(Voltage.FromVolt(0.9), out _));
 
     [Fact]
+    [Evidence(typeof(PeakDetector), EvidenceKind.ClosedFormLimit)]
     public void PeakDetector_PowerTooSmallForTheDiode_ReadsNothing() =>
         Assert.Equal(0, new PeakDetector(Voltage.FromVolt(0.6), 1, FiftyOhm).Reading(Power.FromMilliwatt(1)).Volt);
 
     [Theory]
+    [Evidence(typeof(ReturnLossInterval), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Directivities))]
     public void ReturnLossInterval_Reading_MatchesTheRow(ReferenceRow row)
     {
@@ -58,10 +63,12 @@ public class MeasuringTests
     }
 
     [Fact]
+    [Evidence(typeof(ReturnLossInterval), EvidenceKind.ClosedFormLimit)]
     public void ReturnLossInterval_ReadingAtTheDirectivity_LeavesAPerfectMatchPossible() =>
         Assert.Null(ReturnLossInterval.Of(Decibels.FromDb(25), Decibels.FromDb(25)).Most);
 
     [Fact]
+    [Evidence(typeof(TwoTone), EvidenceKind.ClosedFormLimit)]
     public void TwoTone_Crest_GivesTheThreePowers()
     {
         var tones = TwoTone.FromCrest(Voltage.FromVolt(20), FiftyOhm);
