@@ -23,6 +23,7 @@ public class MixingTests
     }
 
     [Fact]
+    [Evidence(typeof(FrequencyScheme), EvidenceKind.RoundTrip)]
     public void SignalFor_OscillatorOfASignal_ReturnsTheSignal() =>
         Gen.Select(Gen.Double[1.8, 29], Gen.Double[0.455, 11], Gen.Int[2, 4].Select(i => (InjectionSide)i))
             .Sample((rf, mid, side) =>
@@ -32,6 +33,7 @@ public class MixingTests
             });
 
     [Theory]
+    [Evidence(typeof(FrequencyScheme), EvidenceKind.Identity)]
     [InlineData(InjectionSide.HighSide)]
     [InlineData(InjectionSide.LowSide)]
     [InlineData(InjectionSide.SumToIntermediate)]
@@ -44,10 +46,12 @@ public class MixingTests
     }
 
     [Fact]
+    [Evidence(typeof(FrequencyScheme), EvidenceKind.ClosedFormLimit)]
     public void OscillatorFor_LowSideBelowTheIntermediate_HasNoSolution() =>
         Assert.Null(Scheme(InjectionSide.LowSide, 9).OscillatorFor(Frequency.FromMegahertz(7.03)));
 
     [Fact]
+    [Evidence(typeof(FrequencyScheme), EvidenceKind.ClosedFormLimit)]
     public void DirectConversion_Oscillator_IsTheSignal()
     {
         var signal = Frequency.FromMegahertz(10.116);
@@ -82,6 +86,7 @@ public class MixingTests
         Assert.Empty(Scheme(InjectionSide.LowSide, 9).IssuesOver(FrequencyRange.FromMegahertz(14.0, 14.35)));
 
     [Theory]
+    [Evidence(typeof(OscillatorLevel), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Levels))]
     public void FromPeakToPeak_ReferenceRow_GivesTheLevel(ReferenceRow row) =>
         Assert.Equal(
@@ -90,6 +95,7 @@ public class MixingTests
             row.Number("tolerance_db"));
 
     [Fact]
+    [Evidence(typeof(OscillatorLevel), EvidenceKind.RoundTrip)]
     public void PeakToPeak_OfALevel_GoesBack() =>
         Assert.Equal(1.3, OscillatorLevel.PeakToPeak(OscillatorLevel.FromPeakToPeak(Voltage.FromVolt(1.3), Resistance.FromOhm(50)), Resistance.FromOhm(50)).Volt, 1e-12);
 
@@ -102,6 +108,7 @@ public class MixingTests
         Assert.Equal(expected, OscillatorLevel.Judge(PowerLevel.FromDbm(dbm), PowerLevel.FromDbm(7)));
 
     [Fact]
+    [Evidence(typeof(OscillatorLevel), EvidenceKind.ClosedFormLimit)]
     public void AtAntenna_Plus7Less40_IsMinus33() =>
         Assert.Equal(-33, OscillatorLevel.AtAntenna(PowerLevel.FromDbm(7), Decibels.FromDb(40), Decibels.Zero).Dbm, 1e-12);
 

@@ -14,6 +14,7 @@ public class SpuriousResponsesTests
     public void Of_20Metres_FindsAllToOrder7() => Assert.Equal(49, TwentyMetres.Count);
 
     [Theory]
+    [Evidence(typeof(SpuriousResponses), EvidenceKind.ClosedFormLimit)]
     [InlineData(0, 3.94, 1, 1, 0)]
     [InlineData(1, 14.06, 1, 1, 0)]
     [InlineData(2, 6.18, 3, 1, 9.54)]
@@ -33,6 +34,7 @@ public class SpuriousResponsesTests
     }
 
     [Fact]
+    [Evidence(typeof(SpuriousResponses), EvidenceKind.Identity)]
     public void Of_AnyResponse_MixesToTheIntermediate() => Assert.All(TwentyMetres, r =>
     {
         var (lo, rf) = (r.OscillatorOrder * 5.06e6, r.SignalOrder * r.Frequency.Hertz);
@@ -49,6 +51,7 @@ public class SpuriousResponsesTests
         Assert.Empty(Find(side, mid, low, high));
 
     [Theory]
+    [Evidence(typeof(Birdies), EvidenceKind.ClosedFormLimit)]
     [InlineData(InjectionSide.SumToIntermediate, 9, 3.5, 3.8, 3.6, 1, 4, true)]
     [InlineData(InjectionSide.SumToIntermediate, 9, 3.5, 3.8, 3.6, 3, 2, true)]
     [InlineData(InjectionSide.HighSide, 9, 3.5, 3.8, 3.6, 1, 6, true)]
@@ -87,6 +90,7 @@ public class SpuriousResponsesTests
         Assert.Empty(Birdies.WithSignal(FrequencyScheme.DirectConversion, Band(7.0, 7.2)));
 
     [Theory]
+    [Evidence(typeof(Sidebands), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(SidebandRows))]
     public void Sidebands_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -115,6 +119,7 @@ public class SpuriousResponsesTests
     }
 
     [Fact]
+    [Evidence(typeof(Sidebands), EvidenceKind.ClosedFormLimit)]
     public void PhasingSuppression_Perfect_HasNoLimit() => Assert.Null(Sidebands.PhasingSuppression(1, 0));
 
     [Theory]

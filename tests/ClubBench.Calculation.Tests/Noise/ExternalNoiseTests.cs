@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Noise;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Noise;
 
@@ -57,6 +58,7 @@ public class ExternalNoiseTests
         Assert.Equal(24.56, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.FromDb(10)).Db, 0.01);
 
     [Fact]
+    [Evidence(typeof(ExternalNoise), EvidenceKind.ClosedFormLimit)]
     public void FromMeasuredRise_NoRise_IsNoMoreThanTheLoadItself() =>
         Assert.Equal(0, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.Zero).Db, 1e-12);
 
@@ -67,4 +69,46 @@ public class ExternalNoiseTests
     [Fact]
     public void At_UnknownSite_Throws() =>
         Assert.Throws<ArgumentOutOfRangeException>(() => ExternalNoise.At(NoiseSite.Unknown, Frequency.FromMegahertz(7), NoiseHour.Median));
+
+    // The constants c and d printed in itu-r-p372: at one megahertz the logarithm vanishes and c is left.
+    [Theory]
+    [Evidence(typeof(ExternalNoise), EvidenceKind.PublishedValue)]
+    [InlineData(NoiseSite.City, 76.8, 27.7)]
+    [InlineData(NoiseSite.Residential, 72.5, 27.7)]
+    [InlineData(NoiseSite.Rural, 67.2, 27.7)]
+    [InlineData(NoiseSite.QuietRural, 53.6, 28.6)]
+    public void ManMade_AtOneAndTenMegahertz_HasThePrintedConstants(NoiseSite site, double c, double d)
+    {
+        var (one, ten) = (ExternalNoise.ManMade(site, Frequency.FromMegahertz(1)), ExternalNoise.ManMade(site, Frequency.FromMegahertz(10)));
+
+        Assert.Equal(c, one.Db, 1e-9);
+        Assert.Equal(d, (one - ten).Db, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(ExternalNoise), EvidenceKind.PublishedValue)]
+    public void Galactic_AtOneAndTenMegahertz_HasThePrintedConstants()
+    {
+        Assert.Equal(52, ExternalNoise.Galactic(Frequency.FromMegahertz(1)).Db, 1e-9);
+        Assert.Equal(52 - 23, ExternalNoise.Galactic(Frequency.FromMegahertz(10)).Db, 1e-9);
+    }
+
+    [Fact]
+    [Evidence(typeof(ExternalNoise), EvidenceKind.RoundTrip)]
+    public void FromMeasuredRise_RiseThatASiteMakes_GivesTheSiteBack() => Gen.Select(Gen.Double[1, 30], Gen.Double[5, 25]).Sample((mhz, receiverDb) =>
+    {
+        var (site, receiver) = (ExternalNoise.At(NoiseSite.Rural, Frequency.FromMegahertz(mhz), NoiseHour.Quiet).Figure, Decibels.FromDb(receiverDb));
+        var rise = Decibels.FromPowerRatio((site.PowerRatio - 1 + receiver.PowerRatio) / receiver.PowerRatio);
+        Assert.Equal(site.Db, ExternalNoise.FromMeasuredRise(receiver, rise).Db, 1e-9);
+    });
+
+    [Fact]
+    [Evidence(typeof(ExternalNoise), EvidenceKind.Identity)]
+    public void At_AnyFrequency_IsQuieterAtTheQuietHourAndQuieterSites() => Gen.Double[0.5, 30].Sample(mhz =>
+    {
+        double At(NoiseSite site, NoiseHour hour) => ExternalNoise.At(site, Frequency.FromMegahertz(mhz), hour).Figure.Db;
+        var sites = new[] { NoiseSite.City, NoiseSite.Residential, NoiseSite.Rural, NoiseSite.QuietRural }.Select(s => At(s, NoiseHour.Median)).ToList();
+        Assert.Equal(sites.OrderDescending(), sites);
+        Assert.True(At(NoiseSite.Rural, NoiseHour.Quiet) < At(NoiseSite.Rural, NoiseHour.Median));
+    });
 }

@@ -50,10 +50,12 @@ public class PreamplifierNeedTests
     }
 
     [Fact]
+    [Evidence(typeof(PreamplifierNeed), EvidenceKind.ClosedFormLimit)]
     public void Degradation_NoiselessReceiver_IsNone() =>
         Assert.Equal(0, PreamplifierNeed.Degradation(Decibels.Zero, Decibels.FromDb(20)).Db, 1e-12);
 
     [Fact]
+    [Evidence(typeof(PreamplifierNeed), EvidenceKind.RoundTrip)]
     public void LargestFor_GoesBackToTheSameDegradation()
     {
         var own = PreamplifierNeed.LargestFor(Decibels.FromDb(0.7), Decibels.FromDb(22));
@@ -68,6 +70,7 @@ public class PreamplifierNeedTests
         Assert.Equal(expectedDb, Gain(15, 4, lossDb, 19.02)!.Value.Db, 0.02);
 
     [Fact]
+    [Evidence(typeof(PreamplifierNeed), EvidenceKind.IndependentRecomputation)]
     public void RequiredGain_Applied_LeavesTheWantedDegradation()
     {
         var gain = Gain(15, 4, 1, 19.02)!.Value;
@@ -85,6 +88,7 @@ public class PreamplifierNeedTests
     public void RequiredGain_LossEatsEverything_HasNoSolution() => Assert.Null(Gain(15, 6, 10, 5));
 
     [Fact]
+    [Evidence(typeof(PreamplifierNeed), EvidenceKind.ClosedFormLimit)]
     public void RequiredGain_NoneNeeded_IsZero() => Assert.Equal(Decibels.Zero, Gain(15, 4, 0, 40));
 
     private static Decibels? Gain(double receiverDb, double preamplifierDb, double lossDb, double externalDb) => PreamplifierNeed.RequiredGain(

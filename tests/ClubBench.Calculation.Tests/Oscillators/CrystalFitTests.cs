@@ -28,6 +28,7 @@ public class CrystalFitTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalFit), EvidenceKind.RoundTrip)]
     public void FromOscillator_ReadingsOfAKnownCrystal_GiveThatCrystalBack()
     {
         var truth = Bench with { Crystal = Bench.Crystal with { SeriesResonance = Frequency.FromHertz(10_114_000), MotionalCapacitance = Capacitance.FromFarad(23e-15) } };

@@ -10,11 +10,15 @@ public class FreeRunningTests
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("free-running");
 
     [Theory]
+    [Evidence(typeof(FreeRunning), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(Bandspread), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(TemperatureBudget), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
     public void FreeRunning_ReferenceRow_GivesThePrintedFigure(ReferenceRow row) =>
         Assert.Equal(row.Number("expected"), Figure(row), row.Number("tolerance"));
 
     [Fact]
+    [Evidence(typeof(Bandspread), EvidenceKind.RoundTrip)]
     public void Bandspread_AppliedToItsRange_ReachesBothEnds()
     {
         var range = FrequencyRange.FromMegahertz(3.5, 3.58);
@@ -39,6 +43,7 @@ public class FreeRunningTests
     }
 
     [Fact]
+    [Evidence(typeof(TemperatureBudget), EvidenceKind.RoundTrip)]
     public void CompensatingShare_Applied_LeavesNoDrift()
     {
         var share = TemperatureBudget.CompensatingShare(95, 0, -150)!.Value;
@@ -53,6 +58,7 @@ public class FreeRunningTests
         Assert.Null(TemperatureBudget.CompensatingShare(coil, 0, type));
 
     [Theory]
+    [Evidence(typeof(OscillatorChoice), EvidenceKind.ClosedFormLimit)]
     [InlineData(7.000, 7.040, OscillatorKind.FreeRunning)]
     [InlineData(10.100, 10.130, OscillatorKind.StretchedCrystals)]
     [InlineData(14.055, 14.065, OscillatorKind.OneCrystal)]

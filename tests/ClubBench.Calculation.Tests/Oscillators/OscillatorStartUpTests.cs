@@ -42,11 +42,13 @@ public class OscillatorStartUpTests
         Assert.Equal(113.9, KitAPair.NegativeResistance(Gm, Frequency.FromMegahertz(14.06)).Ohm, 0.11);
 
     [Fact]
+    [Evidence(typeof(FeedbackPair), EvidenceKind.Identity)]
     public void NegativeResistance_TwiceTheFrequency_IsAQuarter() =>
         Assert.Equal(
             KitAPair.NegativeResistance(Gm, Frequency.FromMegahertz(7)).Ohm / 4, KitAPair.NegativeResistance(Gm, Frequency.FromMegahertz(14)).Ohm, 1e-9);
 
     [Fact]
+    [Evidence(typeof(FeedbackPair), EvidenceKind.RoundTrip)]
     public void LargestEqual_ForAMarginOfFive_GivesThatMargin()
     {
         var f = Frequency.FromMegahertz(14.06);
@@ -58,6 +60,7 @@ public class OscillatorStartUpTests
     }
 
     [Theory]
+    [Evidence(typeof(OscillatorStartUp), EvidenceKind.ClosedFormLimit)]
     [InlineData(89, StartUpVerdict.Doubtful)]
     [InlineData(113.9, StartUpVerdict.StartsSlowly)]
     [InlineData(150, StartUpVerdict.Starts)]
@@ -80,6 +83,8 @@ public class OscillatorStartUpTests
     }
 
     [Theory]
+    [Evidence(typeof(CrystalOrder), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(CrystalOrder), EvidenceKind.Identity)]
     [MemberData(nameof(Orders))]
     public void OrderForTop_ReferenceRow_GivesFrequencyAndGuaranteedSpan(ReferenceRow row)
     {

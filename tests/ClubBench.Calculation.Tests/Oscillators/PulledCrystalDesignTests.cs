@@ -23,6 +23,7 @@ public class PulledCrystalDesignTests
     }
 
     [Fact]
+    [Evidence(typeof(PulledCrystalDesign), EvidenceKind.RoundTrip)]
     public void ForSpan_WithinReach_ComesBackWithTheSpan()
     {
         var solution = PulledCrystalDesign.ForSpan(KitA30, 10_000);
@@ -41,6 +42,7 @@ public class PulledCrystalDesignTests
     }
 
     [Fact]
+    [Evidence(typeof(PulledCrystalDesign), EvidenceKind.ClosedFormLimit)]
     public void ForSpan_LessThanWithoutInductor_SaysSo()
     {
         var solution = PulledCrystalDesign.ForSpan(Plain(7.03, 18, 4.5, 0), 1000);
@@ -104,6 +106,7 @@ public class PulledCrystalDesignTests
         Assert.Equal(373.1 / 7.859, Plain(7.03, 18, 4.5, 22).Range().SlopeRatio, 0.5);
 
     [Fact]
+    [Evidence(typeof(PulledCrystalDesign), EvidenceKind.ClosedFormLimit)]
     public void Scaled_TwiceTheFrequency_IsAQuarter() =>
         Assert.Equal(5.5, PulledCrystalDesign.Scaled(Inductance.FromMicrohenry(22), Frequency.FromMegahertz(7.03), Frequency.FromMegahertz(14.06)).Microhenry, 1e-9);
 }

@@ -29,6 +29,7 @@ public class PulledCrystalLoopTests
     }
 
     [Theory]
+    [Evidence(typeof(PulledCrystalLoop), EvidenceKind.IndependentRecomputation)]
     [MemberData(nameof(Nodal))]
     public void FrequencyAt_SameCircuitByNodalDeterminant_Agrees(ReferenceRow row)
     {
@@ -75,6 +76,7 @@ public class PulledCrystalLoopTests
     }
 
     [Fact]
+    [Evidence(typeof(PulledCrystalLoop), EvidenceKind.ClosedFormLimit)]
     public void FrequencyAt_NoInductor_IsTheCrystalOnItsSeriesLoad()
     {
         var loop = Plain(7.03, 18, 4.5, 0);
@@ -84,6 +86,7 @@ public class PulledCrystalLoopTests
     }
 
     [Fact]
+    [Evidence(typeof(PulledCrystalLoop), EvidenceKind.Identity)]
     public void FrequencyAt_AnyUsableLoop_FallsAsTheCapacitorGrows() =>
         Gen.Select(Gen.Double[3.5, 21], Gen.Double[0, 1], Gen.Double[12, 80]).Sample((mhz, share, variablePf) =>
         {
@@ -92,6 +95,7 @@ public class PulledCrystalLoopTests
         });
 
     [Fact]
+    [Evidence(typeof(PulledCrystalLoop), EvidenceKind.IndependentRecomputation)]
     public void Sensitivities_AnyElement_AreTheDifferenceQuotient()
     {
         var loop = Stray(Plain(7.03, 18, 4.5, 22), strays: (2, 1, 1.5, 2)) with { StrayAcrossVariable = Pf(3) };

@@ -51,6 +51,7 @@ public class ReceiveOffsetTests
     }
 
     [Fact]
+    [Evidence(typeof(ReceiveOffset), EvidenceKind.RoundTrip)]
     public void Solve_AcrossOscillator_ComesBackWithTheWantedOffset()
     {
         var solution = ReceiveOffset.Solve(KitA30, new OffsetPlace.AcrossOscillator(), 600, Pf(50));
@@ -81,5 +82,6 @@ public class ReceiveOffsetTests
     }
 
     [Fact]
+    [Evidence(typeof(ReceiveOffset), EvidenceKind.ClosedFormLimit)]
     public void At_NoCapacitor_IsNoOffset() => Assert.Equal(0, ReceiveOffset.At(KitA30, KitAPlace, default, Pf(50)));
 }

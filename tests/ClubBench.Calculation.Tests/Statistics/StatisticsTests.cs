@@ -16,6 +16,7 @@ public class StatisticsTests
     }
 
     [Fact]
+    [Evidence(typeof(SeededRandom), EvidenceKind.ClosedFormLimit)]
     public void NextUnit_ManyDraws_HaveTheMomentsOfTheUniformDistribution()
     {
         var random = new SeededRandom(99);
@@ -27,6 +28,7 @@ public class StatisticsTests
     }
 
     [Fact]
+    [Evidence(typeof(SeededRandom), EvidenceKind.ClosedFormLimit)]
     public void Normal_ManyDraws_HaveMeanAndDeviation()
     {
         var random = new SeededRandom(5);
@@ -45,6 +47,7 @@ public class StatisticsTests
     }
 
     [Fact]
+    [Evidence(typeof(Proportion), EvidenceKind.ClosedFormLimit)]
     public void Interval_NoneOfTen_MatchesTheClosedForm()
     {
         // With none found the upper limit is z^2/(n + z^2).
@@ -55,6 +58,7 @@ public class StatisticsTests
     }
 
     [Fact]
+    [Evidence(typeof(Proportion), EvidenceKind.Identity)]
     public void Interval_AnyProportion_HoldsTheShareAndMirrors() =>
         Gen.Int[1, 200].SelectMany(of => Gen.Int[0, of].Select(count => new Proportion(count, of))).Sample(p =>
         {
@@ -64,6 +68,7 @@ public class StatisticsTests
         });
 
     [Fact]
+    [Evidence(typeof(Proportion), EvidenceKind.RoundTrip)]
     public void Interval_Ends_SolveTheScoreEquation() =>
         Gen.Int[2, 200].SelectMany(of => Gen.Int[1, of - 1].Select(count => new Proportion(count, of))).Sample(p =>
         {
@@ -73,6 +78,7 @@ public class StatisticsTests
         });
 
     [Theory]
+    [Evidence(typeof(StudentT), EvidenceKind.PublishedValue)]
     [InlineData(3, 4.30)]
     [InlineData(4, 3.18)]
     [InlineData(5, 2.78)]
@@ -86,9 +92,11 @@ public class StatisticsTests
         Assert.Equal(factor, StudentT.Factor95(readings), 0.0051);
 
     [Fact]
+    [Evidence(typeof(StudentT), EvidenceKind.ClosedFormLimit)]
     public void Factor95_ManyReadings_IsThatOfTheNormalDistribution() => Assert.Equal(1.96, StudentT.Factor95(100_000), 0.001);
 
     [Fact]
+    [Evidence(typeof(Median), EvidenceKind.ClosedFormLimit)]
     public void AbsoluteDeviation_OneWrongReading_DoesNotMoveIt()
     {
         double[] sound = [1, 2, 3, 4, 5];
