@@ -2,7 +2,6 @@ using ClubBench.Calculation.Emissions;
 using ClubBench.Calculation.Filters;
 using ClubBench.Calculation.Quantities;
 using ClubBench.Calculation.Tables;
-using CsCheck;
 using static ClubBench.Calculation.Tests.Filters.ReferenceFilters;
 
 namespace ClubBench.Calculation.Tests.Emissions;

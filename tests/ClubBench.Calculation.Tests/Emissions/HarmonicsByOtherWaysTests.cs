@@ -12,7 +12,7 @@ public class HarmonicsByOtherWaysTests
 
     private static readonly Ladder LowPass = new([
         LadderElement.ShuntCapacitor(Capacitance.FromPicofarad(470)),
-        LadderElement.SeriesInductor(Inductance.FromMicrohenry(1.2)),
+        LadderElement.SeriesInductor(Inductance.FromMicrohenry(1.2), unloadedQ: 20),
         LadderElement.ShuntCapacitor(Capacitance.FromPicofarad(820))]);
 
     [Fact]
@@ -36,7 +36,7 @@ public class HarmonicsByOtherWaysTests
         {
             var w = 2 * Math.PI * hertz;
             return new NodalCircuit(2)
-                .Element(1, 0, sourceOhm).Element(1, 0, NodalCircuit.Capacitor(w, 470e-12)).Element(1, 2, NodalCircuit.Coil(w, 1.2e-6))
+                .Element(1, 0, sourceOhm).Element(1, 0, NodalCircuit.Capacitor(w, 470e-12)).Element(1, 2, NodalCircuit.Coil(w, 1.2e-6) + (w * 1.2e-6 / 20))
                 .Element(2, 0, NodalCircuit.Capacitor(w, 820e-12)).Element(2, 0, 50)
                 .Voltages(1, 1)[2].Magnitude;
         }

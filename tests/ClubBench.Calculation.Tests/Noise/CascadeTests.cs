@@ -7,6 +7,9 @@ namespace ClubBench.Calculation.Tests.Noise;
 
 public class CascadeTests
 {
+    private static readonly Gen<ReceiverStage> AnyStage = Gen.Select(Gen.Double[-10, 20], Gen.Double[0.1, 15], Gen.Double[-10, 30], (gain, noise, intercept) =>
+        new ReceiverStage(Decibels.FromDb(gain), Decibels.FromDb(noise), PowerLevel.FromDbm(intercept)));
+
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("cascade");
 
     [Theory]
@@ -119,9 +122,6 @@ public class CascadeTests
 
         Assert.Equal(1 + (added / Share(volts[0], 50, 290)), pad.NoiseFigure.PowerRatio, 1e-9);
     }
-
-    private static readonly Gen<ReceiverStage> AnyStage = Gen.Select(Gen.Double[-10, 20], Gen.Double[0.1, 15], Gen.Double[-10, 30], (gain, noise, intercept) =>
-        new ReceiverStage(Decibels.FromDb(gain), Decibels.FromDb(noise), PowerLevel.FromDbm(intercept)));
 
     private static ReceiverStage Stage(string text)
     {
