@@ -10,7 +10,7 @@ public class HeatTests
 
     [Fact]
     [Evidence(typeof(Heat), EvidenceKind.ClosedFormLimit)]
-    public void Junction_PublishedCase_Is88Point67Celsius() =>
+    public void Junction_WorkedCase_Is88Point67Celsius() =>
         Assert.Equal(88.67, Path.Junction(Heat.BoxAir, Power.FromWatt(3.333)).Celsius, 0.01);
 
     [Fact]

@@ -12,7 +12,7 @@ public class MatchingNetworkTests
 
     [Fact]
     [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
-    public void L_FiftyToTwelve_MatchesPublishedParts()
+    public void L_FiftyToTwelve_MatchesWorkedParts()
     {
         var network = MatchingNetwork.L(High, Low, F);
 
@@ -24,7 +24,7 @@ public class MatchingNetworkTests
 
     [Fact]
     [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
-    public void TryPi_QThree_MatchesPublishedParts()
+    public void TryPi_QThree_MatchesWorkedParts()
     {
         Assert.True(MatchingNetwork.TryPi(High, Low, F, 3, out var network));
 
@@ -34,7 +34,7 @@ public class MatchingNetworkTests
 
     [Fact]
     [Evidence(typeof(MatchingNetwork), EvidenceKind.RoundTrip)]
-    public void TryTee_QThree_MatchesPublishedParts()
+    public void TryTee_QThree_MatchesWorkedParts()
     {
         Assert.True(MatchingNetwork.TryTee(Low, High, F, 3, out var network));
 
@@ -48,7 +48,7 @@ public class MatchingNetworkTests
     [InlineData(3, 19.7, 31.5, 0.18)]
     [InlineData(5, 26.0, 38.0, 0.31)]
     [InlineData(8, 30.7, 42.8, 0.50)]
-    public void TryPi_DrivenFromTheLowSide_GivesThePublishedHarmonicLoss(double q, double secondDb, double thirdDb, double lossDb)
+    public void TryPi_DrivenFromTheLowSide_GivesTheWorkedHarmonicLoss(double q, double secondDb, double thirdDb, double lossDb)
     {
         Assert.True(MatchingNetwork.TryPi(High, Low, F, q, out var network));
         var reversed = new Ladder(network!.Ladder.Elements.Reverse());
@@ -72,7 +72,7 @@ public class MatchingNetworkTests
     }
 
     [Fact]
-    public void TryPi_Stress_MatchesPublishedFigures()
+    public void TryPi_Stress_MatchesWorkedFigures()
     {
         Assert.True(MatchingNetwork.TryPi(High, Low, F, 3, out var network));
 

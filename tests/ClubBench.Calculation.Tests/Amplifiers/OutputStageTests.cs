@@ -24,7 +24,7 @@ public class OutputStageTests
     }
 
     [Fact]
-    public void CurrentAndHeat_FiveWattAt60Percent_MatchPublishedFigures()
+    public void CurrentAndHeat_FiveWattAt60Percent_MatchWorkedFigures()
     {
         var stage = new OutputStage(Voltage.FromVolt(13.8), Voltage.FromVolt(1.5));
 

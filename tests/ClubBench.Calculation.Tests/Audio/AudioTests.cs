@@ -93,7 +93,7 @@ public class AudioTests
 
     [Fact]
     [Evidence(typeof(PitchAgreement), EvidenceKind.Identity)]
-    public void OddOneOut_AllMovedAlike_IsStillTheSame() => Gen.Select(Gen.Double[400, 900].Array[3, 6], Gen.Int[1, 200]).Sample((hertz, moved) =>
+    public void OddOneOut_AllMovedAlike_IsStillTheSame() => Gen.Select(Gen.Int[400, 900].Select(h => (double)h).Array[3, 6], Gen.Int[1, 200]).Sample((hertz, moved) =>
         Assert.Equal(PitchAgreement.OddOneOut(Pitches(hertz)), PitchAgreement.OddOneOut(Pitches([.. hertz.Select(h => h + moved)]))));
 
     // Node 1 joins R1, R2 and both capacitors, node 2 is the inverting input, node 3 the output of a practically ideal amplifier; one volt at R1.

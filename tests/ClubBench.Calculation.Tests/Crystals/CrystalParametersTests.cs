@@ -8,11 +8,11 @@ public class CrystalParametersTests
 {
     private static readonly CrystalParameters FortyMetres = Quartz(7.03, 18, 4.5, 20);
 
-    public static TheoryData<ReferenceRow> Published => ReferenceTable.Theory("crystals");
+    public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("crystals");
 
     [Theory]
     [Evidence(typeof(CrystalParameters), EvidenceKind.ClosedFormLimit)]
-    [MemberData(nameof(Published))]
+    [MemberData(nameof(Rows))]
     public void Crystal_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
         var crystal = Quartz(row.Number("fs_hz") * 1e-6, row.Number("cm_ff"), row.Number("c0_pf"), row.Number("rm_ohm"));

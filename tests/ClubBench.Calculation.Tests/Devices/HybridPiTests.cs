@@ -24,7 +24,7 @@ public class HybridPiTests
     }
 
     [Fact]
-    public void InputImpedance_At7MHz_MatchesPublishedFigures()
+    public void InputImpedance_At7MHz_MatchesWorkedFigures()
     {
         var z = Model().At(Frequency.FromMegahertz(7)).InputImpedance(Load);
 
@@ -67,7 +67,7 @@ public class HybridPiTests
     [InlineData(3.5, 28.05, 15.0)]
     [InlineData(14, 22.23, 17.2)]
     [InlineData(14, 27.61, 310)]
-    public void BaseShunt_WantedGain_MatchesPublishedFigures(double megahertz, double wantedDb, double ohm)
+    public void BaseShunt_WantedGain_MatchesWorkedFigures(double megahertz, double wantedDb, double ohm)
     {
         var solved = BaseShunt.For(Model(), Frequency.FromMegahertz(megahertz), Source, Load, Decibels.FromDb(wantedDb));
 

@@ -76,7 +76,7 @@ public class KeyingTests
     [InlineData(25, false, 60)]
     [InlineData(12, true, 48)]
     [InlineData(20, true, 80)]
-    public void NecessaryBandwidth_Speed_MatchesPublishedFigures(double words, bool fading, double hertz) =>
+    public void NecessaryBandwidth_Speed_MatchesWorkedFigures(double words, bool fading, double hertz) =>
         Assert.Equal(hertz, TelegraphySpeed.FromWordsPerMinute(words).NecessaryBandwidthHertz(fading), 1e-9);
 
     [Fact]

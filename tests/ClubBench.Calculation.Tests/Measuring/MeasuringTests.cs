@@ -33,7 +33,7 @@ public class MeasuringTests
     [Evidence(typeof(PeakDetector), EvidenceKind.RoundTrip)]
     [InlineData(21.7, 1, 4.973)]
     [InlineData(10.1, 2, 4.580)]
-    public void PeakDetector_Reading_MatchesPublishedFigures(double volt, double divider, double watt)
+    public void PeakDetector_Reading_MatchesWorkedFigures(double volt, double divider, double watt)
     {
         var detector = new PeakDetector(Voltage.FromVolt(0.6), divider, FiftyOhm);
 

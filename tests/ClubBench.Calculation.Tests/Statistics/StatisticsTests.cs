@@ -6,7 +6,7 @@ namespace ClubBench.Calculation.Tests.Statistics;
 public class StatisticsTests
 {
     [Fact]
-    public void NextBits_PublishedSeed_GivesThePublishedSequence()
+    public void NextBits_KnownSeed_GivesTheKnownSequence()
     {
         var random = new SeededRandom(1234567);
 
