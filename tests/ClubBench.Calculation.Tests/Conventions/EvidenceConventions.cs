@@ -28,6 +28,17 @@ public class EvidenceConventions
         Assert.True(kinds.Count >= Wanted, $"{method.Name} has {kinds.Count} of {Wanted}: {string.Join(", ", kinds)}");
     }
 
+    [Fact]
+    public void Evidence_All_StandsAtTests()
+    {
+        var elsewhere = from type in typeof(EvidenceConventions).Assembly.GetTypes()
+                        from method in type.GetMethods(BindingFlags.Instance | BindingFlags.Static | BindingFlags.Public | BindingFlags.NonPublic | BindingFlags.DeclaredOnly)
+                        where method.IsDefined(typeof(EvidenceAttribute)) && !method.IsDefined(typeof(FactAttribute), inherit: true)
+                        select $"{type.Name}.{method.Name}";
+
+        Assert.Empty(elsewhere);
+    }
+
     private static bool IsMethod(Type type) =>
         type is { IsEnum: false, IsInterface: false } && !NotMethods.Contains(type.Namespace) && type.GetMethods(BindingFlags.Instance | BindingFlags.Static | BindingFlags.Public | BindingFlags.DeclaredOnly).Any(Calculates);
 
