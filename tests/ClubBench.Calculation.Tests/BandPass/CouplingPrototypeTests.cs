@@ -10,6 +10,7 @@ public class CouplingPrototypeTests
 
     [Theory]
     [MemberData(nameof(Cases))]
+    [Evidence(typeof(CouplingPrototype), EvidenceKind.PublishedValue)]
     public void Shape_PublishedCase_HasTheCouplingsOfTheTable(ReferenceRow row)
     {
         var prototype = Prototypes.Of(row);
@@ -24,6 +25,7 @@ public class CouplingPrototypeTests
     [InlineData(2, 0.1)]
     [InlineData(3, 1.0)]
     [InlineData(3, 0.1)]
+    [Evidence(typeof(CouplingPrototype), EvidenceKind.ClosedFormLimit)]
     public void Chebyshev_RippleTowardsNothing_IsButterworth(int order, double share)
     {
         var vanishing = CouplingPrototype.Chebyshev(order, PassBandRipple.FromRipple(Decibels.FromDb(0.001 * share)));
@@ -34,6 +36,7 @@ public class CouplingPrototypeTests
     }
 
     [Fact]
+    [Evidence(typeof(CouplingPrototype), EvidenceKind.Identity)]
     public void MidbandLoss_TwiceTheQ_IsHalfInDecibels()
     {
         var prototype = CouplingPrototype.Butterworth(3);

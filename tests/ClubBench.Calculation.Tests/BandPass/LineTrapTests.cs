@@ -22,6 +22,7 @@ public class LineTrapTests
     }
 
     [Fact]
+    [Evidence(typeof(LineTrap), EvidenceKind.ClosedFormLimit)]
     public void Loss_AtTheNotch_FollowsFromTheQAlone() =>
         Gen.Select(Gen.Double[0.2, 20], Gen.Double[20, 400]).Sample((uh, q) =>
         {
@@ -32,6 +33,7 @@ public class LineTrapTests
         });
 
     [Fact]
+    [Evidence(typeof(LineTrap), EvidenceKind.IndependentRecomputation)]
     public void Loss_NearlyLosslessTrap_IsThatOfTheLadderArm()
     {
         var trap = new LineTrap(TrapPlace.InLine, Frequency.FromMegahertz(9), Inductance.FromMicrohenry(0.3), 1e6);
@@ -40,6 +42,15 @@ public class LineTrapTests
         foreach (var mhz in new[] { 3.5, 7.03, 14.06, 28.0 })
             Assert.Equal(arm.At(Frequency.FromMegahertz(mhz)).Loss(Line, Line).Db, trap.Loss(Frequency.FromMegahertz(mhz), Line, Line).Db, 1e-3);
     }
+
+    [Fact]
+    [Evidence(typeof(LineTrap), EvidenceKind.Identity)]
+    public void Loss_AsFarAboveAsBelow_IsTheSame() =>
+        Gen.Select(Gen.Enum<TrapPlace>(), Gen.Double[0.2, 20], Gen.Double[1.01, 5]).Sample((place, uh, off) =>
+        {
+            var trap = new LineTrap(place, Frequency.FromMegahertz(9), Inductance.FromMicrohenry(uh), 150);
+            return Math.Abs(trap.Loss(trap.Notch * off, Line, Line).Db - trap.Loss(trap.Notch / off, Line, Line).Db) < 1e-9;
+        });
 
     [Theory]
     [InlineData(9.0, true)]

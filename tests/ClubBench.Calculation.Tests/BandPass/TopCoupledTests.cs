@@ -27,6 +27,7 @@ public class TopCoupledTests
 
     [Theory]
     [MemberData(nameof(Cases))]
+    [Evidence(typeof(TopCoupledDesign), EvidenceKind.RoundTrip)]
     public void Response_Case_PassesAndRejectsLikeTheTable(ReferenceRow row)
     {
         var filter = Designed(row);
@@ -41,6 +42,7 @@ public class TopCoupledTests
     }
 
     [Fact]
+    [Evidence(typeof(TopCoupledFilter), EvidenceKind.IndependentRecomputation)]
     public void Loss_AnyFilter_IsThatOfTheNodalEquations() =>
         Gen.Select(Gen.Int[2, 3], Gen.Double[1.8, 28], Gen.Double[0.02, 0.12], Gen.Double[80, 400], Gen.Double[0.5, 2]).Sample((order, mhz, width, q, off) =>
         {
@@ -52,6 +54,8 @@ public class TopCoupledTests
         });
 
     [Fact]
+    [Evidence(typeof(TopCoupledFilter), EvidenceKind.Identity)]
+    [Evidence(typeof(TopCoupledDesign), EvidenceKind.Identity)]
     public void NodeResonance_EveryNode_IsTheCentre()
     {
         var filter = TopCoupledDesign.Of(Forty with { Prototype = CouplingPrototype.Butterworth(3) }).Filter!;
@@ -60,6 +64,8 @@ public class TopCoupledTests
     }
 
     [Fact]
+    [Evidence(typeof(TopCoupledFilter), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(TopCoupledDesign), EvidenceKind.ClosedFormLimit)]
     public void Loss_CoilsWithoutLoss_IsNothingAtThePeakAndHalfAtTheEdges()
     {
         var filter = TopCoupledDesign.Of(Forty with { UnloadedQ = 1e9 }).Filter!;
@@ -128,10 +134,6 @@ public class TopCoupledTests
     [InlineData(2.0, 800, new[] { BandPassRemark.Skewed })]
     public void Design_UnusualParts_AreRemarkedOn(double coilUh, double khz, BandPassRemark[] remarks) =>
         Assert.Equal(remarks, TopCoupledDesign.Of(Forty with { Coil = Inductance.FromMicrohenry(coilUh), Bandwidth3dB = Frequency.FromKilohertz(khz) }).Remarks);
-
-    [Fact]
-    public void Response_NoPassBandInReach_IsNone() =>
-        Assert.Null(BandPassResponse.Of(f => Decibels.FromDb(f.Megahertz), Frequency.FromMegahertz(7), Frequency.FromKilohertz(300)));
 
     private static TopCoupledFilter Designed(ReferenceRow row) => TopCoupledDesign.Of(new(
         Prototypes.Of(row), Frequency.FromMegahertz(row.Number("center_mhz")), Frequency.FromKilohertz(row.Number("width_khz")), Inductance.FromMicrohenry(row.Number("coil_uh")), row.Number("unloaded_q"))).Filter!;
