@@ -25,6 +25,8 @@ internal static class FilterWorksheets
         LadderSheets.FiveElements,
         LadderSheets.SevenElements,
         LowPassSearchSheet.Sheet,
+        BandPassSheets.Coupled,
+        BandPassSheets.Trap,
     ];
 
     internal static LowPassDesign Design(WorksheetValues v, int order) =>

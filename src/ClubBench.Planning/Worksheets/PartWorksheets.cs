@@ -26,6 +26,7 @@ internal static class PartWorksheets
         new("capacitance-for-resonance", "tuned-circuits", Thomson, [new("inductance", QuantityKind.Inductance, 2.304e-6), new("frequency", QuantityKind.Frequency, 10.12e6)], v =>
             WorksheetAnswer.Of(Figure.Of("capacitance", TunedCircuit.CapacitanceFor(v.Henry("inductance"), v.Hertz("frequency"))))),
         TrimmerCoverageSheet.Sheet,
+        .. TunedCircuitSheets.All,
         new("toroid-turns", "windings", SourceRef.CommonPractice("definition of the inductance index"), [new("index", QuantityKind.InductanceFactor, 3.0e-9), new("wanted-inductance", QuantityKind.Inductance, 0.675e-6)], v =>
         {
             var choice = TurnsChoice.For(v.Index("index"), v.Henry("wanted-inductance"));
@@ -35,5 +36,6 @@ internal static class PartWorksheets
         WindingAdjustmentSheet.Sheet,
         FerriteSheets.Choke,
         FerriteSheets.Winding,
+        .. CoilSheets.All,
     ];
 }

@@ -37,5 +37,8 @@ internal static class TransmitterWorksheets
                 Figure.Of("capacitance-wanted", CouplingCapacitor.Wanted(at, both)));
         }),
         EmissionLimitSheet.Sheet,
+        .. MatchingSheets.All,
+        SwitchingSheets.ClassE,
+        SwitchingSheets.Gate,
     ];
 }

@@ -11,6 +11,8 @@ public static class WorksheetList
         .. OscillatorWorksheets.All,
         .. TransmitterWorksheets.All,
         .. ReceiverWorksheets.All,
+        .. CrystalSheets.All,
+        .. MeasuringSheets.All,
     ];
 
     /// <summary>The worksheet with this id, or null.</summary>

@@ -68,11 +68,93 @@ public class WorksheetReferenceTests
     [InlineData("audio-band-pass", "shunt-resistor", 3.0e3, 50)]
     [InlineData("audio-band-pass", "feedback-resistor", 180e3, 3e3)]
     [InlineData("sidetone-timer", "pitch", 690, 5)] // kit A
+    [InlineData("loaded-circuit", "loaded-q", 9.375, 0.001)] // X 220, 4400 and 4400, Q 150
+    [InlineData("loaded-circuit", "loss", 0.561, 0.001)]
+    [InlineData("rejection", "rejection", 38.203, 0.005)] // image of a 9 MHz intermediate frequency
+    [InlineData("capacitive-divider", "resistance-at-top", 2920.1, 3)]
+    [InlineData("capacitive-divider", "capacitance-at-top", 106.302e-12, 0.11e-12)]
+    [InlineData("divider-design", "top-capacitor", 111.08e-12, 0.11e-12)]
+    [InlineData("divider-design", "bottom-capacitor", 775.58e-12, 0.8e-12)]
+    [InlineData("series-capacitor", "series-capacitor", 58.367e-12, 0.06e-12)]
+    [InlineData("series-capacitor", "capacitance-at-top", 57.394e-12, 0.06e-12)]
+    [InlineData("link-winding", "exact-turns", 3.382, 0.0035)]
+    [InlineData("coupled-band-pass", "coupling-capacitor", 7.507e-12, 0.015e-12)] // 7.1 MHz, 300 kHz, two coils
+    [InlineData("coupled-band-pass", "end-node", 243.74e-12, 0.5e-12)]
+    [InlineData("coupled-band-pass", "end-resistance", 3586.4, 7.2)]
+    [InlineData("coupled-band-pass", "loss", 1.583, 0.03)]
+    [InlineData("coupled-band-pass", "bandwidth", 300.1e3, 0.9e3)]
+    [InlineData("coupled-band-pass", "second-harmonic", 57.6, 0.2)]
+    [InlineData("line-trap", "trap-depth", 29.87, 0.01)]
+    [InlineData("line-trap", "loss", 0.692, 0.01)]
+    [InlineData("air-core-coil", "inductance", 0.6417e-6, 0.002e-6)]
+    [InlineData("air-core-coil", "self-capacitance", 0.463e-12, 0.0014e-12)]
+    [InlineData("inductance-by-two-capacitors", "inductance", 4.2686e-6, 0.0085e-6)]
+    [InlineData("inductance-by-two-capacitors", "stray", 6.543e-12, 0.014e-12)]
+    [InlineData("alternating-flux", "flux", 2.797e-3, 0.014e-3)] // 27.97 G
+    [InlineData("alternating-flux", "flux-guide", 5.66e-3, 0.028e-3)]
+    [InlineData("apparent-inductance", "self-resonance", 56.26e6, 0.03e6)]
+    [InlineData("apparent-inductance", "apparent-inductance", 5.422e-6, 0.003e-6)] // 5.336 uH by hand: / (1 - (7.1/56.26)^2)
+    [InlineData("matching-l", "part-1", 0.485325e-6, 5e-11)]
+    [InlineData("matching-l", "part-2", 776.52e-12, 0.08e-12)]
+    [InlineData("matching-pi", "part-1", 1344.97e-12, 0.14e-12)]
+    [InlineData("matching-pi", "part-2", 0.473513e-6, 5e-11)]
+    [InlineData("matching-pi", "part-3", 2196.33e-12, 0.22e-12)]
+    [InlineData("matching-t", "part-1", 0.840607e-6, 1e-10)]
+    [InlineData("matching-t", "part-2", 757.62e-12, 0.08e-12)]
+    [InlineData("matching-t", "part-3", 1.37271e-6, 2e-10)]
+    [InlineData("resistive-pad", "outer-resistors", 150.48, 0.016)] // 6 dB
+    [InlineData("resistive-pad", "inner-resistor", 37.352, 0.004)]
+    [InlineData("mismatch", "line-voltage", 38.73, 0.01)] // 5 W at 3:1
+    [InlineData("feedback-stage", "feedback-resistor", 850, 0.09)]
+    [InlineData("feedback-stage", "stage-gain", 18.062, 0.002)]
+    [InlineData("feedback-stage", "output-resistance", 150, 0.02)]
+    [InlineData("class-e", "load-needed", 13.6648, 0.0014)]
+    [InlineData("class-e", "switch-capacitor", 343.42e-12, 0.035e-12)]
+    [InlineData("class-e", "series-capacitor", 441.38e-12, 0.045e-12)]
+    [InlineData("class-e", "series-coil", 1.53156e-6, 0.00016e-6)]
+    [InlineData("gate-drive", "peak-current", 0.0482, 0.00025)]
+    [InlineData("power-from-voltage", "power", 1, 1e-6)]
+    [InlineData("power-from-voltage", "power-level", 30, 1e-6)]
+    [InlineData("power-from-voltage", "effective-voltage", 7.071, 0.001)]
+    [InlineData("peak-detector", "power", 4.973, 0.001)]
+    [InlineData("two-tone", "peak-envelope", 5, 0.001)] // 22.36 V is 5 W in 50 ohm
+    [InlineData("two-tone", "each-tone", 1.25, 0.001)]
+    [InlineData("directivity", "return-loss-least", 17.61, 0.01)]
+    [InlineData("directivity", "return-loss-most", 23.30, 0.01)]
+    [InlineData("mixer-level", "power-level", 7.0, 0.01)]
+    [InlineData("telegraph-speed", "necessary-bandwidth", 100, 1e-9)]
+    [InlineData("telegraph-speed", "necessary-bandwidth-steady", 60, 1e-9)]
+    [InlineData("telegraph-speed", "dot", 0.048, 1e-12)]
+    [InlineData("keying-edge", "hard-edge", -39.8, 0.1)]
+    [InlineData("keying-edge", "soft-edge", -51.4, 0.1)]
+    [InlineData("crystal-parameters", "motional-inductance", 28.47457e-3, 3e-7)]
+    [InlineData("crystal-parameters", "parallel-resonance", 7_044_046, 1)]
+    [InlineData("crystal-parameters", "crystal-q", 62_887, 1)]
+    [InlineData("crystal-load", "loaded-frequency", 7_031_833.7, 0.5)]
+    [InlineData("crystal-load", "slope-per-picofarad", -53.14, 0.05)]
+    [InlineData("crystal-load", "loss-resistance", 26.45, 0.01)]
+    [InlineData("crystal-pair", "midway-resistance", 82.0, 0.2)]
+    [InlineData("crystal-by-two-loads", "motional-capacitance", 20.436e-15, 0.001e-15)] // by hand from both shifts
+    [InlineData("crystal-by-two-loads", "static-capacitance", 5.145e-12, 0.001e-12)]
+    [InlineData("crystal-by-sweep", "motional-resistance", 20.0, 0.005)] // 25 ohm times (1.8 - 1)
+    [InlineData("crystal-by-sweep", "motional-inductance", 28.477e-3, 0.005e-3)] // 45 ohm over 2 pi 251.5 Hz
+    [InlineData("intermediate-frequency", "oscillator", 18.975e6, 1)] // sum of 14.060 and 4.915 MHz
+    [InlineData("intermediate-frequency", "image", 23.890e6, 1)]
+    [InlineData("noise-cascade", "noise-figure", 12.0, 0.01)] // losses of 7 dB ahead of 5 dB
     public void Run_Defaults_GiveTheKnownFigure(string id, string figure, double si, double within) =>
         Assert.Equal(si, Figure(id, figure), within);
 
     [Theory]
     [InlineData("trimmer-coverage", "worksheet-verdict.not-covered")]
+    [InlineData("link-winding", "worksheet-verdict.link-near")]
+    [InlineData("coupled-band-pass", "worksheet-verdict.band-pass-good")]
+    [InlineData("line-trap", "worksheet-verdict.trap-costs")]
+    [InlineData("inductance-by-two-capacitors", "worksheet-verdict.stray-usual")]
+    [InlineData("alternating-flux", "core-load.good")]
+    [InlineData("class-e", "worksheet-verdict.device-fits")]
+    [InlineData("mixer-level", "mixer-drive.right")]
+    [InlineData("crystal-pair", "pair-match.loose")]
+    [InlineData("intermediate-frequency", "worksheet-verdict.inverts")]
     [InlineData("toroid-fit", "worksheet-verdict.fits")]
     [InlineData("winding-adjustment", "winding-action.spread")]
     [InlineData("ferrite-choke", "verdict.leave")]
