@@ -15,6 +15,7 @@ public sealed record ParsedQuantity(double Si, string Echo, string Typed);
 public static partial class QuantityText
 {
     private const int LongestText = 40;
+    private const string Zero = "quantity.zero";
 
     /// <summary>
     /// Reads a quantity. Point and comma are both decimal marks whatever the culture, and never thousands marks; blanks, U+2212, units, prefixes and
@@ -23,7 +24,7 @@ public static partial class QuantityText
     /// <param name="text">What was typed.</param>
     /// <param name="kind">What it measures.</param>
     /// <param name="defaultUnit">Unit of a bare number; null where the unit must be typed (counts and pure numbers have none).</param>
-    /// <param name="mayBeNegative">Whether a minus sign is taken where the kind itself has none, such as the offset of a meter.</param>
+    /// <param name="mayBeNegative">Whether zero and a minus sign are taken where a part of this kind has none, such as in the offset of a meter.</param>
     /// <param name="path">Field path for the message.</param>
     /// <param name="culture">Culture of the echo.</param>
     public static Outcome<ParsedQuantity> Parse(
@@ -35,7 +36,7 @@ public static partial class QuantityText
         if (Refusal(plain, unsigned) is { } refused) return Fail(refused);
         if (isNegative && !mayBeNegative && !HasSign(kind)) return Fail("quantity.negative");
         var (si, code) = PartOf(kind) is { } part ? PartValue(unsigned, part, defaultUnit) : Value(unsigned, kind, defaultUnit);
-        if (code is not null) return Fail(code);
+        if (code is not null && !(code == Zero && mayBeNegative)) return Fail(code);
         if (kind == QuantityKind.Count && si != Math.Truncate(si)) return Fail("quantity.not-whole");
         var signed = isNegative ? -si : si;
         return Outcome<ParsedQuantity>.Success(new(signed, Echo(kind, signed, culture), text!));
@@ -79,7 +80,7 @@ public static partial class QuantityText
             ValueRefusal.None => null,
             ValueRefusal.NoUnit => "quantity.no-unit",
             ValueRefusal.WrongLetter or ValueRefusal.TrailingCharacters => "quantity.unit-unknown",
-            ValueRefusal.Zero => "quantity.zero",
+            ValueRefusal.Zero => Zero,
             ValueRefusal.Negative => "quantity.negative",
             _ => "quantity.not-a-number",
         });

@@ -17,6 +17,8 @@ public readonly record struct QuantityParts(string Number, string Unit)
 /// <remarks>A null culture is the current one; it decides the decimal mark of what is written, never what can be read.</remarks>
 public static partial class QuantityText
 {
+    private const int MostTypedDigits = 9;
+
     private const string Minus = "\u2212";
 
     /// <summary>Writes a figure: its own digits, or the usual number of its kind. Given figures lose idle zeros, computed and measured ones keep them.</summary>
@@ -37,6 +39,10 @@ public static partial class QuantityText
     /// <summary>A value as number and unit.</summary>
     public static QuantityParts Split(QuantityKind kind, double si, int? digits = null, CultureInfo? culture = null) =>
         Parts(kind, si, NumberStyle.Of(kind, si, digits, digits is not null), culture);
+
+    /// <summary>A value as one would type it: nine digits at most, no idle zeros.</summary>
+    public static QuantityParts Entry(QuantityKind kind, double si, CultureInfo? culture = null) =>
+        Parts(kind, si, NumberStyle.Of(kind, si, MostTypedDigits, keepsZeros: false), culture);
 
     /// <summary>Writes a figure with its expanded uncertainty (k = 2), "0.714 ± 0.020 µH"; without one as usual.</summary>
     public static string FormatUncertain(Figure figure, CultureInfo? culture = null)

@@ -81,4 +81,13 @@ public class QuantityTextParseTests
             ? read.Succeeded && Math.Abs(read.Value.Si - si) <= 1e-12 * Math.Abs(si) && read.Value.Typed == row.Text
             : !read.Succeeded && read.Messages.Single().Code == row.Code;
     }
+
+    [Theory]
+    [InlineData("0")]
+    [InlineData("0 pF")]
+    public void Parse_ZeroOfAPart_IsTakenOnlyWhereAnythingMayStand(string text)
+    {
+        Assert.Equal("quantity.zero", Assert.Single(QuantityText.Parse(text, QuantityKind.Capacitance, "pF").Messages).Code);
+        Assert.Equal(0, QuantityText.Parse(text, QuantityKind.Capacitance, "pF", mayBeNegative: true).Value.Si);
+    }
 }
