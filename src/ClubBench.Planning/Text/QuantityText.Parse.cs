@@ -15,6 +15,7 @@ public sealed record ParsedQuantity(double Si, string Echo, string Typed);
 public static partial class QuantityText
 {
     private const int LongestText = 40;
+    private const string Femtofarad = "fF";
     private const string Zero = "quantity.zero";
 
     /// <summary>
@@ -35,7 +36,7 @@ public static partial class QuantityText
         var unsigned = plain.TrimStart('-', '+');
         if (Refusal(plain, unsigned) is { } refused) return Fail(refused);
         if (isNegative && !mayBeNegative && !HasSign(kind)) return Fail("quantity.negative");
-        var (si, code) = PartOf(kind) is { } part ? PartValue(unsigned, part, defaultUnit) : Value(unsigned, kind, defaultUnit);
+        var (si, code) = PartOf(kind) is { } part && !IsFemtofarad(unsigned, defaultUnit) ? PartValue(unsigned, part, defaultUnit) : Value(unsigned, kind, defaultUnit);
         if (code is not null && !(code == Zero && mayBeNegative)) return Fail(code);
         if (kind == QuantityKind.Count && si != Math.Truncate(si)) return Fail("quantity.not-whole");
         var signed = isNegative ? -si : si;
@@ -61,6 +62,10 @@ public static partial class QuantityText
             };
         return plain.ToString();
     }
+
+    // No part is marked in femtofarad, crystals are told in it.
+    private static bool IsFemtofarad(string text, string? defaultUnit) =>
+        text.EndsWith(Femtofarad, StringComparison.OrdinalIgnoreCase) || (defaultUnit == Femtofarad && !text.Any(c => char.IsAsciiLetter(c) && c is not ('e' or 'E')));
 
     private static string? Refusal(string plain, string unsigned) => plain switch
     {

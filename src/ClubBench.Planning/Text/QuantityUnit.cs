@@ -10,6 +10,9 @@ namespace ClubBench.Planning.Text;
 /// <param name="Times">Factor beside the power of ten, 1 for nearly all.</param>
 public sealed record QuantityUnit(string Symbol, int Exponent, double? From, IReadOnlyList<string> Spellings, double Times = 1)
 {
+    /// <summary>SI magnitude below which this unit is written; zero keeps the unit of larger values.</summary>
+    public double Below { get; init; }
+
     /// <summary>SI value of one of this unit.</summary>
     public double Si => Times * Math.Pow(10, Exponent);
 
@@ -31,7 +34,7 @@ public static class QuantityUnits
         [QuantityKind.Frequency] = [Unit("Hz", 0, 0), Unit("kHz", 3, 1e3, "k"), Unit("MHz", 6, 1e6, "M"), Unit("GHz", 9, 1e9)],
         [QuantityKind.FrequencyShift] = [Unit("Hz", 0, 0), Unit("kHz", 3, 1e3, "k"), Unit("MHz", 6, 1e6, "M")],
         [QuantityKind.Inductance] = [Unit("nH", -9, 0), Unit("µH", -6, 1e-7), Unit("mH", -3, 1e-3), Unit("H", 0, 1)],
-        [QuantityKind.Capacitance] = [Unit("pF", -12, 0), Unit("nF", -9, 1e-9), Unit("µF", -6, 1e-6), Unit("mF", -3, null)],
+        [QuantityKind.Capacitance] = [Unit("fF", -15, null) with { Below = 1e-13 }, Unit("pF", -12, 0), Unit("nF", -9, 1e-9), Unit("µF", -6, 1e-6), Unit("mF", -3, null)],
         [QuantityKind.Resistance] = [Unit("mΩ", -3, 0), Unit("Ω", 0, 0.1), Unit("kΩ", 3, 1e3), Unit("MΩ", 6, 1e6)],
         [QuantityKind.Voltage] = [Unit("µV", -6, 0), Unit("mV", -3, 1e-3), Unit("V", 0, 1)],
         [QuantityKind.PeakToPeakVoltage] = [Unit("mV p-p", -3, 0, "mVpp", "mV"), Unit("V p-p", 0, 1, "Vpp", "V")],
@@ -56,7 +59,8 @@ public static class QuantityUnits
         unit.Length == 0 ? null : ByKind[kind].FirstOrDefault(u => u.IsSpelt(unit));
 
     /// <summary>The unit a value is written in.</summary>
-    internal static QuantityUnit For(QuantityKind kind, double si) => ByKind[kind].Last(u => u.From is { } from && Math.Abs(si) >= from);
+    internal static QuantityUnit For(QuantityKind kind, double si) => 
+        ByKind[kind].FirstOrDefault(u => si != 0 && Math.Abs(si) < u.Below) ?? ByKind[kind].Last(u => u.From is { } from && Math.Abs(si) >= from);
 
     private static QuantityUnit Unit(string symbol, int exponent, double? from, params string[] spellings) =>
         new(symbol, exponent, from, [QuantityText.Plain(symbol), .. spellings]);

@@ -56,7 +56,7 @@ internal static class BandPassSheets
     {
         var verdict = design.Remarks.Count > 0 ? Phrases.CodeOf(design.Remarks[0]) : "worksheet-verdict.band-pass-good";
         var response = BandPassResponse.Of(filter.Loss, task.Center, task.Bandwidth3dB);
-        Figure[] passing = response is null ? [] : [Figure.Of("loss", response.PeakLoss), Figure.Of("bandwidth", QuantityKind.Frequency, response.Band.WidthHertz)];
+        Figure[] passing = response is null ? [] : [Figure.Of("loss", response.PeakLoss), Figure.Of("bandwidth", QuantityKind.Frequency, response.Band.WidthHertz) with { Digits = 4 }];
         return Judged(
             verdict,
             [

@@ -32,7 +32,8 @@ public static class BenchUnits
 
     private static IEnumerable<BenchSpelling> PrefixAlone(QuantityKind kind, QuantityUnit unit)
     {
-        if (kind is not (QuantityKind.Inductance or QuantityKind.Capacitance or QuantityKind.Resistance)) return [];
+        // No part is marked in the units of very small values.
+        if (kind is not (QuantityKind.Inductance or QuantityKind.Capacitance or QuantityKind.Resistance) || unit.Below > 0) return [];
         if (unit.Exponent == 0) return kind == QuantityKind.Resistance ? [new BenchSpelling("R", unit.Si)] : [];
         return [new BenchSpelling(unit.Spellings[0][..1], unit.Si)];
     }
