@@ -38,6 +38,19 @@ public static class Phrases
     /// <summary>A line of a card in words.</summary>
     public static string Say(Line line, string? stageKindId = null, CultureInfo? culture = null) => Filled(line.Code, line.Figures, [], stageKindId, culture);
 
+    /// <summary>A marking and what it is easily mistaken for, in words.</summary>
+    public static string Say(LookAlike lookAlike, CultureInfo? culture = null)
+    {
+        var words = new Dictionary<string, string>(StringComparer.Ordinal)
+        {
+            ["marking"] = lookAlike.Marking,
+            ["value"] = QuantityText.Format(QuantityKind.Capacitance, lookAlike.Value.Farad, null, culture),
+            ["other"] = lookAlike.Other ?? "",
+            ["other-value"] = QuantityText.Format(QuantityKind.Capacitance, lookAlike.OtherValue.Farad, null, culture),
+        };
+        return Filled(lookAlike.Other is null ? "look-alike.digits" : "look-alike.pair", [], words, null, culture);
+    }
+
     /// <summary>A step of advice in words.</summary>
     public static string Say(Step step, string? stageKindId = null, CultureInfo? culture = null) => Filled(step.Code, step.Figures, [], stageKindId, culture);
 

@@ -5,13 +5,18 @@ namespace ClubBench.Printing.Layout;
 /// <param name="Note">Note; empty for none.</param>
 /// <param name="Body">What stands below.</param>
 /// <param name="StartsPage">Whether a card that needs two pages goes on to the second one here.</param>
-internal sealed record Section(string Title, string Note, Stack Body, bool StartsPage = false) : IBlock
+internal sealed record Section(string Title, IReadOnlyList<Run> Note, Stack Body, bool StartsPage = false) : IBlock
 {
+    public Section(string title, string note, Stack body, bool startsPage = false)
+        : this(title, note.Length == 0 ? [] : [new Run(note, TextStyle.Body)], body, startsPage)
+    {
+    }
+
     private const float RuleGap = 2;
     private const float BelowRule = 1.5f;
     private const float NoteGap = 14;
 
-    private Paragraph NoteBlock => new(Note, TextStyle.Body);
+    private Paragraph NoteBlock => new(Note);
 
     public float Height(ICardSurface surface, float width) => HeadHeight(surface, width) + Body.Height(surface, width);
 
@@ -19,7 +24,8 @@ internal sealed record Section(string Title, string Note, Stack Body, bool Start
     {
         var head = HeadHeight(surface, area.Width);
         surface.Text(Title, area.X, area.Y + TextStyle.Heading.Ascent, TextStyle.Heading);
-        if (FitsBeside(surface, area.Width)) surface.Text(Note, area.Right, area.Y + TextStyle.Heading.Ascent, TextStyle.Body with { Side = TextSide.End });
+        var beside = TextStyle.Heading.Ascent - TextStyle.Body.Ascent;
+        if (FitsBeside(surface, area.Width)) NoteBlock.Draw(surface, new Area(area.Right - NoteBlock.WidthOf(surface), area.Y + beside, area.Width, 0));
         else NoteBlock.Draw(surface, new Area(area.X, area.Y + TextStyle.Heading.LineHeight, area.Width, 0));
         var rule = area.Y + head - BelowRule;
         surface.Line(area.X, rule, area.Right, rule, 1.4f);
@@ -36,7 +42,7 @@ internal sealed record Section(string Title, string Note, Stack Body, bool Start
 
     private float HeadHeight(ICardSurface surface, float width)
     {
-        var note = Note.Length == 0 || FitsBeside(surface, width) ? 0 : NoteBlock.Height(surface, width);
+        var note = Note.Count == 0 || FitsBeside(surface, width) ? 0 : NoteBlock.Height(surface, width);
         return TextStyle.Heading.LineHeight + note + RuleGap + BelowRule;
     }
 }

@@ -63,7 +63,7 @@ internal static class CardBody
     {
         var items = content.Notes.BeforePower.Select(l => Phrases.Say(l, content.Kind)).ToList();
         if (content.Notes.SupplyLimit is { } limit) items.Add(Texts.Say("card.supply-limit", QuantityText.Format(limit)));
-        return items.Count == 0 ? null : new Section(Texts.Of("card.power"), "", new Stack([new TickRow(items)]), StartsPage: true);
+        return items.Count == 0 ? null : new Section(Texts.Of("card.power"), "", new Stack([new TickRow(items)]), startsPage: true);
     }
 
     private static Section? IfOutside(CardContent content)

@@ -1,6 +1,7 @@
 using System.Globalization;
 using ClubBench.Planning.Cards;
 using ClubBench.Planning.Kits;
+using ClubBench.Planning.Text;
 using ClubBench.Printing.Layout;
 
 namespace ClubBench.Printing.Sheets;
@@ -27,7 +28,7 @@ internal static class FitSection
             new(Texts.Of("card.pieces"), 52), new(Texts.Of("card.pocket"), 50), new(Texts.Of("card.done"), 36),
         };
         var table = new Table(columns, [.. content.Fit.Select(r => Row(content, r))]);
-        return new Section(Texts.Of("card.fit"), string.Join(' ', Notes(card)), new Stack([table]));
+        return new Section(Texts.Of("card.fit"), Note(card), new Stack([table]));
     }
 
     private static ICell[] Row(CardContent content, FittingRow row) =>
@@ -43,6 +44,14 @@ internal static class FitSection
     private static string PiecesOf(FittingRow row) => row.PiecesPerPlace == 1
         ? row.Designators.Count.ToString(CultureInfo.CurrentCulture)
         : Texts.Say("card.piece-each", row.Designators.Count, row.PiecesPerPlace).Replace(' ', '\u00A0');
+
+    /// <summary>Markings that are easily misread stand out before all else.</summary>
+    private static Run[] Note(PrintedCard card)
+    {
+        var notes = new Run(string.Join(' ', Notes(card)), TextStyle.Body);
+        var misread = string.Join(' ', LookAlike.Of(card.Content).Select(l => Phrases.Say(l)));
+        return misread.Length == 0 ? [notes] : [new Run(misread + " ", TextStyle.Strong), notes];
+    }
 
     /// <summary>Where the parts lie, and the places where another type of part would drift or heat up.</summary>
     private static IEnumerable<string> Notes(PrintedCard card)

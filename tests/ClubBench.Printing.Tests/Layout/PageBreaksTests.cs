@@ -13,7 +13,7 @@ public class PageBreaksTests
     [Fact]
     public void Of_TooMuch_StartsSecondPageAtTheSectionThatSaysSo()
     {
-        var second = new Section("Before power", "", new Stack([Rows(10)]), StartsPage: true);
+        var second = new Section("Before power", "", new Stack([Rows(10)]), startsPage: true);
 
         var pages = PageBreaks.Of(s_surface, [Rows(20), second], 5, 500, 600);
 

@@ -92,6 +92,23 @@ public class CardPagesTests
     }
 
     [Fact]
+    public void Draw_LookAlikeMarkings_StandOutAtTheFittingList()
+    {
+        var warning = Drawn(SampleCards.LowPass).Texts.Single(t => t.Text.Contains("331 is 330\u00A0pF; 33 or 330 is 33\u00A0pF.", StringComparison.Ordinal));
+
+        Assert.Equal(TextStyle.Strong, warning.Style);
+        Assert.Equal(Drawn(SampleCards.LowPass).Texts.Single(t => t.Text == "Fit, in this order").Baseline, warning.Baseline, 0.5);
+    }
+
+    [Fact]
+    public void Draw_NoLookAlikeMarkings_SaysNothingOfThem()
+    {
+        var card = SampleCards.LowPass with { Fit = [.. SampleCards.LowPass.Fit.Where(r => r.Designators[0] != "C16")] };
+
+        Assert.DoesNotContain(Drawn(card).Texts, t => t.Text.Contains(" is 330", StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void Draw_KeptStage_SaysSoAndHasNothingToFit()
     {
         var texts = Drawn(SampleCards.Kept).Texts.Select(t => t.Text).ToList();
