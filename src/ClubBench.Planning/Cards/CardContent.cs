@@ -9,19 +9,46 @@ namespace ClubBench.Planning.Cards;
 /// <summary>A line of text by code, with its figures.</summary>
 /// <param name="Code">Text code.</param>
 /// <param name="Figures">Figures for the text.</param>
-public sealed record Line(string Code, IReadOnlyList<Figure> Figures)
+public record Line(string Code, IReadOnlyList<Figure> Figures)
 {
     /// <summary>A line with figures.</summary>
     public static Line Of(string code, params IReadOnlyList<Figure> figures) => new(code, figures);
+}
+
+/// <summary>Steps of a card at which something can happen to somebody.</summary>
+public enum CardStep
+{
+    /// <summary>Looking over the board and switching the supply on.</summary>
+    BeforePower,
+
+    /// <summary>Taking the readings.</summary>
+    Measure,
+}
+
+/// <summary>A danger, told at the step where it arises.</summary>
+/// <param name="Code">Text code.</param>
+/// <param name="Figures">Figures for the text.</param>
+/// <param name="At">The step; null where it holds for the whole stage, as on cards from before steps were told apart.</param>
+public sealed record Caution(string Code, IReadOnlyList<Figure> Figures, CardStep? At) : Line(Code, Figures)
+{
+    /// <summary>A caution for the moment before the supply comes on.</summary>
+    public static Caution BeforePower(string code) => new(code, [], CardStep.BeforePower);
+
+    /// <summary>A caution for taking the readings.</summary>
+    public static Caution Measuring(string code) => new(code, [], CardStep.Measure);
 }
 
 /// <summary>What a stage kind adds to the card besides parts and readings.</summary>
 /// <param name="BeforePower">Checks before power, in order.</param>
 /// <param name="SupplyLimit">Current limit for the first power-up; null where the stage draws none of its own.</param>
 /// <param name="IfOutside">What to do when a reading is outside, cheapest first; three at most.</param>
-/// <param name="Cautions">Dangers of this stage.</param>
+/// <param name="Cautions">Dangers of this stage, each with its step.</param>
 /// <param name="SetUpAll">Set-up that holds for all readings of the card; null for none.</param>
-public sealed record CardNotes(IReadOnlyList<Line> BeforePower, Figure? SupplyLimit, IReadOnlyList<Line> IfOutside, IReadOnlyList<Line> Cautions, Line? SetUpAll);
+public sealed record CardNotes(IReadOnlyList<Line> BeforePower, Figure? SupplyLimit, IReadOnlyList<Line> IfOutside, IReadOnlyList<Caution> Cautions, Line? SetUpAll)
+{
+    /// <summary>Dangers of one step; null those of the whole stage.</summary>
+    public IReadOnlyList<Caution> CautionsAt(CardStep? step) => [.. Cautions.Where(c => c.At == step)];
+}
 
 /// <summary>One row of the fitting list: equal parts of one card stand together.</summary>
 /// <param name="Designators">Places, in order.</param>

@@ -28,9 +28,9 @@ internal static class CardBody
             BeforePower(content),
             MeasureSection.Of(card),
             IfOutside(content),
+            CautionOf(content, null),
+            SignOff(),
         };
-        blocks.AddRange(Cautions(content));
-        blocks.Add(SignOff());
         return [.. blocks.OfType<IBlock>()];
     }
 
@@ -63,7 +63,8 @@ internal static class CardBody
     {
         var items = content.Notes.BeforePower.Select(l => Phrases.Say(l, content.Kind)).ToList();
         if (content.Notes.SupplyLimit is { } limit) items.Add(Texts.Say("card.supply-limit", QuantityText.Format(limit)));
-        return items.Count == 0 ? null : new Section(Texts.Of("card.power"), "", new Stack([new TickRow(items)]), startsPage: true);
+        var blocks = new IBlock?[] { CautionOf(content, CardStep.BeforePower), items.Count == 0 ? null : new TickRow(items) }.OfType<IBlock>().ToList();
+        return blocks.Count == 0 ? null : new Section(Texts.Of("card.power"), "", new Stack(blocks), startsPage: true);
     }
 
     private static Section? IfOutside(CardContent content)
@@ -73,11 +74,11 @@ internal static class CardBody
         return new Section(Texts.Of("card.outside"), "", new Stack([.. steps]));
     }
 
-    private static IEnumerable<CautionBox> Cautions(CardContent content)
+    /// <summary>The dangers of a step in one frame, the first one strong; null where it has none.</summary>
+    public static CautionBox? CautionOf(CardContent content, CardStep? step)
     {
-        var texts = content.Notes.Cautions.Select(l => Phrases.Say(l, content.Kind)).ToList();
-        if (texts.Count == 0) yield break;
-        yield return new CautionBox([new Run(texts[0], TextStyle.Strong), .. texts.Skip(1).Select(t => new Run(" " + t, TextStyle.Body))]);
+        var texts = content.Notes.CautionsAt(step).Select(l => Phrases.Say(l, content.Kind)).ToList();
+        return texts.Count == 0 ? null : new CautionBox([new Run(texts[0], TextStyle.Strong), .. texts.Skip(1).Select(t => new Run(" " + t, TextStyle.Body))]);
     }
 
     private static SignOffBoxes SignOff() =>

@@ -9,11 +9,12 @@ namespace ClubBench.Printing.Sheets;
 /// <summary>The readings to take once the parts are in.</summary>
 internal static class MeasureSection
 {
-    /// <summary>The section; null where nothing is left to read.</summary>
-    public static Section? Of(PrintedCard card)
+    /// <summary>The section, its dangers first; where nothing is left to read only those, if there are any.</summary>
+    public static IBlock? Of(PrintedCard card)
     {
+        var caution = CardBody.CautionOf(card.Content, CardStep.Measure);
         var readings = CardText.ReadingsAfterFitting(card.Content).ToList();
-        if (readings.Count == 0) return null;
+        if (readings.Count == 0) return caution;
         var sameSetUp = readings.Select(r => r.SetUp).Distinct(StringComparer.Ordinal).Count() == 1;
         var note = card.Content.Notes.SetUpAll is { } all ? Phrases.Say(all, card.Content.Kind) : sameSetUp ? SetUp(card.Content, readings[0]) : "";
         var columns = new Column[]
@@ -22,7 +23,7 @@ internal static class MeasureSection
             new(Texts.Of("card.window"), 116), new(Texts.Of("card.yours"), 78), new(Texts.Of("card.meter"), 44),
         };
         var rows = readings.Select((r, i) => Row(card, r, i + 1, note.Length == 0));
-        return new Section(Texts.Of("card.measure"), note, new Stack([new Table(columns, [.. rows])]));
+        return new Section(Texts.Of("card.measure"), note, new Stack([.. new IBlock?[] { caution, new Table(columns, [.. rows]) }.OfType<IBlock>()]));
     }
 
     private static string SetUp(CardContent content, ExpectedReading reading) =>

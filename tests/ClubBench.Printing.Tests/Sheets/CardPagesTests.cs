@@ -108,6 +108,29 @@ public class CardPagesTests
         Assert.DoesNotContain(Drawn(card).Texts, t => t.Text.Contains(" is 330", StringComparison.Ordinal));
     }
 
+    [Theory]
+    [InlineData("A4", "Measure", "Dummy load on before", "1 mA or less")]
+    [InlineData("A12", "Before power", "Check the polarity", "Measure")]
+    public void Draw_Caution_StandsBetweenItsHeadingAndWhatFollows(string stage, string heading, string caution, string follows)
+    {
+        var texts = Drawn(SamplePlans.QuernOn("20 m").Stage(stage).Card).Pages[0].Texts;
+
+        Assert.InRange(BaselineOf(texts, caution), BaselineOf(texts, heading), BaselineOf(texts, follows));
+    }
+
+    [Fact]
+    public void Draw_CautionOfNoStep_StandsAtTheEnd()
+    {
+        var notes = SampleCards.LowPass.Notes with { Cautions = [new Caution("caution.rf-burns", [], null)] };
+        var texts = Drawn(SampleCards.LowPass with { Notes = notes }).Pages[0].Texts;
+
+        Assert.InRange(BaselineOf(texts, "Then: dummy load on"), BaselineOf(texts, "If outside"), BaselineOf(texts, "builder"));
+    }
+
+    [Fact]
+    public void Draw_NothingToMeasure_StillShowsItsCaution() =>
+        Assert.Contains(Drawn(SampleCards.LowPass with { Measure = [] }).Texts, t => t.Text.StartsWith("No key-down", StringComparison.Ordinal));
+
     [Fact]
     public void Draw_KeptStage_SaysSoAndHasNothingToFit()
     {
@@ -171,6 +194,9 @@ public class CardPagesTests
     }
 
     private static string Joined(RecordingSurface surface) => string.Join(' ', surface.Texts.Select(t => t.Text.Trim(' '))).Replace('\u00A0', ' ');
+
+    private static float BaselineOf(IEnumerable<RecordingSurface.Written> texts, string start) =>
+        texts.First(t => t.Text.Replace('\u00A0', ' ').StartsWith(start, StringComparison.Ordinal)).Baseline;
 
     private static bool IsTick(Area box) => Math.Abs(box.Width - PaperSize.Millimetres(5)) < 0.01f && Math.Abs(box.Height - box.Width) < 0.01f;
 

@@ -86,7 +86,7 @@ internal sealed class AudioOutputKind : StageKind<OutputStage, OutputModel>
         [Line.Of("line.look-at-joints"), Line.Of("line.notch-right-way"), Line.Of("line.electrolytics-right-way")],
         Figure.Of("limit", QuantityKind.Current, 0.05),
         [Line.Of("line.idle-high"), Line.Of("line.idle-none"), Line.Of("line.call-mentor")],
-        [Line.Of("caution.phones-off-ears"), Line.Of("caution.electrolytics-burst")],
+        [Caution.BeforePower("caution.phones-off-ears"), Caution.BeforePower("caution.electrolytics-burst"), Caution.Measuring("caution.meter-in-series")],
         null);
 
     protected override OutputStage Read(StageDocument stage) => OutputStage.Read(stage);

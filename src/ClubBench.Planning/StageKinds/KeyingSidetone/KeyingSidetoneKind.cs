@@ -79,7 +79,7 @@ internal sealed class KeyingSidetoneKind : StageKind<KeyingStage, KeyingModel>
         [Line.Of("line.look-at-joints"), Line.Of("line.notch-right-way"), Line.Of("line.keyed-supply-off")],
         Figure.Of("limit", QuantityKind.Current, 0.05),
         [Line.Of("line.edge-fast"), Line.Of("line.sidetone-off"), Line.Of("line.call-mentor")],
-        [Line.Of("caution.no-key-down-before-filter")],
+        [Caution.Measuring("caution.no-key-down-before-filter")],
         Line.Of("set-up.final-disconnected"));
 
     protected override KeyingStage Read(StageDocument stage) => KeyingStage.Read(stage);

@@ -47,7 +47,7 @@ internal sealed class LowPassLadderKind : StageKind<LowPassStage, LowPassModel>
         [Line.Of("line.look-at-joints"), Line.Of("line.through-under-one-ohm"), Line.Of("line.ends-to-ground-open")],
         null,
         [Line.Of("line.coil-off-a-little"), Line.Of("line.return-loss-low"), Line.Of("line.still-outside")],
-        [Line.Of("caution.no-key-down-before-filter"), Line.Of("caution.rf-burns")],
+        [Caution.Measuring("caution.no-key-down-before-filter"), Caution.Measuring("caution.rf-burns")],
         Line.Of("set-up.swept-cold"));
 
     public override BoardYield? Yield(StageDocument stage, Surroundings surroundings, IReadOnlyList<Demand> demands, ulong seed) =>

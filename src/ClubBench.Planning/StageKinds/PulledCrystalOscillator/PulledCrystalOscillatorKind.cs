@@ -62,7 +62,7 @@ internal sealed class PulledCrystalOscillatorKind : StageKind<OscillatorStage, O
         [Line.Of("line.crystals-both-soldered"), Line.Of("line.supply-to-ground-not-short")],
         Figure.Of("limit", QuantityKind.Current, 0.05),
         [Line.Of("line.span-of-one-crystal"), Line.Of("line.end-off-a-little"), Line.Of("line.no-oscillation")],
-        [Line.Of("caution.measure-behind-buffer")],
+        [Caution.Measuring("caution.final-stays-off"), Caution.Measuring("caution.measure-behind-buffer")],
         Line.Of("set-up.counter-at-buffer"));
 
     protected override OscillatorStage Read(StageDocument stage) => OscillatorStage.Read(stage);

@@ -72,7 +72,7 @@ internal sealed class SeriesTunedTapKind : StageKind<TapStage, TapModel>
         [CardLine.Of("line.look-at-joints"), CardLine.Of("line.diodes-both-ways"), CardLine.Of("line.choke-through")],
         null,
         [CardLine.Of("line.peak-at-end"), CardLine.Of("line.no-peak"), CardLine.Of("line.call-mentor")],
-        [CardLine.Of("caution.tune-on-receive"), CardLine.Of("caution.no-key-down-before-filter")],
+        [Caution.Measuring("caution.tune-on-receive"), Caution.Measuring("caution.no-key-down-before-filter")],
         CardLine.Of("set-up.load-at-antenna"));
 
     protected override TapStage Read(StageDocument stage) => TapStage.Read(stage);

@@ -79,7 +79,7 @@ internal sealed class SingleEndedFinalKind : StageKind<FinalStage, FinalModel>
         [Line.Of("line.filter-signed"), Line.Of("line.tab-insulated"), Line.Of("line.collector-to-ground-not-short")],
         Figure.Of("limit", QuantityKind.Current, Math.Max(0.1, 1.5 * new FinalModel(Read(stage), surroundings).SupplyCurrent.Ampere)),
         [Line.Of("line.low-power-low-current"), Line.Of("line.low-power-high-current"), Line.Of("line.current-without-drive")],
-        [Line.Of("caution.dummy-load-first"), Line.Of("caution.hot-tab"), Line.Of("caution.no-load-kills")],
+        [Caution.Measuring("caution.dummy-load-first"), Caution.Measuring("caution.hot-tab"), Caution.Measuring("caution.no-load-kills"), Caution.Measuring("caution.meter-in-series")],
         Line.Of("set-up.dummy-load"));
 
     protected override FinalStage Read(StageDocument stage) => FinalStage.Read(stage);

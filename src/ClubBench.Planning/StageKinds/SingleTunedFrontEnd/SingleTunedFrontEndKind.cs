@@ -64,7 +64,7 @@ internal sealed class SingleTunedFrontEndKind : StageKind<FrontEndStage, FrontEn
         [Line.Of("line.look-at-joints"), Line.Of("line.link-through")],
         null,
         [Line.Of("line.peak-at-end"), Line.Of("line.no-peak"), Line.Of("line.call-mentor")],
-        [],
+        [Caution.Measuring("caution.no-key-down-before-filter")],
         Line.Of("set-up.load-at-antenna"));
 
     protected override FrontEndStage Read(StageDocument stage) => FrontEndStage.Read(stage);

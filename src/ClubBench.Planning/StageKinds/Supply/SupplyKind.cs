@@ -78,7 +78,7 @@ internal sealed class SupplyKind : StageKind<SupplyStage, SupplyModel>
         [Line.Of("line.look-at-joints"), Line.Of("line.diode-stripe"), Line.Of("line.supply-not-short")],
         Figure.Of("limit", QuantityKind.Current, 0.05),
         [Line.Of("line.no-volts"), Line.Of("line.volts-outside"), Line.Of("line.call-mentor")],
-        [Line.Of("caution.polarity"), Line.Of("caution.fuse-at-source"), Line.Of("caution.lithium-pack")],
+        [Caution.BeforePower("caution.polarity"), Caution.BeforePower("caution.fuse-at-source"), Caution.BeforePower("caution.lithium-pack"), Caution.Measuring("caution.probe-slips")],
         null);
 
     protected override SupplyStage Read(StageDocument stage) => SupplyStage.Read(stage);

@@ -78,7 +78,7 @@ internal sealed class TunedDriverKind : StageKind<DriverStage, DriverModel>
         [Line.Of("line.look-at-joints"), Line.Of("line.link-through"), Line.Of("line.supply-not-short")],
         Figure.Of("limit", QuantityKind.Current, 0.1),
         [Line.Of("line.peak-at-end"), Line.Of("line.peak-twice"), Line.Of("line.no-peak")],
-        [Line.Of("caution.peak-then-count"), Line.Of("caution.warm-transistor")],
+        [Caution.Measuring("caution.peak-then-count"), Caution.Measuring("caution.warm-transistor")],
         Line.Of("set-up.final-disconnected"));
 
     protected override DriverStage Read(StageDocument stage) => DriverStage.Read(stage);

@@ -1,3 +1,4 @@
+using ClubBench.Planning.Cards;
 using ClubBench.Planning.Kits;
 using ClubBench.Planning.Tests.Builders;
 using BoardPlaces = ClubBench.Planning.Tests.Builders.Places;
@@ -30,5 +31,5 @@ public class SupplyTests
 
     [Fact]
     public void Notes_Cautions_NameFuseAndPolarity() =>
-        Assert.Equal(["caution.polarity", "caution.fuse-at-source", "caution.lithium-pack"], Quern.KindOf(Kit).Notes(Kit, BoardPlaces.ThirtyMetres).Cautions.Select(c => c.Code));
+        Assert.Equal(["caution.polarity", "caution.fuse-at-source", "caution.lithium-pack"], Quern.KindOf(Kit).Notes(Kit, BoardPlaces.ThirtyMetres).CautionsAt(CardStep.BeforePower).Select(c => c.Code));
 }
