@@ -3,8 +3,8 @@ namespace ClubBench.Printing.Layout;
 /// <summary>A warning in a heavy frame, with a triangle before it. The triangle is drawn: the typeface has none.</summary>
 internal sealed record CautionBox(IReadOnlyList<Run> Text) : IBlock
 {
-    private const float Padding = 5;
-    private const float TriangleSize = 22;
+    private const float Padding = 4;
+    private const float TriangleSize = 20;
 
     private Paragraph Words => new(Text);
 
@@ -35,7 +35,7 @@ internal static class WarningTriangle
 /// <param name="Captions">Captions with their share of the width.</param>
 internal sealed record SignOffBoxes(IReadOnlyList<(string Caption, float Share)> Captions) : IBlock
 {
-    private const float BoxHeight = 34;
+    private const float BoxHeight = 31;
     private const float Gap = 8;
 
     public float Height(ICardSurface surface, float width) => BoxHeight;

@@ -4,17 +4,25 @@ namespace ClubBench.Printing.Layout;
 /// <param name="Svg">The drawing.</param>
 /// <param name="NaturalWidth">Its own width.</param>
 /// <param name="NaturalHeight">Its own height.</param>
+/// <param name="LetterSize">Size of its letters, in its own units.</param>
 /// <param name="MostHeight">Most height it may take.</param>
 /// <param name="MostScale">Most points per unit of the drawing.</param>
-internal sealed record DrawingBlock(string Svg, float NaturalWidth, float NaturalHeight, float MostHeight, float MostScale) : IBlock
+internal sealed record DrawingBlock(string Svg, float NaturalWidth, float NaturalHeight, float LetterSize, float MostHeight, float MostScale) : IBlock
 {
     /// <summary>The same drawing in less height.</summary>
     public DrawingBlock NoHigherThan(float height) => this with { MostHeight = Math.Min(MostHeight, height) };
 
-    public float Height(ICardSurface surface, float width) =>
-        NaturalHeight * Math.Min(MostScale, Math.Min(width / NaturalWidth, MostHeight / NaturalHeight));
+    /// <summary>Points of its letters at a width.</summary>
+    public float LetterPoints(float width) => Scale(width) * LetterSize;
+
+    public float Height(ICardSurface surface, float width) => NaturalHeight * Scale(width);
+
+    /// <summary>Width it really takes.</summary>
+    public float WidthTaken(float width) => NaturalWidth * Scale(width);
 
     public void Draw(ICardSurface surface, Area area) => surface.Svg(Svg, area with { Height = Height(surface, area.Width) });
+
+    private float Scale(float width) => Math.Min(MostScale, Math.Min(width / NaturalWidth, MostHeight / NaturalHeight));
 }
 
 /// <summary>Text with a drawing at its right.</summary>

@@ -18,22 +18,28 @@ internal sealed record Section(string Title, IReadOnlyList<Run> Note, Stack Body
 
     private Paragraph NoteBlock => new(Note);
 
-    public float Height(ICardSurface surface, float width) => HeadHeight(surface, width) + Body.Height(surface, width);
+    /// <summary>Nothing but ticks, and so few that they stand in the line of the heading.</summary>
+    private TickRow? Inline(ICardSurface surface, float width) =>
+        Note.Count == 0 && Body.Blocks is [TickRow row] && surface.Measure(Title, TextStyle.Heading) + NoteGap + row.WidthOf(surface) <= width ? row : null;
+
+    public float Height(ICardSurface surface, float width) =>
+        HeadHeight(surface, width) + (Inline(surface, width) is null ? Body.Height(surface, width) : 0);
 
     public void Draw(ICardSurface surface, Area area)
     {
         var head = HeadHeight(surface, area.Width);
         surface.Text(Title, area.X, area.Y + TextStyle.Heading.Ascent, TextStyle.Heading);
         var beside = TextStyle.Heading.Ascent - TextStyle.Body.Ascent;
-        if (FitsBeside(surface, area.Width)) NoteBlock.Draw(surface, new Area(area.Right - NoteBlock.WidthOf(surface), area.Y + beside, area.Width, 0));
+        if (Inline(surface, area.Width) is { } row) row.Draw(surface, area with { X = area.Right - row.WidthOf(surface), Width = row.WidthOf(surface) + 1 });
+        else if (FitsBeside(surface, area.Width)) NoteBlock.Draw(surface, new Area(area.Right - NoteBlock.WidthOf(surface), area.Y + beside, area.Width, 0));
         else NoteBlock.Draw(surface, new Area(area.X, area.Y + TextStyle.Heading.LineHeight, area.Width, 0));
         var rule = area.Y + head - BelowRule;
         surface.Line(area.X, rule, area.Right, rule, 1.4f);
-        Body.Draw(surface, new Area(area.X, area.Y + head, area.Width, area.Height - head));
+        if (Inline(surface, area.Width) is null) Body.Draw(surface, new Area(area.X, area.Y + head, area.Width, area.Height - head));
     }
 
     public (IBlock Head, IBlock Tail)? CutAt(ICardSurface surface, float width, float room) =>
-        Body.CutAt(surface, width, room - HeadHeight(surface, width)) is { } cut
+        Inline(surface, width) is not null ? null : Body.CutAt(surface, width, room - HeadHeight(surface, width)) is { } cut
             ? (this with { Body = (Stack)cut.Head }, this with { Body = (Stack)cut.Tail })
             : null;
 
@@ -42,6 +48,7 @@ internal sealed record Section(string Title, IReadOnlyList<Run> Note, Stack Body
 
     private float HeadHeight(ICardSurface surface, float width)
     {
+        if (Inline(surface, width) is { } row) return row.Height(surface, row.WidthOf(surface) + 1) + RuleGap + BelowRule;
         var note = Note.Count == 0 || FitsBeside(surface, width) ? 0 : NoteBlock.Height(surface, width);
         return TextStyle.Heading.LineHeight + note + RuleGap + BelowRule;
     }

@@ -44,6 +44,9 @@ internal sealed record TickRow(IReadOnlyList<string> Items) : IBlock
         return fits == 0 || fits == Items.Count ? null : (new TickRow([.. Items.Take(fits)]), new TickRow([.. Items.Skip(fits)]));
     }
 
+    /// <summary>Width with all items on one line.</summary>
+    public float WidthOf(ICardSurface surface) => Items.Sum(i => ItemWidth(surface, i)) - AfterItem;
+
     private static float ItemWidth(ICardSurface surface, string item) =>
         Ticks.BoxSize + AfterBox + surface.Measure(item, TextStyle.Body) + AfterItem;
 

@@ -14,14 +14,14 @@ public static class SchematicDrawing
     private const float ChangedHeavyWidth = 4f;
     private const float Margin = 5;
 
-    /// <summary>Points per unit at which names and values are 9 points high on paper.</summary>
-    public const float LegibleScale = 9 / SchematicLabels.Size;
-
     /// <summary>The drawing.</summary>
     /// <param name="schematic">What to draw.</param>
     /// <param name="title">Name of the stage.</param>
     /// <param name="stageKind">Stage kind, for the words of its ends; null writes them as they are.</param>
-    public static Drawing Of(Schematic schematic, string title, string? stageKind = null)
+    public static Drawing Of(Schematic schematic, string title, string? stageKind = null) => Of(schematic, title, stageKind, SchematicLabels.UsualSize);
+
+    /// <summary>The drawing with larger letters beside the same symbols: where paper is short, symbols may shrink and letters may not.</summary>
+    internal static Drawing Of(Schematic schematic, string title, string? stageKind, float letterSize)
     {
         var symbols = schematic.Symbols.Select(s => new PlacedSymbol(Worded(s, stageKind))).ToList();
         var junctions = new Junctions(schematic, symbols);
@@ -31,7 +31,7 @@ public static class SchematicDrawing
         foreach (var (x, y) in junctions.Dots)
             svg.Circle(x * PlacedSymbol.Grid, y * PlacedSymbol.Grid, 3.2f, junctions.IsNew(x, y) ? Colour.Ink : Colour.Old);
 
-        var labels = new SchematicLabels(svg, schematic, symbols);
+        var labels = new SchematicLabels(svg, schematic, symbols, letterSize);
         labels.Draw();
         return svg.Finish(Around(labels.Covered), title, SchematicDescription.Of(schematic));
     }

@@ -6,16 +6,18 @@ using ClubBench.Printing.Layout;
 namespace ClubBench.Printing.Schematics;
 
 /// <summary>Writes names and values beside the symbols, clear of wires and of each other as far as there is room.</summary>
-internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IReadOnlyList<PlacedSymbol> symbols)
+internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IReadOnlyList<PlacedSymbol> symbols, float size)
 {
     private const float Away = 5;
-    /// <summary>Size of names and values, in drawing units.</summary>
-    public const float Size = 12.5f;
 
-    private const float LineHeight = 15;
+    /// <summary>Usual size of names and values, in drawing units.</summary>
+    public const float UsualSize = 12.5f;
+
     private const float TestPointRadius = 4.5f;
 
     private readonly LabelPlacer _placer = new();
+
+    private float LineHeight => 1.2f * size;
 
     /// <summary>Everything the drawing covers, labels included.</summary>
     public IReadOnlyList<Area> Covered => _placer.Taken;
@@ -55,16 +57,16 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
         if (SymbolShapes.IsNamedInside(placed.Symbol.Kind))
         {
             var inside = lines[0];
-            svg.Text(inside.Text, placed.Body.X + (placed.Body.Width / 2), placed.Body.Middle + 4.5f, Size, FontWeight.SemiBold, inside.Colour, TextSide.Middle);
+            svg.Text(inside.Text, placed.Body.X + (placed.Body.Width / 2), placed.Body.Middle + (0.36f * size), size, FontWeight.SemiBold, inside.Colour, TextSide.Middle);
             lines = [.. lines.Skip(1)];
             if (lines.Count == 0) return;
         }
-        var width = lines.Max(l => PlexSans.Measure(l.Text, Size, l.Weight));
+        var width = lines.Max(l => PlexSans.Measure(l.Text, size, l.Weight));
         var height = lines.Count * LineHeight;
         var place = _placer.Place(Places(placed, width, height));
         var centred = Math.Abs(place.X + (width / 2) - placed.Body.X - (placed.Body.Width / 2)) < 1;
         var side = centred ? TextSide.Middle : place.X < placed.Body.X ? TextSide.End : TextSide.Start;
-        for (var i = 0; i < lines.Count; i++) Write(lines[i], place, (i * LineHeight) + Size - 1, side);
+        for (var i = 0; i < lines.Count; i++) Write(lines[i], place, (i * LineHeight) + size - 1, side);
     }
 
     /// <summary>Where the label may stand, best liked first: above and below what lies, right and left of what stands.</summary>
@@ -95,9 +97,9 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
     private void Write(TextLine line, Area place, float baseline, TextSide side)
     {
         var x = side switch { TextSide.Middle => place.X + (place.Width / 2), TextSide.End => place.Right, _ => place.X };
-        svg.Text(line.Text, x, place.Y + baseline, Size, line.Weight, line.Colour, side);
+        svg.Text(line.Text, x, place.Y + baseline, size, line.Weight, line.Colour, side);
         if (!line.IsStruck) return;
-        var width = PlexSans.Measure(line.Text, Size, line.Weight);
+        var width = PlexSans.Measure(line.Text, size, line.Weight);
         var start = side switch { TextSide.Middle => x - (width / 2), TextSide.End => x - width, _ => x };
         svg.Line(start - 1, place.Y + baseline - 4, start + width + 1, place.Y + baseline - 4, line.Colour, 1.2f);
     }
@@ -108,11 +110,11 @@ internal sealed class SchematicLabels(SvgDocument svg, Schematic schematic, IRea
         var y = point.Y * PlacedSymbol.Grid;
         svg.Circle(x, y, TestPointRadius, Colour.Sheet, Colour.Ink, 1.7f);
         _placer.Take(new Area(x - TestPointRadius, y - TestPointRadius, 2 * TestPointRadius, 2 * TestPointRadius));
-        var width = PlexSans.Measure(point.Letter, Size, FontWeight.Bold);
+        var width = PlexSans.Measure(point.Letter, size, FontWeight.Bold);
         var above = new Area(x - (width / 2), y - TestPointRadius - LineHeight - 1, width, LineHeight);
         var below = above with { Y = y + TestPointRadius + 1 };
         var place = _placer.Place(above, below, above with { X = x + 6 }, above with { X = x - 6 - width }, below with { X = x + 6 }, below with { X = x - 6 - width });
-        svg.Text(point.Letter, place.X, place.Y + Size - 1, Size, FontWeight.Bold, Colour.Ink);
+        svg.Text(point.Letter, place.X, place.Y + size - 1, size, FontWeight.Bold, Colour.Ink);
     }
 
     private readonly record struct TextLine(string Text, FontWeight Weight, string Colour, bool IsStruck);

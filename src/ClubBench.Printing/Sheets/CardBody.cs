@@ -9,19 +9,19 @@ namespace ClubBench.Printing.Sheets;
 /// <summary>The blocks of a card, from why it changed to the signatures. What a stage does not have takes no room.</summary>
 internal static class CardBody
 {
-    /// <summary>Larger than this a small drawing only looks clumsy.</summary>
-    private const float MostDrawingScale = 1.3f;
+    /// <summary>With letters larger than this a small drawing only looks clumsy.</summary>
+    private const float MostLetterPoints = 16;
 
     /// <summary>Blocks in order.</summary>
     /// <param name="card">The card.</param>
-    /// <param name="drawing">Its drawing; null leaves it out.</param>
-    public static IReadOnlyList<IBlock> Of(PrintedCard card, DrawingBlock? drawing)
+    /// <param name="picture">Its drawing; null leaves it out.</param>
+    public static IReadOnlyList<IBlock> Of(PrintedCard card, CardPicture? picture)
     {
         var content = card.Content;
         var blocks = new List<IBlock?>
         {
             Why(content),
-            drawing,
+            picture,
             FitSection.Remove(content),
             FitSection.Of(card),
             WindSection.Of(card),
@@ -52,11 +52,15 @@ internal static class CardBody
     private static string Spaced(string sentence) => sentence.Length == 0 ? "" : " " + sentence;
 
     /// <summary>The drawing of the stage, no higher than allowed; null where there is nothing to draw.</summary>
-    public static DrawingBlock? Drawing(CardContent content, float mostHeight)
+    /// <param name="content">The card.</param>
+    /// <param name="letterSize">Size of its letters, in drawing units.</param>
+    /// <param name="mostHeight">Most height it may take.</param>
+    public static CardPicture? Picture(CardContent content, float letterSize, float mostHeight)
     {
         if (content.Drawing.Symbols.Count == 0) return null;
-        var drawing = SchematicDrawing.Of(content.Drawing, CardText.TitleOf(content), content.Kind);
-        return new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, mostHeight, MostDrawingScale);
+        var drawing = SchematicDrawing.Of(content.Drawing, CardText.TitleOf(content), content.Kind, letterSize);
+        var mostScale = MostLetterPoints / letterSize;
+        return new CardPicture(new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, letterSize, mostHeight, mostScale));
     }
 
     private static Section? BeforePower(CardContent content)

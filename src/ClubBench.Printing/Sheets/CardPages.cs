@@ -15,8 +15,14 @@ internal static class CardPages
     private const float FooterHeight = 15;
     private const float BelowHeader = 6;
 
-    /// <summary>Gaps between blocks from roomy to tight. The first that leaves the drawing enough room to be read is taken.</summary>
-    private static readonly float[] s_gaps = [11, 8, 5, 3, 2];
+    /// <summary>Gaps between blocks from roomy to tight.</summary>
+    private static readonly float[] s_gaps = [11, 8, 5, 3, 2, 1];
+
+    /// <summary>Sizes of a drawing's letters beside symbols of the same size: the larger, the less room the drawing needs until it can be read.</summary>
+    private static readonly float[] s_letterSizes = [SchematicLabels.UsualSize, 14, 16, 18, 20];
+
+    /// <summary>Smallest letter of a drawing that can be read at arm's length.</summary>
+    public const float LeastLetterPoints = 9;
 
     /// <summary>Share of the page a drawing may take.</summary>
     private const float DrawingShare = 1 / 3f;
@@ -44,21 +50,29 @@ internal static class CardPages
         }
     }
 
-    /// <summary>The drawing takes the room the rest leaves it. Where no gap leaves enough, the tightest that still fits one page; else two pages, roomy.</summary>
+    /// <summary>
+    /// The drawing takes the room the rest leaves it. The first letter size and gap that fit one page with legible letters are taken; where none are,
+    /// those with the largest letters; where nothing fits one page, two pages, roomy.
+    /// </summary>
     private static IReadOnlyList<Stack> Broken(ICardSurface surface, PrintedCard card, Area body)
     {
-        var drawing = CardBody.Drawing(card.Content, body.Height * DrawingShare);
-        var wanted = drawing is null ? 0 : Math.Min(drawing.Height(surface, body.Width), drawing.NaturalHeight * SchematicDrawing.LegibleScale);
-        IReadOnlyList<Stack>? fitting = null;
-        foreach (var gap in s_gaps)
+        (IReadOnlyList<Stack>? Pages, float Points) best = (null, -1);
+        foreach (var letterSize in s_letterSizes)
         {
-            var room = body.Height - gap - new Stack(CardBody.Of(card, null), gap).Height(surface, body.Width);
-            var pages = PageBreaks.Of(surface, CardBody.Of(card, drawing?.NoHigherThan(Math.Max(room, LeastDrawing))), gap, body.Width, body.Height);
-            if (pages.Count > 1) continue;
-            fitting = pages;
-            if (room >= wanted) break;
+            var picture = CardBody.Picture(card.Content, letterSize, body.Height * DrawingShare);
+            foreach (var gap in s_gaps)
+            {
+                var room = body.Height - gap - new Stack(CardBody.Of(card, null), gap).Height(surface, body.Width);
+                var fitting = picture?.NoHigherThan(Math.Max(room, LeastDrawing));
+                var pages = PageBreaks.Of(surface, CardBody.Of(card, fitting), gap, body.Width, body.Height);
+                var points = fitting?.LetterPoints(body.Width) ?? LeastLetterPoints;
+                if (pages.Count > 1) continue;
+                if (points >= LeastLetterPoints) return pages;
+                if (points > best.Points) best = (pages, points);
+            }
         }
-        return fitting ?? PageBreaks.Of(surface, CardBody.Of(card, drawing), s_gaps[0], body.Width, body.Height);
+
+        return best.Pages ?? PageBreaks.Of(surface, CardBody.Of(card, CardBody.Picture(card.Content, SchematicLabels.UsualSize, body.Height * DrawingShare)), s_gaps[0], body.Width, body.Height);
     }
 
     private static void DrawFooter(ICardSurface surface, PrintedCard card, Area body, int page, int pages)

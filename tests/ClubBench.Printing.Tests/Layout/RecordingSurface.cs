@@ -1,3 +1,5 @@
+using System.Globalization;
+using System.Xml.Linq;
 using ClubBench.Printing.Fonts;
 using ClubBench.Printing.Layout;
 
@@ -28,11 +30,27 @@ internal sealed class RecordingSurface : ICardSurface
     {
     }
 
-    public void Svg(string svg, Area area) => Pages[^1].Drawings.Add(area);
+    public void Svg(string svg, Area area) => Pages[^1].Drawings.Add(new Picture(svg, area));
 
     public void Qr(string text, Area area) => Pages[^1].Codes.Add((text, area));
 
     internal sealed record Written(string Text, float X, float Baseline, TextStyle Style);
+
+    /// <summary>A drawing, placed as large as fits.</summary>
+    internal sealed record Picture(string Svg, Area Area)
+    {
+        /// <summary>Its smallest letters in points; very large where it has none.</summary>
+        public float LeastLetterPoints
+        {
+            get
+            {
+                var svg = XDocument.Parse(Svg).Root!;
+                var view = svg.Attribute("viewBox")!.Value.Split(' ').Select(v => float.Parse(v, CultureInfo.InvariantCulture)).ToArray();
+                var sizes = svg.Descendants().Where(e => e.Name.LocalName == "text").Select(e => float.Parse(e.Attribute("font-size")!.Value, CultureInfo.InvariantCulture));
+                return Math.Min(Area.Width / view[2], Area.Height / view[3]) * sizes.DefaultIfEmpty(float.MaxValue).Min();
+            }
+        }
+    }
 
     internal sealed record Page(PaperSize Paper, string? Bookmark)
     {
@@ -40,7 +58,7 @@ internal sealed class RecordingSurface : ICardSurface
 
         public List<Area> Boxes { get; } = [];
 
-        public List<Area> Drawings { get; } = [];
+        public List<Picture> Drawings { get; } = [];
 
         public List<(string Text, Area Area)> Codes { get; } = [];
     }

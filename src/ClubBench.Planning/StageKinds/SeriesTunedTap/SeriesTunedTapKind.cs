@@ -56,10 +56,10 @@ internal sealed class SeriesTunedTapKind : StageKind<TapStage, TapModel>
         }
 
         s.Role(SymbolKind.Trimmer, 16, 4, Orientation.Across, Roles.Trimmer);
-        if (s.Role(SymbolKind.Capacitor, 16, 0, Orientation.Across, Roles.Padding))
+        if (s.Role(SymbolKind.Capacitor, 16, -1, Orientation.Across, Roles.Padding))
         {
-            s.Wire(16, 0, 16, 4);
-            s.Wire(20, 0, 20, 4);
+            s.Wire(16, -1, 16, 4);
+            s.Wire(20, -1, 20, 4);
         }
 
         s.Wire(20, 4, 24, 4);
