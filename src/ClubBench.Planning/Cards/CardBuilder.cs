@@ -19,6 +19,7 @@ namespace ClubBench.Planning.Cards;
 /// <param name="Drawing">Schematic.</param>
 /// <param name="Expected">Expected readings.</param>
 /// <param name="Notes">Checks, ladder, cautions.</param>
+/// <param name="Plots">Plots of the plan.</param>
 internal sealed record CardInput(
     IStageKind Kind,
     StageDocument Before,
@@ -28,7 +29,8 @@ internal sealed record CardInput(
     Finding? Why,
     Schematic Drawing,
     IReadOnlyList<ExpectedReading> Expected,
-    CardNotes Notes);
+    CardNotes Notes,
+    IReadOnlyList<Plot> Plots);
 
 /// <summary>Puts a build card together from a planned stage.</summary>
 internal static class CardBuilder
@@ -44,7 +46,12 @@ internal static class CardBuilder
             FittingRows(input),
             [.. input.Changes.Select(c => c.After).OfType<Part>().Select(p => WindingRowOf(p, input.Expected)).OfType<WindingRow>()],
             input.Notes,
-            input.Expected);
+            input.Expected,
+            ResponseOf(input.Plots));
+
+    /// <summary>The response without what only ranks alternatives, and without the marks: those figures stand among the readings.</summary>
+    private static Plot? ResponseOf(IReadOnlyList<Plot> plots) =>
+        plots.FirstOrDefault(p => p.Code == "plot.response") is { } response ? response with { Limits = [.. response.Limits.Where(l => !l.IsWish)], Marks = [] } : null;
 
     /// <summary>Equal parts stand together; small flat parts first, windings after them, devices last (common practice of fitting).</summary>
     private static IReadOnlyList<FittingRow> FittingRows(CardInput input) =>

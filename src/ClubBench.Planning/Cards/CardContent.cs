@@ -83,6 +83,7 @@ public sealed record WindingRow(string Designator, string Core, string Colour, i
 /// <param name="Windings">Windings to make.</param>
 /// <param name="Notes">Checks, ladder, cautions.</param>
 /// <param name="Measure">Readings to take.</param>
+/// <param name="Response">Response old and new against the limit; null where the stage has none.</param>
 public sealed record CardContent(
     string Stage,
     string Kind,
@@ -93,4 +94,5 @@ public sealed record CardContent(
     IReadOnlyList<FittingRow> Fit,
     IReadOnlyList<WindingRow> Windings,
     CardNotes Notes,
-    IReadOnlyList<ExpectedReading> Measure);
+    IReadOnlyList<ExpectedReading> Measure,
+    Plot? Response = null);

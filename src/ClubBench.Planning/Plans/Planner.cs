@@ -30,7 +30,8 @@ public static class Planner
         IReadOnlyList<Finding> rethink = decision.RethinkBecause is { } because ? [because] : [];
         var why = rethink.Concat(decision.KeptFindings).Where(f => f.AtLeast >= StageAction.Check).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).ToList();
         var changes = PartChanges.Between(decision.Before, after);
-        var card = CardBuilder.Build(new CardInput(kind, decision.Before, after, changes, action, why.FirstOrDefault(), drawing, expected, kind.Notes(after, surroundings)));
+        var plots = kind.Plots(comparison);
+        var card = CardBuilder.Build(new CardInput(kind, decision.Before, after, changes, action, why.FirstOrDefault(), drawing, expected, kind.Notes(after, surroundings), plots));
         return new StagePlan(
             stage,
             action,
@@ -46,7 +47,7 @@ public static class Planner
             expected,
             kind.Yield(after, surroundings, demands, move.Inputs.Seed),
             drawing,
-            kind.Plots(comparison),
+            plots,
             card);
     }
 }

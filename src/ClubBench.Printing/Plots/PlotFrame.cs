@@ -4,23 +4,29 @@ using ClubBench.Printing.Layout;
 namespace ClubBench.Printing.Plots;
 
 /// <summary>Where a plot's values stand in the drawing. The margins are fixed, so places of labels are known before drawing.</summary>
-internal sealed record PlotFrame(double XLow, double XHigh, bool XIsLogarithmic, double YLow, double YHigh)
+internal sealed record PlotFrame(double XLow, double XHigh, bool XIsLogarithmic, double YLow, double YHigh, float Width, float Height)
 {
-    public const int Width = 560;
-    public const int Height = 330;
+    public const float UsualWidth = 560;
+    public const float UsualHeight = 330;
     public const float Left = 46;
     public const float Right = 14;
-    public const float Top = 26;
-    public const float Bottom = 40;
+    private const float LeastRoomyHeight = 200;
+
+    /// <summary>Whether it is so low that the unit of the abscissa shares a line with its numbers.</summary>
+    public bool IsLow => Height < LeastRoomyHeight;
+
+    public float Top => IsLow ? 18 : 26;
+
+    public float Bottom => IsLow ? 24 : 40;
 
     /// <summary>Area inside the axes.</summary>
-    public static Area Inner => new(Left, Top, Width - Left - Right, Height - Top - Bottom);
+    public Area Inner => new(Left, Top, Width - Left - Right, Height - Top - Bottom);
 
-    public static PlotFrame Of(Plot plot)
+    public static PlotFrame Of(Plot plot, float width = UsualWidth, float height = UsualHeight)
     {
         var x = plot.Curves.SelectMany(c => c.X).Concat(plot.Marks.Select(m => m.X)).Concat(plot.Limits.SelectMany(l => new[] { l.FromX, l.ToX })).ToList();
         if (x.Count == 0) throw new ArgumentException("A plot needs a curve.", nameof(plot));
-        return new PlotFrame(x.Min(), x.Max(), plot.XIsLogarithmic, plot.YLow, plot.YHigh);
+        return new PlotFrame(x.Min(), x.Max(), plot.XIsLogarithmic, plot.YLow, plot.YHigh, width, height);
     }
 
     public float PixelX(double x) => Inner.X + (Inner.Width * (float)((Scale(x) - Scale(XLow)) / (Scale(XHigh) - Scale(XLow))));

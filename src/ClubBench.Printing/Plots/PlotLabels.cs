@@ -15,6 +15,11 @@ internal sealed class PlotLabels
     private const float Height = 16;
     private const float Away = 7;
 
+    /// <summary>Steps to the right and down from a mark, for words that find no place close to it.</summary>
+    private static readonly float[] s_beside = [Away, 4 * Away, 6 * Away, 9 * Away];
+
+    private static readonly float[] s_below = [2 * Away, 4 * Away, 6 * Away];
+
     private readonly PlotFrame _frame;
     private readonly LabelPlacer _placer = new();
     private readonly List<PlotText> _texts = [];
@@ -24,7 +29,7 @@ internal sealed class PlotLabels
         _frame = frame;
         foreach (var curve in plot.Curves) TakeCurve(curve);
         foreach (var limit in plot.Limits) TakeLimit(limit);
-        foreach (var limit in plot.Limits) AddLimit(limit, PlotWords.Of(plot, limit, stageKind));
+        foreach (var limit in plot.Limits) AddLimit(limit, PlotWords.Short(limit, stageKind));
         foreach (var mark in plot.Marks) AddMark(mark, PlotWords.Of(plot, mark, stageKind));
         foreach (var curve in plot.Curves) AddCurve(curve, PlotWords.Of(curve, stageKind));
     }
@@ -51,13 +56,15 @@ internal sealed class PlotLabels
         var width = Width(text, FontWeight.SemiBold);
         _placer.Take(new Area(x - 5, y - 5, 10, 10));
         Add(text, Colour.Ink, FontWeight.SemiBold,
+        [
             new Area(x + Away, y - Away - Height, width, Height),
             new Area(x - (width / 2), y - Away - Height, width, Height),
             new Area(x - Away - width, y - Away - Height, width, Height),
             new Area(x - Away - width, y + Away, width, Height),
             new Area(x + Away, y + Away, width, Height),
             new Area(x - Away - width, y - (Height / 2), width, Height),
-            new Area(x + Away, y + (2 * Away), width, Height));
+            .. from below in s_below from beside in s_beside select new Area(x + beside, y + below, width, Height),
+        ]);
     }
 
     private void AddLimit(LimitLine limit, string text)
@@ -67,10 +74,12 @@ internal sealed class PlotLabels
         var allowed = limit.ForbiddenAbove ? y + 4 : y - 4 - Height;
         var (start, end) = (_frame.PixelX(limit.FromX), _frame.PixelX(limit.ToX));
         Add(text, limit.IsWish ? Colour.Wish : Colour.Limit, FontWeight.SemiBold,
+        [
             new Area(end - width, allowed, width, Height),
             new Area(((start + end) / 2) - (width / 2), allowed, width, Height),
-            new Area(end - width, allowed + Height, width, Height),
-            new Area(end - width, limit.ForbiddenAbove ? y - PlotHatch.Depth - 2 - Height : y + PlotHatch.Depth + 2, width, Height));
+            new Area(start, allowed, width, Height),
+            new Area(end - width, limit.ForbiddenAbove ? y - PlotHatch.Depth - 2 - Height : y + PlotHatch.Depth + 2, width, Height),
+        ]);
     }
 
     /// <summary>Tries places along the curve, the steep middle first, right of it and left of it.</summary>
@@ -89,10 +98,10 @@ internal sealed class PlotLabels
             places.Add(new Area(x, y - Away - Height, width, Height));
         }
         if (curve.Style == CurveStyle.Old) places = [.. places.OrderBy(p => p.X)];
-        Add(text, curve.Style == CurveStyle.Old ? Colour.Old : Colour.Change, weight, [.. places]);
+        Add(text, curve.Style == CurveStyle.Old ? Colour.Old : Colour.Change, weight, places);
     }
 
-    private void Add(string text, string colour, FontWeight weight, params Area[] places)
+    private void Add(string text, string colour, FontWeight weight, IReadOnlyList<Area> places)
     {
         var place = _placer.Place([.. places.Select(Inside)]);
         _texts.Add(new PlotText(text, place.X, place.Middle, colour, weight));
@@ -101,8 +110,8 @@ internal sealed class PlotLabels
     /// <summary>Pushes a place back into the drawing.</summary>
     private Area Inside(Area place) => place with
     {
-        X = Math.Clamp(place.X, PlotFrame.Inner.X + 2, Math.Max(PlotFrame.Inner.X + 2, PlotFrame.Inner.Right - place.Width)),
-        Y = Math.Clamp(place.Y, 0, PlotFrame.Inner.Bottom - Height - 1),
+        X = Math.Clamp(place.X, _frame.Inner.X + 2, Math.Max(_frame.Inner.X + 2, _frame.Inner.Right - place.Width)),
+        Y = Math.Clamp(place.Y, 0, _frame.Inner.Bottom - Height - 1),
     };
 
     private static float Width(string text, FontWeight weight) => PlexSans.Measure(text, Size, weight) + 2;

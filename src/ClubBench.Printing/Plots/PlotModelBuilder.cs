@@ -15,6 +15,8 @@ internal static class PlotModelBuilder
 {
     public const float AxisTextSize = 12;
 
+    private const float RoomForUnit = 38;
+
     /// <summary>Enough to tell the ticks of a narrow span apart; idle zeros go.</summary>
     private const int TickDigits = 7;
 
@@ -24,7 +26,7 @@ internal static class PlotModelBuilder
         {
             DefaultFont = PlexSans.Family,
             DefaultFontSize = AxisTextSize,
-            PlotMargins = new OxyThickness(PlotFrame.Left, PlotFrame.Top, PlotFrame.Right, PlotFrame.Bottom),
+            PlotMargins = new OxyThickness(PlotFrame.Left, frame.Top, PlotFrame.Right, frame.Bottom),
             Padding = new OxyThickness(0),
             PlotAreaBorderColor = MarkerColours.Line,
             PlotAreaBorderThickness = new OxyThickness(1, 0, 0, 1),
@@ -43,8 +45,7 @@ internal static class PlotModelBuilder
     {
         Axis axis = plot.XIsLogarithmic ? new LogarithmicAxis { PowerPadding = false } : new LinearAxis();
         axis.Position = AxisPosition.Bottom;
-        axis.LabelFormatter = x => Number(plot.XKind, x, frame.XHigh);
-        if (plot.XIsLogarithmic) axis.LabelFormatter = x => IsLabelled(x) ? Number(plot.XKind, x, frame.XHigh) : "";
+        axis.LabelFormatter = x => (plot.XIsLogarithmic && !IsLabelled(x)) || IsUnderTheUnit(x, frame) ? "" : Number(plot.XKind, x, frame.XHigh);
         Style(axis);
         axis.Minimum = frame.XLow;
         axis.Maximum = frame.XHigh;
@@ -96,6 +97,9 @@ internal static class PlotModelBuilder
         foreach (var mark in plot.Marks) series.Points.Add(new ScatterPoint(mark.X, mark.Y));
         return series;
     }
+
+    /// <summary>Where the unit stands beside the numbers, those under it give way.</summary>
+    private static bool IsUnderTheUnit(double x, PlotFrame frame) => frame.IsLow && frame.PixelX(x) > frame.Inner.Right - RoomForUnit;
 
     /// <summary>A few numbers of each decade are enough to read a logarithmic axis.</summary>
     private static bool IsLabelled(double x)

@@ -18,7 +18,7 @@ public sealed record PlotTable(string Caption, IReadOnlyList<string> Headings, I
     {
         var frame = PlotFrame.Of(plot);
         var xs = Enumerable.Range(0, RowsPerSpan + 1)
-            .Select(i => frame.ValueX(PlotFrame.Inner.X + (PlotFrame.Inner.Width * i / RowsPerSpan)))
+            .Select(i => frame.ValueX(frame.Inner.X + (frame.Inner.Width * i / RowsPerSpan)))
             .Concat(plot.Marks.Select(m => m.X))
             .Order()
             .Distinct();

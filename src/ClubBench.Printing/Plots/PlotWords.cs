@@ -10,8 +10,11 @@ internal static class PlotWords
     /// <summary>Word and value at a mark. Words may name {value} and {at} themselves; those that do not get the value after a colon.</summary>
     public static string Of(Plot plot, PlotMark mark, string? stageKind) => WithValue(plot, mark.LabelCode, mark.X, mark.Y, stageKind);
 
-    /// <summary>Word and value at a limit, as at a mark.</summary>
+    /// <summary>Word and value of a limit, as of a mark.</summary>
     public static string Of(Plot plot, LimitLine limit, string? stageKind) => WithValue(plot, limit.LabelCode, limit.FromX, limit.Y, stageKind);
+
+    /// <summary>Word at a limit. Its value stands at the axis and in the description; with it the word would lie on the curves.</summary>
+    public static string Short(LimitLine limit, string? stageKind) => Phrases.Say(limit.LabelCode, stageKind);
 
     /// <summary>Word at a curve.</summary>
     public static string Of(Curve curve, string? stageKind) => Phrases.Say(curve.LabelCode, stageKind);

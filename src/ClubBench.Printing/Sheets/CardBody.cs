@@ -60,7 +60,7 @@ internal static class CardBody
         if (content.Drawing.Symbols.Count == 0) return null;
         var drawing = SchematicDrawing.Of(content.Drawing, CardText.TitleOf(content), content.Kind, letterSize);
         var mostScale = MostLetterPoints / letterSize;
-        return new CardPicture(new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, letterSize, mostHeight, mostScale));
+        return new CardPicture(new DrawingBlock(drawing.Svg, drawing.Width, drawing.Height, letterSize, mostHeight, mostScale), content.Response, content.Kind);
     }
 
     private static Section? BeforePower(CardContent content)

@@ -1,6 +1,8 @@
 using System.Xml.Linq;
 using ClubBench.Planning.Drawings;
 using ClubBench.Planning.Figures;
+using ClubBench.Planning.Plans;
+using ClubBench.Printing.Layout;
 using ClubBench.Printing.Plots;
 using ClubBench.Printing.Tests.Samples;
 
@@ -75,6 +77,27 @@ public class PlotDrawingTests
                 Assert.False(Math.Abs(a.Middle - b.Middle) < 12 && a.X < b.X && a.X + Width(a) > b.X + 1, $"{a.Text} over {b.Text}");
     }
 
+    [Theory]
+    [InlineData("20 m", PlotFrame.UsualWidth, PlotFrame.UsualHeight)]
+    [InlineData("40 m", PlotFrame.UsualWidth, PlotFrame.UsualHeight)]
+    [InlineData("20 m", 250, 128)]
+    [InlineData("40 m", 250, 128)]
+    public void Of_PlotsOfAPlan_WordsStandClearOfCurvesLimitsAndEachOther(string band, float width, float height)
+    {
+        foreach (var (plot, kind) in SamplePlans.QuernOn(band).Stages.SelectMany(s => PlotsOf(s, width)))
+        {
+            var frame = PlotFrame.Of(plot, width, height);
+            var words = new PlotLabels(plot, frame, kind).Texts.Select(t => (t.Text, Area: new Area(t.X, t.Middle - 5, Width(t), 10))).ToList();
+            var lines = plot.Curves.SelectMany(c => Along(c, frame).Select(p => (Of: c.LabelCode, Point: p)))
+                .Concat(plot.Limits.SelectMany(l => Enumerable.Range(0, 101).Select(i => (Of: l.LabelCode, Point: (X: frame.PixelX(l.FromX) + (i / 100f * (frame.PixelX(l.ToX) - frame.PixelX(l.FromX))), Y: frame.PixelY(l.Y))))));
+
+            var covered = lines.SelectMany(l => words.Where(w => Holds(w.Area, l.Point)).Select(w => $"{w.Text} on {l.Of}")).Distinct();
+
+            Assert.Equal([], covered);
+            Assert.All(words, w => Assert.InRange(w.Area.Right, 0, width));
+        }
+    }
+
     [Fact]
     public void Of_NarrowSpan_TellsItsTicksApart()
     {
@@ -100,6 +123,21 @@ public class PlotDrawingTests
     [Fact]
     public void Of_NoCurve_Throws() =>
         Assert.Throws<ArgumentException>(() => PlotDrawing.Of(SamplePlots.Response with { Curves = [], Limits = [], Marks = [] }));
+
+    /// <summary>In full size the plan's own plots, in a small one what the card shows.</summary>
+    private static IEnumerable<(Plot Plot, string Kind)> PlotsOf(StagePlan stage, float width) =>
+        width >= PlotFrame.UsualWidth ? stage.Plots.Select(p => (p, stage.Card.Kind)) : stage.Card.Response is { } response ? [(response, stage.Card.Kind)] : [];
+
+    private static IEnumerable<(float X, float Y)> Along(Curve curve, PlotFrame frame)
+    {
+        for (var i = 1; i < curve.X.Count; i++)
+            for (var part = 0f; part < 1; part += 0.1f)
+                yield return (Between(frame.PixelX(curve.X[i - 1]), frame.PixelX(curve.X[i]), part), Between(frame.PixelY(curve.Y[i - 1]), frame.PixelY(curve.Y[i]), part));
+    }
+
+    private static float Between(float a, float b, float part) => a + ((b - a) * part);
+
+    private static bool Holds(Area area, (float X, float Y) p) => p.X > area.X && p.X < area.Right && p.Y > area.Y && p.Y < area.Bottom;
 
     private static float Width(PlotText text) => Printing.Fonts.PlexSans.Measure(text.Text, PlotLabels.Size, text.Weight);
 

@@ -195,6 +195,14 @@ public class CardPagesTests
     }
 
     [Fact]
+    public void Draw_LowPass_ShowsOldAndNewResponseAgainstTheLimit()
+    {
+        var plot = Drawn(SamplePlans.QuernOn("20 m").Stage("A5").Card).Pages[0].Drawings[1].Svg;
+
+        Assert.All(new[] { ">old<", ">new<", ">limit<" }, word => Assert.Contains(word, plot, StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void Draw_FewTicks_StandInTheLineOfTheirHeading()
     {
         var texts = Drawn(SampleCards.LowPass, SampleCards.Context with { Paper = PaperSize.Letter }).Pages[0].Texts;
