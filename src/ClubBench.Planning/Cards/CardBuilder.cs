@@ -19,6 +19,8 @@ namespace ClubBench.Planning.Cards;
 /// <param name="Drawing">Schematic.</param>
 /// <param name="Expected">Expected readings.</param>
 /// <param name="Notes">Checks, ladder, cautions.</param>
+/// <param name="Taken">The alternative taken; null where nothing changes.</param>
+/// <param name="Alternatives">All of them, best first.</param>
 /// <param name="Plots">Plots of the plan.</param>
 internal sealed record CardInput(
     IStageKind Kind,
@@ -30,6 +32,8 @@ internal sealed record CardInput(
     Schematic Drawing,
     IReadOnlyList<ExpectedReading> Expected,
     CardNotes Notes,
+    Alternative? Taken,
+    IReadOnlyList<Alternative> Alternatives,
     IReadOnlyList<Plot> Plots);
 
 /// <summary>Puts a build card together from a planned stage.</summary>
@@ -47,6 +51,7 @@ internal static class CardBuilder
             [.. input.Changes.Select(c => c.After).OfType<Part>().Select(p => WindingRowOf(p, input.Expected)).OfType<WindingRow>()],
             input.Notes,
             input.Expected,
+            Substitute.Of(input.Kind.Description, input.Taken, input.Alternatives),
             ResponseOf(input.Plots));
 
     /// <summary>The response without what only ranks alternatives, and without the marks: those figures stand among the readings.</summary>

@@ -83,6 +83,7 @@ public sealed record WindingRow(string Designator, string Core, string Colour, i
 /// <param name="Windings">Windings to make.</param>
 /// <param name="Notes">Checks, ladder, cautions.</param>
 /// <param name="Measure">Readings to take.</param>
+/// <param name="Substitute">What may go in instead; null where the plan knows of nothing.</param>
 /// <param name="Response">Response old and new against the limit; null where the stage has none.</param>
 public sealed record CardContent(
     string Stage,
@@ -95,4 +96,5 @@ public sealed record CardContent(
     IReadOnlyList<WindingRow> Windings,
     CardNotes Notes,
     IReadOnlyList<ExpectedReading> Measure,
+    Substitute? Substitute = null,
     Plot? Response = null);

@@ -31,7 +31,7 @@ public static class Planner
         var why = rethink.Concat(decision.KeptFindings).Where(f => f.AtLeast >= StageAction.Check).OrderByDescending(f => f.AtLeast).ThenByDescending(f => f.Severity).ToList();
         var changes = PartChanges.Between(decision.Before, after);
         var plots = kind.Plots(comparison);
-        var card = CardBuilder.Build(new CardInput(kind, decision.Before, after, changes, action, why.FirstOrDefault(), drawing, expected, kind.Notes(after, surroundings), plots));
+        var card = CardBuilder.Build(new CardInput(kind, decision.Before, after, changes, action, why.FirstOrDefault(), drawing, expected, kind.Notes(after, surroundings), decision.Taken, decision.Alternatives, plots));
         return new StagePlan(
             stage,
             action,

@@ -4,6 +4,8 @@ using ClubBench.Calculation.Tables;
 using ClubBench.Planning.Advising;
 using ClubBench.Planning.Cards;
 using ClubBench.Planning.Figures;
+using ClubBench.Planning.Kits;
+using ClubBench.Planning.Parts;
 using ClubBench.Planning.Plans;
 using ClubBench.Planning.StageKinds;
 
@@ -49,6 +51,24 @@ public static class Phrases
             ["other-value"] = QuantityText.Format(QuantityKind.Capacitance, lookAlike.OtherValue.Farad, null, culture),
         };
         return Filled(lookAlike.Other is null ? "look-alike.digits" : "look-alike.pair", [], words, null, culture);
+    }
+
+    /// <summary>What may go in instead and what it changes, in words.</summary>
+    public static string Say(Substitute substitute, string stageKindId, CultureInfo? culture = null)
+    {
+        var sorts = Substitute.Sorts(substitute.Changes);
+        var words = new Dictionary<string, string>(StringComparer.Ordinal)
+        {
+            ["figure"] = NameOf(substitute.Effect, stageKindId, culture),
+            ["effect"] = QuantityText.Format(substitute.Effect, culture),
+        };
+        (words["places"], words["instead"]) = Words(sorts[0]);
+        if (sorts.Count > 1) (words["other-places"], words["other-instead"]) = Words(sorts[1]);
+        return Filled(sorts.Count == 1 ? "substitute.one" : "substitute.two", [], words, stageKindId, culture);
+
+        (string, string) Words(IReadOnlyList<PartChange> sort) => (string.Join(", ", sort.Select(c => c.Designator)), Value(sort[0].After));
+
+        string Value(Part? part) => part is null ? "" : PartText.Short(part, StageKindList.Get(stageKindId).Description.Role(part.Role)?.Class ?? PartClass.Other, culture ?? CultureInfo.CurrentCulture).Replace(' ', '\u00A0');
     }
 
     /// <summary>A step of advice in words.</summary>

@@ -15,6 +15,7 @@ public static class CardFigures
     public static IReadOnlyList<CardFigure> Of(CardContent content) =>
     [
         .. content.Fit.SelectMany(row => row.Designators.Select(d => new CardFigure(d, CardText.ValueOf(content, row.Part)))),
+        .. content.Substitute is { } substitute ? new[] { new CardFigure(substitute.Effect.Name, QuantityText.Format(substitute.Effect)) } : [],
         .. content.Windings.SelectMany(OfWinding),
         .. content.Notes.SupplyLimit is { } limit ? new[] { new CardFigure("supply", QuantityText.Format(limit)) } : [],
         .. CardText.ReadingsAfterFitting(content).SelectMany(r => new[] { new CardFigure(r.Point, ReadingText.Expected(r)), new CardFigure(r.Point, CardText.WindowOf(r)) }),

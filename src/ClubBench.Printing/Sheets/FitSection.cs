@@ -28,7 +28,7 @@ internal static class FitSection
             new(Texts.Of("card.pieces"), 52), new(Texts.Of("card.pocket"), 50), new(Texts.Of("card.done"), 36),
         };
         var table = new Table(columns, [.. content.Fit.Select(r => Row(content, r))]);
-        return new Section(Texts.Of("card.fit"), Note(card), new Stack([table]));
+        return new Section(Texts.Of("card.fit"), Note(card), new Stack(content.Substitute is { } substitute ? [table, new Paragraph(Phrases.Say(substitute, content.Kind), TextStyle.Body)] : [table]));
     }
 
     private static ICell[] Row(CardContent content, FittingRow row) =>
