@@ -41,8 +41,11 @@ public sealed class NoiseBudget : IChainBudget
             Figure.Of("largest", judgement.LargestNoiseFigureAndLoss),
         ];
         var lines = rows.Select(r => new BudgetLine(r.Stage, [Figure.Of("receive-gain", r.Noise!.Gain), Figure.Of("noise-figure", r.Noise.NoiseFigure)]));
-        return new Budget(Id, [.. lines, new BudgetLine("", figures)], [FindingOf(judgement.Verdict, rows[0].Stage, figures)]);
+        return new Budget(Id, [.. lines, new BudgetLine("", [.. figures.Where(IsWorthSaying)])], [FindingOf(judgement.Verdict, rows[0].Stage, figures)]);
     }
+
+    /// <summary>A degradation nobody notices is not written as nothing: the finding says it in words.</summary>
+    private static bool IsWorthSaying(Figure figure) => figure.Name is not ("degradation" or "degradation-median") || figure.Si >= Noticeable.Db;
 
     private static Decibels Heard(Decibels noiseFigure, Kit kit) =>
         kit.Scheme.Kind == SchemeKind.DirectConversion ? Decibels.FromDb(Math.Max(noiseFigure.Db - PreamplifierNeed.DirectConversionCredit.Db, 0)) : noiseFigure;

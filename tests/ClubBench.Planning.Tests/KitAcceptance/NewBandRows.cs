@@ -17,7 +17,7 @@ public class NewBandRows
     private static Chain On(string band, StageDocument stage) => KitA.Kept(band, KitA.Kit.With(stage));
 
     private static IReadOnlyList<Finding> Judged(Chain chain, string stage) =>
-        chain.KindOf(stage).Judge(chain.Kit.Stage(stage), chain.Model(stage), chain.SurroundingsOf(stage), Budgets.ChainBudgets.Ask(stage, chain));
+        chain.KindOf(stage).Judge(chain.Kit.Stage(stage), chain.Model(stage), chain.SurroundingsOf(stage), Planning.Budgets.ChainBudgets.Ask(stage, chain));
 
     [Fact]
     public void A1On20m_ChokeOf10uHKept_IsChangeBecauseItLeavesTheBand()
