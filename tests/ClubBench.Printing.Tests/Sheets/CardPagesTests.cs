@@ -1,7 +1,6 @@
 using ClubBench.Planning.Cards;
 using ClubBench.Planning.Plans;
 using ClubBench.Printing.Layout;
-using ClubBench.Printing.Schematics;
 using ClubBench.Printing.Sheets;
 using ClubBench.Printing.Tests.Layout;
 using ClubBench.Printing.Tests.Samples;
@@ -169,37 +168,6 @@ public class CardPagesTests
             Assert.All(surface.Texts, t => Assert.InRange(t.Baseline, 0, paper.Height - PaperSize.Millimetres(5)));
             Assert.All(CardFigures.Of(card), f => Assert.Contains(f.Text.Replace('\u00A0', ' '), Joined(surface), StringComparison.Ordinal));
         }
-    }
-
-    [Theory]
-    [InlineData("20 m", "A4")]
-    [InlineData("40 m", "A4")]
-    [InlineData("20 m", "Letter")]
-    [InlineData("40 m", "Letter")]
-    public void Draw_EveryCardOfAPlan_WritesItsDrawingsInNinePointsAtLeast(string band, string name)
-    {
-        var paper = name == "A4" ? PaperSize.A4 : PaperSize.Letter;
-        var small = SamplePlans.QuernOn(band).Stages
-            .SelectMany(s => Drawn(s.Card, SampleCards.Context with { Paper = paper }).Pages[0].Drawings.Select((d, i) => (Name: $"{s.Stage} drawing {i}", Points: d.LeastLetterPoints, d.Area.Height)))
-            .Where(d => d.Points < 8.99f)
-            .Select(d => $"{d.Name}: {d.Points:0.0} pt, {d.Height:0} high");
-
-        Assert.Equal([], small);
-    }
-
-    [Fact]
-    public void Draw_CardWithRoom_TakesAThirdOfThePageAtMost()
-    {
-        foreach (var card in SamplePlans.QuernOn("20 m").Stages.Where(s => s.Action == StageAction.Keep).Select(s => s.Card))
-            Assert.InRange(Drawn(card).Pages[0].Drawings[0].Area.Height, 0, PaperSize.A4.Height / 3);
-    }
-
-    [Fact]
-    public void Draw_LowPass_ShowsOldAndNewResponseAgainstTheLimit()
-    {
-        var plot = Drawn(SamplePlans.QuernOn("20 m").Stage("A5").Card).Pages[0].Drawings[1].Svg;
-
-        Assert.All(new[] { ">old<", ">new<", ">limit<" }, word => Assert.Contains(word, plot, StringComparison.Ordinal));
     }
 
     [Fact]

@@ -57,12 +57,12 @@ internal sealed class SingleEndedFinalKind : StageKind<FinalStage, FinalModel>
     {
         var s = new SchematicSketch(DescriptionOf, before, after);
         s.Terminal(0, 8, Input);
-        s.Wire(0, 8, 8, 8);
+        s.Wire(0, 8, 7, 8);
         s.Role(SymbolKind.Resistor, 4, 8, Orientation.Down, Roles.BaseReturn);
         s.Ground(4, 12);
-        s.Role(SymbolKind.Bead, 8, 8, Orientation.Across, Roles.BaseBead);
+        s.Role(SymbolKind.Bead, 7, 8, Orientation.Across, Roles.BaseBead);
         s.Role(SymbolKind.TransistorNpn, 13, 8, Orientation.Across, Roles.Transistor);
-        s.Wire(12, 8, 13, 8);
+        s.Wire(11, 8, 13, 8);
         s.Wire(15, 10, 15, 11);
         s.Ground(15, 11);
         s.Wire(15, 6, 26, 6);
