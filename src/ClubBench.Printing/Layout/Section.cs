@@ -38,8 +38,9 @@ internal sealed record Section(string Title, IReadOnlyList<Run> Note, Stack Body
         if (Inline(surface, area.Width) is null) Body.Draw(surface, new Area(area.X, area.Y + head, area.Width, area.Height - head));
     }
 
+    /// <summary>A caution is never parted from what it warns of.</summary>
     public (IBlock Head, IBlock Tail)? CutAt(ICardSurface surface, float width, float room) =>
-        Inline(surface, width) is not null ? null : Body.CutAt(surface, width, room - HeadHeight(surface, width)) is { } cut
+        Inline(surface, width) is null && Body.CutAt(surface, width, room - HeadHeight(surface, width)) is { Head: not Stack { Blocks: [CautionBox] } } cut
             ? (this with { Body = (Stack)cut.Head }, this with { Body = (Stack)cut.Tail })
             : null;
 

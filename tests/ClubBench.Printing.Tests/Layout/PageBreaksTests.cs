@@ -32,6 +32,17 @@ public class PageBreaksTests
     }
 
     [Fact]
+    public void CutAt_RoomForTheCautionOnly_CutsNothingOff()
+    {
+        var caution = new CautionBox([new Run("Hot.", TextStyle.Strong)]);
+        var section = new Section("Measure", "", new Stack([caution, Rows(10)]));
+        var room = 30 + caution.Height(s_surface, 500);
+
+        Assert.Null(section.CutAt(s_surface, 500, room));
+        Assert.NotNull(section.CutAt(s_surface, 500, room + 40));
+    }
+
+    [Fact]
     public void Paragraph_NarrowColumn_WrapsAndKeepsUnbreakableSpaces()
     {
         new Paragraph("about 14.050\u00A0MHz or so", TextStyle.Body).Draw(Page(), new Area(0, 0, 70, 100));

@@ -64,6 +64,26 @@ public sealed class PlanSheetTests : PageContext
         Assert.All(windows, w => Assert.NotEqual(w[0], w[1].Split('\u00A0')[0]));
     }
 
+    [Theory]
+    [InlineData("A4", "Dummy load on before any key-down")]
+    [InlineData("A11", "Dummy load first")]
+    public void Expected_CautionOfMeasuring_StandsAtTheReadingsAndNowhereElse(string stage, string caution)
+    {
+        var sheet = Sheet(stage);
+
+        Assert.Single(sheet.FindAll(".caution"), c => c.TextContent.Contains(caution, StringComparison.Ordinal));
+        Assert.Contains(caution, sheet.FindAll("section").Single(s => s.QuerySelector("table.names-above") is not null).TextContent, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Expected_CautionBeforePower_StandsElsewhere()
+    {
+        var sheet = Sheet("A12");
+
+        Assert.Contains("polarity", sheet.Markup, StringComparison.Ordinal);
+        Assert.DoesNotContain("polarity", sheet.FindAll("section").Single(s => s.QuerySelector("table.names-above") is not null).TextContent, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void Bands_ChosenBand_SpellsOutItsJudgementAndLeadsToAPlan()
     {
