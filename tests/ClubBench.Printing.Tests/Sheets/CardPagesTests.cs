@@ -108,7 +108,7 @@ public class CardPagesTests
     }
 
     [Theory]
-    [InlineData("A4", "Measure", "Dummy load on before", "1 mA or less")]
+    [InlineData("A4", "Measure", "Dummy load on before", "1.00 mA or less")]
     [InlineData("A12", "Before power", "Check the polarity", "Measure")]
     public void Draw_Caution_StandsBetweenItsHeadingAndWhatFollows(string stage, string heading, string caution, string follows)
     {
