@@ -10,7 +10,7 @@ internal static class CheckComparison
     public static CheckRow Row(Figure computed, string? designator, Figure? stated)
     {
         if (stated is null) return new CheckRow(computed.Name, designator, null, computed, null, CheckVerdict.NotGiven);
-        var off = computed.Si - stated.Si;
+        var off = Difference(computed.Si, stated.Si);
         var kind = computed.Kind == QuantityKind.Frequency ? QuantityKind.FrequencyShift : computed.Kind;
         return new CheckRow(computed.Name, designator, stated, computed, Figure.Of(computed.Name, kind, off), VerdictOf(computed.Kind, off, stated.Si));
     }
@@ -20,9 +20,12 @@ internal static class CheckComparison
         from part in stage.Parts
         where description.Role(part.Role)?.Class == PartClass.Winding
         let stated = part.Value(PartValue.Inductance)
-        let computed = Parts.WindingPart.InductanceOf(part)
-        where computed is not null
-        select Row(Figure.Of("inductance", computed.Value), part.Designator, stated is { } h ? Figure.Stated("inductance", QuantityKind.Inductance, h) : null);
+        let winding = Parts.WindingPart.Of(part, LearntValues.None)
+        where winding is not null
+        select Row(winding.Figure(), part.Designator, stated is { } h ? Figure.Stated("inductance", QuantityKind.Inductance, h) : null);
+
+    /// <summary>What the last bits of two equal figures leave is no difference.</summary>
+    private static double Difference(double computed, double stated) => Math.Abs(computed - stated) <= 1e-12 * Math.Abs(stated) ? 0 : computed - stated;
 
     private static CheckVerdict VerdictOf(QuantityKind kind, double off, double stated)
     {
