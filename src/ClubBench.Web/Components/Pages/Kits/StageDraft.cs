@@ -8,8 +8,10 @@ using ClubBench.Planning.Text;
 namespace ClubBench.Web.Components.Pages.Kits;
 
 /// <summary>One value of one part while somebody types it.</summary>
-public sealed class ValueDraft(string part, string name, QuantityKind kind, string? unit, bool needed)
+public sealed class ValueDraft(string part, string name, QuantityKind kind, string? unit, bool needed, string shown, double? si)
 {
+    private string? _typed;
+
     public string Id => $"{part}-{name}";
 
     public string Part => part;
@@ -22,12 +24,22 @@ public sealed class ValueDraft(string part, string name, QuantityKind kind, stri
 
     public bool Needed => needed;
 
-    public string Typed { get; set; } = "";
+    /// <summary>The value with all its digits while nobody has typed over what is shown of it.</summary>
+    public double? Untouched => Typed == shown ? si : null;
+
+    public string Typed
+    {
+        get => _typed ?? shown;
+        set => _typed = value;
+    }
 }
 
 /// <summary>A stage while somebody edits its values. Fields come from the kind's roles, so every kind is edited alike.</summary>
 public sealed class StageDraft
 {
+    /// <summary>A crystal is measured to a part in a hundred million; nothing is known better.</summary>
+    private const int MostDigits = 9;
+
     private readonly List<ValueDraft> _fields;
 
     public StageDraft(Kit kit, string key)
@@ -57,6 +69,7 @@ public sealed class StageDraft
 
     private static double? Read(ValueDraft field, List<FieldMessage> messages)
     {
+        if (field.Untouched is { } si) return si;
         if (field.Typed.Trim().Length == 0 && !field.Needed) return null;
         var read = QuantityText.Parse(field.Typed, field.Kind, field.Unit, path: field.Id);
         messages.AddRange(read.Messages);
@@ -67,11 +80,11 @@ public sealed class StageDraft
         part.ValuesSi.Keys.Union(role?.Values ?? [], StringComparer.Ordinal).Select(name =>
         {
             var kind = KindOf(name);
-            var written = part.Value(name) is { } si ? QuantityText.Split(kind, si, 6) : new QuantityParts("", QuantityUnits.Of(kind)[0].Symbol);
-            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false) { Typed = Shortest(written.Number) };
+            var written = part.Value(name) is { } si ? QuantityText.Split(kind, si, MostDigits) : new QuantityParts("", QuantityUnits.Of(kind)[0].Symbol);
+            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false, Shortest(written.Number), part.Value(name));
         });
 
-    /// <summary>Six digits without the zeros at the end, so that 270 pF stands as 270.</summary>
+    /// <summary>Without the zeros at the end, so that 270 pF stands as 270.</summary>
     private static string Shortest(string number) =>
         number.Contains(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator, StringComparison.Ordinal)
             ? number.TrimEnd('0').TrimEnd(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator[0])
