@@ -80,6 +80,7 @@ public sealed class TargetDraft
         {
             var read = QuantityText.Parse(text, kind, unit, path: field);
             messages.AddRange(read.Messages);
+            if (read is { Succeeded: true, Value.Si: <= 0 } && kind != QuantityKind.Decibels) messages.Add(FieldMessage.Error(field, "field.not-positive"));
             return read.Succeeded ? read.Value.Si : null;
         }
     }
