@@ -1,5 +1,6 @@
 using System.Net;
 using System.Text;
+using System.Text.Json.Nodes;
 
 namespace ClubBench.Web.Tests.Api;
 
@@ -86,6 +87,19 @@ public sealed class PlanInterfaceTests(DemoInterface api) : IClassFixture<DemoIn
         Assert.StartsWith("part,type,value,rated_voltage,needed,spare,in_stock,to_buy\r\n", one.TrimStart('\uFEFF'), StringComparison.Ordinal);
         Assert.Equal(one.Split("\r\n").Length, ten.Split("\r\n").Length);
         Assert.NotEqual(one, ten);
+    }
+
+    [Fact]
+    public async Task PartsOrder_ExampleOfTheDescription_HasTheColumnsOfTheFile()
+    {
+        var file = await api.Program.GetStringAsync($"/api/v1/plans/{await api.PlanIdAsync("20 m")}/parts-order.csv", Cancellation);
+
+        var description = JsonNode.Parse(await api.Program.GetStringAsync("/openapi/v1.json", Cancellation))!;
+
+        var answer = description["paths"]!["/api/v1/plans/{id}/parts-order.csv"]!["get"]!["responses"]!["200"]!["content"]!["text/csv"]!;
+        var example = answer["example"]!.GetValue<string>();
+        Assert.Equal(file.TrimStart('\uFEFF').Split("\r\n")[0], example.Split("\r\n")[0]);
+        Assert.Equal(example.Split("\r\n")[0].Split(',').Length, example.Split("\r\n")[1].Split(',').Length);
     }
 
     [Fact]
