@@ -1,6 +1,9 @@
 using System.Net.Http.Headers;
 using System.Text.Json.Nodes;
+using ClubBench.Club.Access;
 using ClubBench.Club.Demo;
+using ClubBench.Club.UseCases.SignIn;
+using ClubBench.Planning.Kits;
 using ClubBench.Web.Tests.SignIn;
 using Microsoft.Extensions.DependencyInjection;
 
@@ -15,6 +18,9 @@ public sealed class DemoInterface : IAsyncLifetime
 
     public HttpClient Program { get; private set; } = null!;
 
+    /// <summary>Whose token it is.</summary>
+    public Actor Coordinator { get; private set; } = Actor.Visitor;
+
     /// <summary>Somebody without a token.</summary>
     public HttpClient Stranger { get; private set; } = null!;
 
@@ -23,6 +29,7 @@ public sealed class DemoInterface : IAsyncLifetime
         var entrances = await _club.Services.GetRequiredService<DemoClub>().OpenAsync(TestContext.Current.CancellationToken);
         (Program, Stranger) = (_club.Browser(), _club.Browser());
         Program.DefaultRequestHeaders.Authorization = new AuthenticationHeaderValue("Bearer", entrances.ApiToken);
+        Coordinator = (await _club.Services.GetRequiredService<FindByToken>().Run(Actor.Visitor, new FindByTokenInput(entrances.ApiToken), TestContext.Current.CancellationToken)).Value;
     }
 
     public async ValueTask DisposeAsync()
@@ -43,6 +50,24 @@ public sealed class DemoInterface : IAsyncLifetime
 
     public Task<HttpResponseMessage> PostAsync(string path, string json) =>
         Program.PostAsync("/api/v1/" + path, new StringContent(json, System.Text.Encoding.UTF8, "application/json"), TestContext.Current.CancellationToken);
+
+    /// <summary>A plan of the demonstration's kit that nobody else uses; its limits are confirmed by nobody yet.</summary>
+    public async Task<Guid> NewPlanAsync(string band)
+    {
+        var kit = (await ItemsAsync("kits")).First(k => k["name"]!.GetValue<string>() == DemoKits.QuernThirty.Name)["id"]!.GetValue<string>();
+        using var made = await PostAsync("plans", $$"""{ "kitId": "{{kit}}", "band": "{{band}}" }""");
+        return (await JsonOf(made))["id"]!.GetValue<Guid>();
+    }
+
+    /// <summary>A kit like the demonstration's that nobody else uses.</summary>
+    public async Task<Kit> NewKitAsync()
+    {
+        var kit = DemoKits.QuernThirty with { Id = Guid.NewGuid(), Name = "Quern-30 for a test" };
+        using var file = new MemoryStream();
+        KitFile.Write(kit, file);
+        using var made = await PostAsync("kits", System.Text.Encoding.UTF8.GetString(file.ToArray()));
+        return kit with { Id = (await JsonOf(made))["id"]!.GetValue<Guid>() };
+    }
 
     /// <summary>Id of the demonstration's plan to a band.</summary>
     public async Task<string> PlanIdAsync(string band) => (await ItemsAsync("plans")).First(p => p["band"]!.GetValue<string>() == band)["id"]!.GetValue<string>();

@@ -10,8 +10,15 @@ public sealed record CardStatusInput(Guid CardId);
 
 /// <summary>Whether a card is current, and besides that only what stands on the paper.</summary>
 /// <param name="PlanId">Plan of the card; opening it asks for more than the paper.</param>
-/// <param name="ReplacedBy">Number of the card that replaced it; null while it is current.</param>
-public sealed record CardStanding(Guid PlanId, string BandName, string Stage, int Number, int? ReplacedBy);
+/// <param name="InForce">Number of the card boards are built by; zero where the revision in force has no such stage.</param>
+public sealed record CardStanding(Guid PlanId, string BandName, string Stage, int Number, int InForce)
+{
+    /// <summary>Number of the card that replaced it; null while it is current or not yet in force.</summary>
+    public int? ReplacedBy => InForce > Number ? InForce : null;
+
+    /// <summary>Whether it comes from a revision that is not issued yet while another one is.</summary>
+    public bool IsAhead => Number > InForce;
+}
 
 /// <summary>Says whether a card is current or what replaced it: what the code on the printed card leads to. Whoever holds the paper may ask.</summary>
 public sealed class CardStatus(ClubStore store) : Query<CardStatusInput, CardStanding>(store)
@@ -24,8 +31,9 @@ public sealed class CardStatus(ClubStore store) : Query<CardStatusInput, CardSta
     {
         if (await work.Db.Cards.IgnoreQueryFilters().FirstOrDefaultAsync(c => c.Id == input.CardId, cancellation) is not { } card) return NotFound("cardId");
         work.Enter(card.ClubId);
-        var newest = await work.Db.Cards.Where(c => c.PlanId == card.PlanId && c.Stage == card.Stage).MaxAsync(c => c.Number, cancellation);
-        var band = await work.Db.Plans.Where(p => p.Id == card.PlanId).Select(p => p.BandName).SingleAsync(cancellation);
-        return Success(new CardStanding(card.PlanId, band, card.Stage, card.Number, newest == card.Number ? null : newest));
+        var plan = await work.Db.Plans.SingleAsync(p => p.Id == card.PlanId, cancellation);
+        var revision = plan.RevisionInForce;
+        var inForce = await work.Db.Cards.Where(c => c.PlanId == card.PlanId && c.Stage == card.Stage && c.FirstPlanRevision <= revision).MaxAsync(c => (int?)c.Number, cancellation);
+        return Success(new CardStanding(card.PlanId, plan.BandName, card.Stage, card.Number, inForce ?? 0));
     }
 }
