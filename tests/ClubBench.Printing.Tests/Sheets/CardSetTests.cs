@@ -1,3 +1,4 @@
+using System.Text.RegularExpressions;
 using ClubBench.Printing.Layout;
 using ClubBench.Printing.Sheets;
 using ClubBench.Printing.Tests.Samples;
@@ -46,6 +47,33 @@ public class CardSetTests
         Assert.True(figures.Count >= 20);
         Assert.All(figures, f => Assert.Contains(Plain(f.Text), text, StringComparison.Ordinal));
     }
+
+    [Theory]
+    [InlineData("20 m")]
+    [InlineData("40 m")]
+    public void Pdf_EveryCardOfAPlan_ShowsItsFiguresOnItsOwnPage(string band)
+    {
+        var cards = SamplePlans.QuernOn(band).Stages.Select(s => s.Card).ToList();
+
+        using var pdf = PdfDocument.Open(CardSet.Pdf([.. cards.Select(c => new PrintedCard(c, SampleCards.Context))]));
+
+        Assert.Equal((12, 12), (cards.Count, pdf.NumberOfPages));
+        foreach (var (card, page) in cards.Zip(pdf.GetPages().Select(OneLine)))
+        {
+            Assert.Contains($"{card.Stage} card", page, StringComparison.Ordinal);
+            Assert.NotEmpty(CardFigures.Of(card));
+            Assert.All(CardFigures.Of(card), f => Assert.True(Stands(f.Text, page), $"{card.Stage} {f.Of}: {f.Text} is not in the text of its page"));
+        }
+
+        Assert.True(cards.Sum(c => CardFigures.Of(c).Count) >= 80);
+    }
+
+    [Theory]
+    [InlineData("15 t", true)]
+    [InlineData("5 t", false)]
+    [InlineData("0.714 µH", true)]
+    [InlineData("0.71", false)]
+    public void Stands_PartOfAnotherFigure_IsNotTheFigure(string figure, bool stands) => Assert.Equal(stands, Stands(figure, "L4 15 t of wire 0.714 µH"));
 
     [Fact]
     public void Pdf_SameCardTwice_GivesSameBytes() => Assert.Equal(s_card.Value, CardSet.Pdf(SampleCards.Card));
@@ -107,6 +135,12 @@ public class CardSetTests
         using var document = PdfDocument.Open(pdf);
         return Plain(string.Join('\n', document.GetPages().Select(p => ContentOrderTextExtractor.GetText(p))));
     }
+
+    private static string OneLine(UglyToad.PdfPig.Content.Page page) => Plain(ContentOrderTextExtractor.GetText(page)).ReplaceLineEndings(" ");
+
+    /// <summary>Whether a figure stands in a text by itself, not as a piece of a longer number or word.</summary>
+    private static bool Stands(string figure, string text) =>
+        Regex.IsMatch(text, $@"(?<![\w.,]){Regex.Escape(Plain(figure))}(?![\w]|[.,]\d)", RegexOptions.ExplicitCapture, TimeSpan.FromSeconds(1));
 
     /// <summary>A space that does not break is a space to whoever searches.</summary>
     private static string Plain(string text) => text.Replace('\u00A0', ' ');
