@@ -15,9 +15,7 @@ internal static class PlanFileEndpoints
 {
     private const string Pdf = "application/pdf";
     private const string Csv = "text/csv";
-    private const string OrderExample = OrderSheet.Headings + "\"Core\",\"T37-6\",\"\",\"\",21,3,24,0
-\"Capacitor\",\"NP0\",\"360 pF\",\"100 V\",14,2,0,16
-";
+    private const string OrderExample = OrderSheet.Headings + "\"Core\",\"T37-6\",\"\",\"\",21,3,24,0\r\n\"Capacitor\",\"NP0\",\"360 pF\",\"100 V\",14,2,0,16\r\n";
     private const string Spreadsheet = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
 
     public static void MapPlanFiles(this IEndpointRouteBuilder api)

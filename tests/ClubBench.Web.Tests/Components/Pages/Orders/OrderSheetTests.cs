@@ -8,10 +8,10 @@ public sealed class OrderSheetTests
 {
     private static readonly PartsOrder Order = new(
     [
-        new(PartClass.Capacitor, "NP0", 180e-12, 100, 14, 2, 6, 10),
-        new(PartClass.Winding, "T37-6", null, null, 21, 3, 24, 0),
-        new(PartClass.Winding, PartsOrder.Wire, 0.4e-3, null, 6.1, 1.22, 0, 7.32),
-        new(PartClass.Diode, "Zener 0.5 W", 6.2, null, 7, 1, 0, 8),
+        new(PartClass.Capacitor, "NP0", 180e-12, null, 100, 14, 2, 6, 10),
+        new(PartClass.Winding, "T37-6", null, null, null, 21, 3, 24, 0),
+        new(PartClass.Winding, PartsOrder.Wire, 0.4e-3, null, null, 6.1, 1.22, 0, 7.32),
+        new(PartClass.Diode, "Zener 0.5 W", 6.2, null, null, 7, 1, 0, 8),
     ]);
 
     [Theory]
@@ -24,8 +24,8 @@ public sealed class OrderSheetTests
         Assert.Equal(
             [
                 new OrderRow("Capacitor", "NP0", "180\u00A0pF", "100\u00A0V", 14, 2, 6, 10),
-                new OrderRow("Winding", "T37-6", "", "", 21, 3, 24, 0),
-                new OrderRow("Winding", "wire, in metres", "0.4\u00A0mm", "", 6.1, 1.22, 0, 7.32),
+                new OrderRow("Core", "T37-6", "", "", 21, 3, 24, 0),
+                new OrderRow("Wire", "enamelled copper, in metres", "0.4\u00A0mm", "", 6.1, 1.22, 0, 7.32),
                 new OrderRow("Diode", "Zener 0.5 W", "6.2\u00A0V", "", 7, 1, 0, 8),
             ],
             file);
