@@ -39,7 +39,7 @@ public sealed class LowPassPrototype
     public static LowPassPrototype Chebyshev(int order, PassBandRipple ripple)
     {
         Guard.Within(order, 1, 11, nameof(order));
-        var rippleDb = Guard.Within(ripple.Ripple.Db, 0.0001, 3, nameof(ripple));
+        var rippleDb = ripple.DesignRippleDb(nameof(ripple));
         var beta = -Math.Log(Math.Tanh(rippleDb * Math.Log(10) / 40));
         var gamma = Math.Sinh(beta / (2 * order));
         var g = ImmutableArray.CreateBuilder<double>(order);

@@ -40,4 +40,7 @@ public readonly record struct PassBandRipple
     /// <summary>From a largest standing wave ratio above 1.</summary>
     public static PassBandRipple FromStandingWaveRatio(double ratio) =>
         FromReflection((Guard.Positive(ratio, nameof(ratio)) - 1) / (ratio + 1));
+
+    // Rounded, so that the ends of the range are inside it however they were given.
+    internal double DesignRippleDb(string name) => Guard.Within(Math.Round(Ripple.Db, 9), 0.0001, 3, name);
 }

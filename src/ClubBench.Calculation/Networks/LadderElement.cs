@@ -86,12 +86,15 @@ public readonly record struct LadderElement
     /// <summary>Impedance of the arm, ohm.</summary>
     public Complex Impedance(Frequency f) =>
         IsTrap && Position == LadderPosition.Series
-            ? 1 / ((1 / CoilImpedance(f.RadiansPerSecond)) + (1 / CapacitorImpedance(f.RadiansPerSecond)))
+            ? Inverse((1 / CoilImpedance(f.RadiansPerSecond)) + (1 / CapacitorImpedance(f.RadiansPerSecond)))
             : CoilImpedance(f.RadiansPerSecond) + CapacitorImpedance(f.RadiansPerSecond);
 
     /// <summary>The arm as a two-port.</summary>
     public TwoPort At(Frequency f) =>
-        Position == LadderPosition.Series ? TwoPort.Series(Impedance(f)) : TwoPort.Shunt(1 / Impedance(f));
+        Position == LadderPosition.Series ? TwoPort.Series(Impedance(f)) : TwoPort.Shunt(Inverse(Impedance(f)));
+
+    // Without losses a trap met exactly at its notch has no inverse; this is far beyond what any figure shows.
+    private static Complex Inverse(Complex immittance) => immittance == Complex.Zero ? 1e100 : 1 / immittance;
 
     internal Complex CoilImpedance(double w) => HasCoil ? w * InductanceHenry * new Complex(CoilLoss, 1) : Complex.Zero;
 

@@ -158,6 +158,12 @@ public class LowPassPrototypeTests
                 && Math.Abs((ripple.Epsilon * ripple.Epsilon) - (ripple.Ripple.PowerRatio - 1)) < 1e-9;
         });
 
+    [Theory]
+    [InlineData(3)]
+    [InlineData(0.0001)]
+    public void Chebyshev_RippleAtAnEndOfItsRange_IsAccepted(double rippleDb) =>
+        Assert.Equal(5, LowPassPrototype.Chebyshev(5, PassBandRipple.FromRipple(Decibels.FromDb(rippleDb))).Order);
+
     private static void Parts(double[] expected, IEnumerable<double> actual)
     {
         foreach (var (e, a) in expected.Zip(actual)) Assert.Equal(e, a, e * 5e-5);

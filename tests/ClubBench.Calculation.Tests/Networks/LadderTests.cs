@@ -131,6 +131,20 @@ public class LadderTests
         Assert.Equal(20 * Math.Log10((25 + 0.6) / 0.6), loss.Db, 1e-6);
     }
 
+    [Theory]
+    [InlineData(LadderPosition.Series)]
+    [InlineData(LadderPosition.Shunt)]
+    public void Loss_LosslessTrapExactlyAtItsNotch_IsTheMostThatIsTold(LadderPosition position)
+    {
+        // 1 rad/s on 1 H and 1 F cancels to the last digit.
+        var (coil, capacitor) = (Inductance.FromHenry(1), Capacitance.FromFarad(1));
+        var trap = position == LadderPosition.Series ? LadderElement.SeriesTrap(coil, capacitor) : LadderElement.ShuntTrap(coil, capacitor);
+
+        var loss = new Ladder([trap]).Loss(Frequency.FromHertz(1 / (2 * Math.PI)), FiftyOhm, FiftyOhm);
+
+        Assert.Equal(300, loss.Db, 1e-9);
+    }
+
     [Fact]
     [Evidence(typeof(Ladder), EvidenceKind.ClosedFormLimit)]
     public void CutOff3dB_Chebyshev_IsTheClosedForm()
