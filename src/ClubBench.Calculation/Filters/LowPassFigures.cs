@@ -18,22 +18,26 @@ public sealed record LowPassFigures(Decibels WorstReturnLoss, Decibels WorstPass
 {
     /// <summary>Analyses a filter against a requirement; no Q given means lossless.</summary>
     /// <remarks>Method: chain matrix at evenly spaced pass-band frequencies and at the harmonics of both band ends. Source: derived.</remarks>
-    public static LowPassFigures Of(LowPassDesign design, LowPassRequirement requirement, double? coilQ = null, double? capacitorQ = null, int passPoints = 17)
+    public static LowPassFigures Of(LowPassDesign design, LowPassRequirement requirement, double? coilQ = null, double? capacitorQ = null, int passPoints = 17) =>
+        Of(design.ToLadder(coilQ, capacitorQ), design.Source, design.Load, requirement, passPoints);
+
+    /// <summary>Analyses any ladder between two resistances above zero against a requirement.</summary>
+    /// <remarks>Method: as above. Source: derived.</remarks>
+    public static LowPassFigures Of(Ladder ladder, Resistance source, Resistance load, LowPassRequirement requirement, int passPoints = 17)
     {
-        var ladder = design.ToLadder(coilQ, capacitorQ);
-        var pass = ladder.Sweep(requirement.Band.Points(passPoints), design.Source, design.Load);
-        var harmonics = requirement.Harmonics.Select(h => Harmonic(ladder, design, requirement.Band, h)).ToList();
+        var pass = ladder.Sweep(requirement.Band.Points(passPoints), source, load);
+        var harmonics = requirement.Harmonics.Select(h => Harmonic(ladder, source, load, requirement.Band, h)).ToList();
         var returnLoss = pass.Min(p => p.ReturnLoss);
         var margin = harmonics.Select(h => h.Margin).Append(returnLoss - requirement.ReturnLoss).Min();
         return new LowPassFigures(returnLoss, pass.Max(p => p.Loss), harmonics, margin);
     }
 
-    private static HarmonicFigure Harmonic(Ladder ladder, LowPassDesign design, FrequencyRange band, HarmonicRequirement wanted)
+    private static HarmonicFigure Harmonic(Ladder ladder, Resistance source, Resistance load, FrequencyRange band, HarmonicRequirement wanted)
     {
         var (low, high) = (At(band.Low), At(band.High));
         var worse = low < high ? low : high;
         return new HarmonicFigure(wanted.Harmonic, worse, worse - wanted.Attenuation);
 
-        Decibels At(Frequency f) => ladder.Loss(f.Harmonic(wanted.Harmonic), design.Source, design.Load);
+        Decibels At(Frequency f) => ladder.Loss(f.Harmonic(wanted.Harmonic), source, load);
     }
 }
