@@ -15,6 +15,19 @@ public sealed record ArmSensitivity(
     Decibels? ReturnLossPerPercentCoil,
     Decibels? ReturnLossPerPercentCapacitor);
 
+/// <summary>What of an arm may differ from its nominal value.</summary>
+internal enum ArmParameter
+{
+    /// <summary>Inductance.</summary>
+    Coil,
+
+    /// <summary>Capacitance.</summary>
+    Capacitor,
+
+    /// <summary>Unloaded Q of the coil.</summary>
+    CoilQ,
+}
+
 /// <summary>Exact derivatives of a ladder at one frequency: group delay and the influence of every part. Immutable.</summary>
 /// <remarks>
 /// Method: rows of the chain up to each arm and columns after it; every derivative is a product of one of each.
@@ -27,6 +40,7 @@ public sealed class LadderDerivatives
     private readonly Frequency _f;
     private readonly double _w;
     private readonly Complex _denominator;
+    private readonly double _passing;
     private readonly Complex _reflection;
     private readonly Complex[] _denominatorSlopes;
     private readonly Complex[] _numeratorSlopes;
@@ -41,6 +55,7 @@ public sealed class LadderDerivatives
         (_denominator, _denominatorSlopes) = Slopes(arms, columns, rs);
         (var numerator, _numeratorSlopes) = Slopes(arms, columns, -rs);
         _reflection = numerator / _denominator;
+        _passing = 2 * Math.Sqrt(rs * rl);
     }
 
     /// <summary>Group delay of the transmission; below zero only in odd corners of a stop-band.</summary>
@@ -55,6 +70,23 @@ public sealed class LadderDerivatives
             Loss(k, e.HasCapacitor ? CapacitorSlope(e) : null),
             ReturnLoss(k, e.HasCoil ? CoilSlope(e) : null),
             ReturnLoss(k, e.HasCapacitor ? CapacitorSlope(e) : null)))];
+
+    /// <summary>Reflection at the input and transmission.</summary>
+    internal (Complex Reflection, Complex Transmission) Scattering => (_reflection, _passing / _denominator);
+
+    /// <summary>Slopes of reflection and transmission against the natural logarithm of a parameter of arm k.</summary>
+    internal (Complex Reflection, Complex Transmission) Slope(int k, ArmParameter parameter)
+    {
+        var arm = _elements[k];
+        var x = parameter switch
+        {
+            ArmParameter.Coil => CoilSlope(arm),
+            ArmParameter.Capacitor => CapacitorSlope(arm),
+            _ => ArmSlope(arm, -_w * arm.InductanceHenry * arm.CoilLoss, coil: true),
+        };
+        var denominatorSlope = _denominatorSlopes[k] * x / _denominator;
+        return ((_numeratorSlopes[k] * x / _denominator) - (_reflection * denominatorSlope), -_passing / _denominator * denominatorSlope);
+    }
 
     private Decibels? Loss(int k, Complex? slope) =>
         slope is { } x ? PerPercent((_denominatorSlopes[k] * x / _denominator).Real) : null;

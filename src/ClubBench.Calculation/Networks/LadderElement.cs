@@ -44,9 +44,9 @@ public readonly record struct LadderElement
 
     internal double CapacitanceFarad { get; private init; }
 
-    internal double CoilLoss { get; }
+    internal double CoilLoss { get; private init; }
 
-    internal double CapacitorLoss { get; }
+    internal double CapacitorLoss { get; private init; }
 
     internal bool HasCoil => InductanceHenry > 0;
 
@@ -81,6 +81,13 @@ public readonly record struct LadderElement
     {
         InductanceHenry = InductanceHenry * Guard.Positive(coilFactor, nameof(coilFactor)),
         CapacitanceFarad = CapacitanceFarad * Guard.Positive(capacitorFactor, nameof(capacitorFactor)),
+    };
+
+    /// <summary>The same arm with other unloaded Q, above zero; no Q given means lossless.</summary>
+    public LadderElement WithQ(double? coilQ, double? capacitorQ) => this with
+    {
+        CoilLoss = coilQ is { } l ? 1 / Guard.Positive(l, nameof(coilQ)) : 0,
+        CapacitorLoss = capacitorQ is { } c ? 1 / Guard.Positive(c, nameof(capacitorQ)) : 0,
     };
 
     /// <summary>Impedance of the arm, ohm.</summary>
