@@ -35,5 +35,8 @@ public sealed class ReferenceRow(IReadOnlyDictionary<string, string> cells)
 
     public double Number(string column) => double.Parse(cells[column], CultureInfo.InvariantCulture);
 
+    /// <summary>Numbers with semicolons between them, in their order.</summary>
+    public IReadOnlyList<double> Numbers(string column) => [.. cells[column].Split(';').Select(c => double.Parse(c, CultureInfo.InvariantCulture))];
+
     public override string ToString() => cells["case_id"];
 }

@@ -32,9 +32,9 @@ def node_voltages(elements, frequency_hz, source_ohm, load_ohm, emf):
     return arms, solve(y, [emf / source_ohm + 0j] + [0j] * (size - 1))
 
 
-def stress(load_ohm):
+def stress(load_ohm, coil_q=150, capacitor_q=1000):
     """Peak volt and ampere of every arm and the watts delivered, 5 W available at 7.1 MHz."""
-    arms, v = node_voltages(filter_arms(), 7.1e6, 50, load_ohm, math.sqrt(8 * 50 * 5))
+    arms, v = node_voltages(filter_arms(coil_q=coil_q, capacitor_q=capacitor_q), 7.1e6, 50, load_ohm, math.sqrt(8 * 50 * 5))
     node, told = 0, []
     for series, admittance in arms:
         across = v[node] - v[node + 1] if series else v[node]
@@ -72,6 +72,16 @@ def input_impedance(load_ohm):
     return v[0] / ((1 - v[0]) / 50)
 
 
+def reflection(frequency_hz):
+    _, v = node_voltages(filter_arms(coil_q=0, capacitor_q=0), frequency_hz, 50, 50, 1)
+    return 2 * v[0] - 1
+
+
+def with_leads(lead_henry=6e-9):
+    """The lossless filter with an inductance in every capacitor to ground."""
+    return [f"L:{L}" if k % 2 else f"CT:{lead_henry}:{MIDDLE if k == 2 else C}" for k in range(5)]
+
+
 def group_delay(frequency_hz, step=1e-5):
     ratio = (lossless(filter_arms(coil_q=0, capacitor_q=0), frequency_hz * (1 + step), 50, 50)[2]
              / lossless(filter_arms(coil_q=0, capacitor_q=0), frequency_hz * (1 - step), 50, 50)[2])
@@ -94,9 +104,12 @@ def pad(outer, inner):
 if __name__ == "__main__":
     print("50 ohm", *stress(50))
     print("25 ohm", *stress(25))
+    print("50 ohm, lossless", *stress(50, 0, 0))
     for tolerances in ((0.05, 0.05), (0.10, 0.05), (0.05, 0.02), (0.03, 0.02)):
         print("coils and capacitors", tolerances, share_good(*tolerances))
     print("input impedance", *(complex(round(z.real, 3), round(z.imag, 3)) for z in map(input_impedance, (25, 50 + 20j, 50))))
+    print("reflection", *(complex(round(r.real, 5), round(r.imag, 5)) for r in (reflection(f * 1e6) for f in (3.5, 7.1, 8.0, 14.2))))
+    print("leads of 6 nH", *(round(lossless(with_leads(), f * 1e6, 50, 50)[0], 3) for f in (14.2, 21.3, 28.4, 150)))
     for source, load in ((50, 25), (50, 100), (12.5, 50)):
         print("ends", source, load, *(round(x, 4) for x in lossless(filter_arms(coil_q=0, capacitor_q=0), 7.1e6, source, load)[:2]))
     print("group delay, ns", *(round(1e9 * group_delay(f), 3) for f in (1.0e6, 7.1e6, 8.0e6)))

@@ -38,6 +38,10 @@ public sealed class Ladder
         return chain;
     }
 
+    /// <summary>The same ladder with the inductance of leads and pads in every capacitor to ground: about 0.8 to 1 nH per millimetre, 5 to 8 nH for a leaded part.</summary>
+    /// <remarks>Method: the capacitor becomes a series trap, lossless leads. Source: common practice.</remarks>
+    public Ladder WithLeads(Inductance perCapacitor) => new(Elements.Select(e => e.WithLead(perCapacitor)));
+
     /// <summary>Transducer loss, positive: what reaches the load against what the source could give.</summary>
     public Decibels Loss(Frequency f, Resistance source, Resistance load) => At(f).Loss(source, load);
 

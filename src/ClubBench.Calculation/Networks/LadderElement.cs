@@ -90,6 +90,9 @@ public readonly record struct LadderElement
         CapacitorLoss = capacitorQ is { } c ? 1 / Guard.Positive(c, nameof(capacitorQ)) : 0,
     };
 
+    /// <summary>A capacitor to ground with an inductance in its leads; every other arm as it is.</summary>
+    internal LadderElement WithLead(Inductance lead) => Position == LadderPosition.Shunt && HasCapacitor && !HasCoil ? this with { InductanceHenry = lead.Henry } : this;
+
     /// <summary>Impedance of the arm, ohm.</summary>
     public Complex Impedance(Frequency f) =>
         IsTrap && Position == LadderPosition.Series

@@ -6,18 +6,16 @@ namespace ClubBench.Calculation.Tests.Filters;
 
 public class LadderYieldTests
 {
-    // Shares of good boards as tests/Recomputed/ladder_stress_and_yield.py finds them.
-    [Theory]
-    [InlineData(0.05, 0.05, 0.904)]
-    [InlineData(0.10, 0.05, 0.649)]
-    [InlineData(0.05, 0.02, 0.998)]
-    [InlineData(0.03, 0.02, 1.000)]
-    [Evidence(typeof(LadderYield), EvidenceKind.IndependentRecomputation)]
-    public void Of_IndependentParts_MatchesNodalAnalysis(double coil, double capacitor, double expected)
-    {
-        var result = LadderYield.Of(Question(new(capacitor, 0, coil)));
+    public static TheoryData<ReferenceRow> Yields => ReferenceTable.Theory("low_pass_yield");
 
-        Assert.Equal(expected, result.Passed.Share, 0.015);
+    [Theory]
+    [MemberData(nameof(Yields))]
+    [Evidence(typeof(LadderYield), EvidenceKind.IndependentRecomputation)]
+    public void Of_IndependentParts_MatchesNodalAnalysis(ReferenceRow row)
+    {
+        var result = LadderYield.Of(Question(new(row.Number("capacitor_scatter"), 0, row.Number("coil_scatter"))));
+
+        Assert.Equal(row.Number("share"), result.Passed.Share, row.Number("tolerance"));
     }
 
     [Fact]

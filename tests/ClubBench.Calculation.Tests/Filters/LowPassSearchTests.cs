@@ -9,36 +9,23 @@ public class LowPassSearchTests
     private static readonly double[] E12 = [10, 12, 15, 18, 22, 27, 33, 39, 47, 56, 68, 82];
     private static readonly double[] E24 = [10, 11, 12, 13, 15, 16, 18, 20, 22, 24, 27, 30, 33, 36, 39, 43, 47, 51, 56, 62, 68, 75, 82, 91];
 
-    [Fact]
-    public void Run_FiveElementsE12Pairs_FindsTheOptimumOfTheWholeWindow()
-    {
-        var result = LowPassSearch.Run(Question(F7, E12, 0.12, true, 4.0, Band40m));
+    public static TheoryData<ReferenceRow> Optima => ReferenceTable.Theory("low_pass_search");
 
-        Assert.Equal((161_700, true), (result.Tried, result.Exhausted));
-        Assert.Equal(4.0743, result.Best.Max(c => c.LosslessMargin.Db), 1e-4);
-        var optimum = result.Best.MaxBy(c => c.LosslessMargin)!;
-        Assert.Equal([430, 780, 430], optimum.Capacitors.Select(c => Math.Round(c.Value.Picofarad)));
-        Assert.Equal([19, 19], optimum.Coils.Select(l => l.Turns));
-    }
-
-    // As tests/Recomputed/low_pass_search.py finds them.
     [Theory]
-    [InlineData("f7", "e12", 0.15, 4.0, 32, 0.7462, "390 820 390", "18 18")]
-    [InlineData("f14", "e12", 0.15, 3.0, 128, 1.1636, "180 390 390 180", "15 16 15")]
-    [InlineData("f14", "e24", 0.12, 3.0, 648, 4.1781, "160 390 390 160", "16 17 16")]
+    [MemberData(nameof(Optima))]
     [Evidence(typeof(LowPassSearch), EvidenceKind.IndependentRecomputation)]
-    public void Run_SingleParts_FindsTheOptimumOfNodalAnalysis(
-        string filter, string series, double window, double factor, long tried, double marginDb, string picofarads, string turns)
+    public void Run_WholeWindow_FindsTheOptimumOfNodalAnalysis(ReferenceRow row)
     {
-        var (design, requirement) = filter == "f7" ? (F7, Band40m) : (F14, Band20m);
+        var (design, requirement) = row["filter"] == "f7" ? (F7, Band40m) : (F14, Band20m);
+        var question = Question(design, row["series"] == "E12" ? E12 : E24, row.Number("window"), row["pairs"] == "true", row.Number("factor_nh"), requirement);
 
-        var result = LowPassSearch.Run(Question(design, series == "e12" ? E12 : E24, window, false, factor, requirement));
+        var result = LowPassSearch.Run(question);
 
         var optimum = result.Best.MaxBy(c => c.LosslessMargin)!;
-        Assert.Equal(tried, result.Tried);
-        Assert.Equal(marginDb, optimum.LosslessMargin.Db, 1e-4);
-        Assert.Equal(picofarads, string.Join(' ', optimum.Capacitors.Select(c => (int)Math.Round(c.Value.Picofarad))));
-        Assert.Equal(turns, string.Join(' ', optimum.Coils.Select(l => l.Turns)));
+        Assert.Equal(((long)row.Number("tried"), true), (result.Tried, result.Exhausted));
+        Assert.Equal(row.Number("margin_db"), optimum.LosslessMargin.Db, row.Number("tolerance"));
+        Assert.Equal(row.Numbers("capacitors_pf"), optimum.Capacitors.Select(c => Math.Round(c.Value.Picofarad)));
+        Assert.Equal(row.Numbers("turns"), optimum.Coils.Select(l => (double)l.Turns));
     }
 
     [Fact]

@@ -6,27 +6,27 @@ namespace ClubBench.Calculation.Tests.Networks;
 
 public class LadderDerivativesTests
 {
-    [Theory]
-    [InlineData(1.0, 64.544)]
-    [InlineData(7.1, 90.059)]
-    [InlineData(8.0, 113.384)]
-    public void GroupDelay_ChebyshevFive_MatchesDifferencesOfNodalAnalysis(double megahertz, double nanosecond) =>
-        Assert.Equal(nanosecond, Derivatives(F7.ToLadder(), megahertz).GroupDelaySecond * 1e9, nanosecond * 1e-3);
+    public static TheoryData<ReferenceRow> Delays => ReferenceTable.Theory("group_delay");
+
+    public static TheoryData<ReferenceRow> Slopes => ReferenceTable.Theory("ladder_sensitivity");
 
     [Theory]
-    [InlineData(7.3, -0.00196, 0.00121, 0.00579)]
-    [InlineData(8.0, 0.00354, -0.00662, -0.01555)]
-    [InlineData(14.2, -0.07316, -0.12635, -0.12500)]
-    public void Sensitivities_ChebyshevFive_MatchDifferencesOfNodalAnalysis(double megahertz, double end, double coil, double middle)
+    [MemberData(nameof(Delays))]
+    public void GroupDelay_ChebyshevFive_MatchesDifferencesOfNodalAnalysis(ReferenceRow row) => Assert.Equal(
+        row.Number("delay_ns"),
+        Derivatives(F7.ToLadder(), row.Number("frequency_mhz")).GroupDelaySecond * 1e9,
+        row.Number("delay_ns") * row.Number("relative_tolerance"));
+
+    [Theory]
+    [MemberData(nameof(Slopes))]
+    public void Sensitivities_ChebyshevFive_MatchDifferencesOfNodalAnalysis(ReferenceRow row)
     {
-        var arms = Derivatives(F7.ToLadder(), megahertz).Sensitivities;
+        var arms = Derivatives(F7.ToLadder(), row.Number("frequency_mhz")).Sensitivities;
 
-        // The figures are slopes of the gain (tests/Recomputed/ladder_stress_and_yield.py), the product tells slopes of the loss.
-        Assert.Equal(-end, arms[0].LossPerPercentCapacitor!.Value.Db, 2e-4);
-        Assert.Equal(-coil, arms[1].LossPerPercentCoil!.Value.Db, 2e-4);
-        Assert.Equal(-middle, arms[2].LossPerPercentCapacitor!.Value.Db, 2e-4);
-        Assert.Equal(-coil, arms[3].LossPerPercentCoil!.Value.Db, 2e-4);
-        Assert.Equal(-end, arms[4].LossPerPercentCapacitor!.Value.Db, 2e-4);
+        // The figures are slopes of the gain, the product tells slopes of the loss.
+        Assert.All(
+            row.Numbers("gain_per_percent_db").Zip(arms),
+            x => Assert.Equal(-x.First, (x.Second.LossPerPercentCoil ?? x.Second.LossPerPercentCapacitor)!.Value.Db, row.Number("tolerance")));
     }
 
     [Fact]

@@ -14,6 +14,14 @@ public class LadderTests
 
     public static TheoryData<ReferenceRow> Chebyshev5 => ReferenceTable.Theory("ladder_chebyshev5");
 
+    public static TheoryData<ReferenceRow> Reflection => ReferenceTable.Theory("ladder_reflection");
+
+    public static TheoryData<ReferenceRow> Loads => ReferenceTable.Theory("ladder_input_impedance");
+
+    public static TheoryData<ReferenceRow> UnequalEnds => ReferenceTable.Theory("ladder_unequal_ends");
+
+    public static TheoryData<ReferenceRow> Leads => ReferenceTable.Theory("ladder_lead_inductance");
+
     public static TheoryData<ReferenceRow> KeptFilter => ReferenceTable.Theory("kept_filter");
 
     [Theory]
@@ -59,32 +67,56 @@ public class LadderTests
             Assert.Equal(row.Number(column), ladder.Loss(f.Harmonic(n), FiftyOhm, FiftyOhm).Db, Math.Max(row.Number("tolerance"), PrintedHalfUnit(row[column])));
     }
 
-    // As tests/Recomputed/ladder_stress_and_yield.py finds them.
     [Theory]
-    [InlineData(25, 0, 24.823, -4.153)]
-    [InlineData(50, 20, 52.895, 12.836)]
-    [InlineData(50, 0, 49.378, -7.301)]
+    [MemberData(nameof(Reflection))]
     [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
-    public void InputImpedance_ChebyshevFive_MatchesNodalAnalysis(double loadOhm, double loadReactanceOhm, double ohm, double reactanceOhm)
-    {
-        var z = F7.ToLadder().At(Frequency.FromMegahertz(7.1)).InputImpedance(new Complex(loadOhm, loadReactanceOhm));
+    public void S11_ChebyshevFive_MatchesNodalAnalysis(ReferenceRow row) => Close(
+        new Complex(row.Number("s11_re"), row.Number("s11_im")),
+        F7.ToLadder().At(Frequency.FromMegahertz(row.Number("frequency_mhz"))).S11(FiftyOhm, FiftyOhm),
+        row.Number("tolerance"));
 
-        Close(new Complex(ohm, reactanceOhm), z, 1e-3);
+    [Theory]
+    [MemberData(nameof(Loads))]
+    [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
+    public void InputImpedance_ChebyshevFive_MatchesNodalAnalysis(ReferenceRow row)
+    {
+        var z = F7.ToLadder().At(Frequency.FromMegahertz(7.1)).InputImpedance(new Complex(row.Number("load_ohm"), row.Number("load_reactance_ohm")));
+
+        Close(new Complex(row.Number("input_ohm"), row.Number("input_reactance_ohm")), z, row.Number("tolerance"));
     }
 
-    // As tests/Recomputed/ladder_stress_and_yield.py finds them.
     [Theory]
-    [InlineData(50, 25, 0.5352, 9.357)]
-    [InlineData(50, 100, 0.5402, 9.320)]
-    [InlineData(12.5, 50, 1.9658, 4.388)]
+    [MemberData(nameof(UnequalEnds))]
     [Evidence(typeof(TwoPort), EvidenceKind.IndependentRecomputation)]
-    public void Loss_UnequalEnds_MatchesNodalAnalysis(double sourceOhm, double loadOhm, double lossDb, double returnLossDb)
+    public void Loss_UnequalEnds_MatchesNodalAnalysis(ReferenceRow row)
     {
         var chain = F7.ToLadder().At(Frequency.FromMegahertz(7.1));
+        var (source, load) = (Resistance.FromOhm(row.Number("source_ohm")), Resistance.FromOhm(row.Number("load_ohm")));
 
-        Assert.Equal(lossDb, chain.Loss(Resistance.FromOhm(sourceOhm), Resistance.FromOhm(loadOhm)).Db, 1e-3);
-        Assert.Equal(returnLossDb, chain.ReturnLoss(Resistance.FromOhm(sourceOhm), Resistance.FromOhm(loadOhm)).Db, 1e-3);
+        Assert.Equal(row.Number("loss_db"), chain.Loss(source, load).Db, row.Number("tolerance"));
+        Assert.Equal(row.Number("return_loss_db"), chain.ReturnLoss(source, load).Db, row.Number("tolerance"));
     }
+
+    [Theory]
+    [MemberData(nameof(Leads))]
+    [Evidence(typeof(Ladder), EvidenceKind.IndependentRecomputation)]
+    public void WithLeads_SixNanohenryInEachCapacitor_MatchesNodalAnalysis(ReferenceRow row) => Assert.Equal(
+        row.Number("loss_db"),
+        F7.ToLadder().WithLeads(Inductance.FromNanohenry(6)).Loss(Frequency.FromMegahertz(row.Number("frequency_mhz")), FiftyOhm, FiftyOhm).Db,
+        row.Number("tolerance"));
+
+    [Theory]
+    [InlineData(77, 1)]
+    [InlineData(104, 1)]
+    public void WithLeads_CapacitorResonates_BlocksNearby(double megahertz, double half)
+    {
+        var ladder = F7.ToLadder().WithLeads(Inductance.FromNanohenry(6));
+
+        Assert.Contains(FrequencyRange.FromMegahertz(megahertz - half, megahertz + half).Points(2001), f => ladder.Loss(f, FiftyOhm, FiftyOhm).Db > 150);
+    }
+
+    [Fact]
+    public void WithLeads_NoInductance_IsTheSameLadder() => Assert.Equal(F7.ToLadder(150, 1000).Elements, F7.ToLadder(150, 1000).WithLeads(default).Elements);
 
     [Fact]
     [Evidence(typeof(Ladder), EvidenceKind.Identity)]
