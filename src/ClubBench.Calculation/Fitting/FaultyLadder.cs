@@ -11,14 +11,14 @@ internal sealed class FaultyLadder(SweepFitInput input, IReadOnlyList<ParallelPa
     private const double OpenCapacitorOhm = 1e9;
     private const double ShortedCoilOhm = 0.01;
     private const double ShortedCapacitorOhm = 0.05;
-    private readonly LadderElement[] _arms = [.. input.Nominal.Elements.Select(e => e.WithQ(input.CoilQ, input.CapacitorQ))];
+    private readonly Ladder _nominal = input.Nominal.WithQ(input.CoilQ, input.CapacitorQ);
 
     /// <summary>What it leaves of the sweep unexplained, per complex value.</summary>
     public double Rms()
     {
         var left = input.Measured.Points.SelectMany(p =>
         {
-            var chain = _arms.Select((arm, k) => At(arm, k, p.Frequency)).Aggregate(TwoPort.Through, (c, arm) => c.Then(arm));
+            var chain = _nominal.Elements.Select((arm, k) => At(arm, k, p.Frequency)).Aggregate(TwoPort.Through, (c, arm) => c.Then(arm));
             return Residuals(chain, p.S11, p.S21);
         });
         return Math.Sqrt(left.Average(r => (r.Real * r.Real) + (r.Imaginary * r.Imaginary)));

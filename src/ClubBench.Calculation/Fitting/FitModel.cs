@@ -37,7 +37,7 @@ internal sealed class FitModel
             arms[arm] = Parameters[i].Part == ArmParameter.Coil ? arms[arm].Scaled(factor, 1) : arms[arm].Scaled(1, factor);
         }
 
-        return new Ladder(arms.Select(a => a.WithQ(q, _input.CapacitorQ)));
+        return new Ladder(arms).WithQ(q, _input.CapacitorQ);
     }
 
     /// <summary>Every complex residual in the order of the sweep, with its slopes where wanted.</summary>

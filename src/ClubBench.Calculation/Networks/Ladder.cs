@@ -42,6 +42,9 @@ public sealed class Ladder
     /// <remarks>Method: the capacitor becomes a series trap, lossless leads. Source: common practice.</remarks>
     public Ladder WithLeads(Inductance perCapacitor) => new(Elements.Select(e => e.WithLead(perCapacitor)));
 
+    /// <summary>The same ladder with other unloaded Q, above zero; none given means lossless.</summary>
+    public Ladder WithQ(double? coilQ, double? capacitorQ) => new(Elements.Select(e => e.WithQ(coilQ, capacitorQ)));
+
     /// <summary>Transducer loss, positive: what reaches the load against what the source could give.</summary>
     public Decibels Loss(Frequency f, Resistance source, Resistance load) => At(f).Loss(source, load);
 

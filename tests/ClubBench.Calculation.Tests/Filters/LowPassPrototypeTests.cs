@@ -102,6 +102,22 @@ public class LowPassPrototypeTests
     }
 
     [Theory]
+    [InlineData(0.01, 0.98, 1.02)]
+    [InlineData(1.0, 1.3, 2.0)]
+    public void LossEstimate_TowardsTheEdge_FallsShortByUpToHalf(double multiple, double least, double most)
+    {
+        var prototype = LowPassPrototype.Chebyshev(5, PassBandRipple.FromReflection(0.1));
+        foreach (var form in Enum.GetValues<LowPassForm>())
+        {
+            var design = prototype.Denormalise(Frequency.FromMegahertz(8), FiftyOhm, form);
+            var f = Frequency.FromMegahertz(8 * multiple);
+            var more = design.ToLadder(150, 1000).Loss(f, FiftyOhm, FiftyOhm) - design.ToLadder().Loss(f, FiftyOhm, FiftyOhm);
+
+            Assert.InRange(more.Db / prototype.LossEstimate(multiple, 150, 1000, form).Db, least, most);
+        }
+    }
+
+    [Theory]
     [MemberData(nameof(Ripple))]
     [Evidence(typeof(PassBandRipple), EvidenceKind.ClosedFormLimit)]
     [Evidence(typeof(PassBandRipple), EvidenceKind.RoundTrip)]

@@ -27,7 +27,7 @@ internal static class SecondMinimiser
 
     private static Vector<double> Shown(Sweep sweep, Vector<double> p)
     {
-        var ladder = new Ladder(F7.ToLadder().Elements.Select((e, k) => e.Scaled(Math.Exp(p[k]), Math.Exp(p[k])).WithQ(150 * Math.Exp(p[5]), 1000)));
+        var ladder = new Ladder(F7.ToLadder().Elements.Select((e, k) => e.Scaled(Math.Exp(p[k]), Math.Exp(p[k])))).WithQ(150 * Math.Exp(p[5]), 1000);
         var parts = sweep.Points.SelectMany(point =>
         {
             var turn = new Complex(0, -point.Frequency.RadiansPerSecond * 1e-9);
