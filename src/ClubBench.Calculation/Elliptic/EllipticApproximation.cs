@@ -20,6 +20,7 @@ public sealed class EllipticApproximation
     public const double GreatestAngleDegrees = 80;
 
     private const double Deepest = 1e30;
+    private const double Farthest = 1e100;
 
     private EllipticApproximation(int order, PassBandRipple ripple, double angleDegrees)
     {
@@ -82,7 +83,7 @@ public sealed class EllipticApproximation
     public Decibels Attenuation(double multiple)
     {
         Guard.NotNegative(multiple, nameof(multiple));
-        var shape = Ripple.Epsilon * Shape(multiple) / Shape(1);
+        var shape = Ripple.Epsilon * Shape(Math.Min(multiple, Farthest)) / Shape(1);
         return Decibels.FromPowerRatio(Math.Min(1 + (shape * shape), Deepest));
     }
 

@@ -11,6 +11,7 @@ namespace ClubBench.Calculation.Filters;
 /// </remarks>
 public sealed class LowPassPrototype
 {
+    private const double Largest = 1e15;
     private readonly double? _epsilon;
 
     private LowPassPrototype(ImmutableArray<double> values, double load, double? epsilon) =>
@@ -52,11 +53,11 @@ public sealed class LowPassPrototype
         double B(int k) => (gamma * gamma) + Math.Pow(Math.Sin(k * Math.PI / order), 2);
     }
 
-    /// <summary>Ideal lossless attenuation at a frequency given as a multiple of the edge, 0 or above.</summary>
+    /// <summary>Ideal lossless attenuation at a frequency given as a multiple of the edge, 0 or above; at most 300 dB is told.</summary>
     public Decibels Attenuation(double multiple)
     {
         Guard.NotNegative(multiple, nameof(multiple));
-        var shape = _epsilon is { } e ? e * ChebyshevPolynomial(multiple) : Math.Pow(multiple, Order);
+        var shape = Math.Min(Math.Abs(_epsilon is { } e ? e * ChebyshevPolynomial(multiple) : Math.Pow(multiple, Order)), Largest);
         return Decibels.FromPowerRatio(1 + (shape * shape));
     }
 

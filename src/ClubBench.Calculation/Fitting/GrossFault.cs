@@ -56,6 +56,7 @@ public sealed record GrossFaultSearch(IReadOnlyList<GrossFault> Explanations)
     /// <summary>Weighs every explanation.</summary>
     public static GrossFaultSearch Of(SweepFitInput input, IReadOnlyList<ParallelPair> pairs)
     {
+        foreach (var part in pairs.SelectMany(p => new[] { p.First, p.Second })) Guard.Positive(part.Farad, nameof(pairs));
         var hypotheses = input.Nominal.Elements.SelectMany(OfArm)
             .Concat(pairs.SelectMany(p => new[] { GrossFaultKind.OnlyFirstOfPair, GrossFaultKind.OnlySecondOfPair }.Select(kind => new GrossFault(kind, p.Arm, false, 0))))
             .Prepend(GrossFault.Nothing);

@@ -1,4 +1,4 @@
-using ClubBench.Calculation.Networks;
+using ClubBench.Calculation.Components;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Fitting;
@@ -53,8 +53,13 @@ public sealed record FittedPart(int Arm, bool IsCoil, double Scale, double Stand
     /// <summary>Whether a capacitor is beyond its tolerance (a share, zero or above) by more than two standard deviations: a wrong part or one of a pair missing.</summary>
     public bool IsBeyond(double tolerance) => Deviates && Math.Abs(Scale - 1) > Guard.NotNegative(tolerance, nameof(tolerance)) + (2 * StandardDeviation);
 
+    /// <summary>The E12 value that a capacitor beyond its tolerance measures like; null where it is within it. Nominal value above zero.</summary>
+    public Capacitance? LooksLike(Capacitance nominal, double tolerance) => !IsCoil && IsBeyond(tolerance)
+        ? Capacitance.FromPicofarad(PreferredValues.Nearest(Guard.Positive(nominal.Picofarad * Scale, nameof(nominal)), ESeries.E12))
+        : null;
+
     /// <summary>Turns too many (or too few, below zero) of a coil that should have this many: N (sqrt(scale) - 1).</summary>
-    public double SurplusTurns(int nominalTurns) => Guard.Within(nominalTurns, 1, 10_000, nameof(nominalTurns)) * (Math.Sqrt(Scale) - 1);
+    public double SurplusTurns(int nominalTurns) => Guard.Within(nominalTurns, 1, 10_000, nameof(nominalTurns)) * (Math.Sqrt(Guard.Positive(Scale, nameof(Scale))) - 1);
 }
 
 /// <summary>A board's filter as its sweep shows it, or why the sweep names no part.</summary>

@@ -19,6 +19,6 @@ public sealed record UnloadedQ(double Q, Frequency At, double Exponent, Frequenc
     {
         if (Peak < At) throw new InvalidOperationException($"The peak ({Peak}) lies below the frequency of the Q ({At}).");
         var share = Math.Min(f.Hertz, Peak.Hertz) / At.Hertz;
-        return Guard.Positive(Q, nameof(Q)) * Math.Pow(share, Guard.Within(Exponent, 0, 1, nameof(Exponent)));
+        return Guard.Positive(Guard.Positive(Q, nameof(Q)) * Math.Pow(share, Guard.Within(Exponent, 0, 1, nameof(Exponent))), nameof(f));
     }
 }

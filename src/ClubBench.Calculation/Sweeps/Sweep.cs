@@ -22,11 +22,14 @@ public sealed record SweepPoint(Frequency Frequency, Complex S11, Complex? S21 =
 }
 
 /// <summary>A measured or computed sweep, frequencies rising. Immutable, thread safe.</summary>
-/// <param name="Points">At least one point.</param>
+/// <param name="Points">At least one point; throws where a value is not finite or a frequency does not rise.</param>
 /// <param name="Reference1">Reference of port 1, above zero.</param>
 /// <param name="Reference2">Reference of port 2, above zero; without meaning for one port.</param>
 public sealed record Sweep(ImmutableArray<SweepPoint> Points, Resistance Reference1, Resistance Reference2)
 {
+    /// <summary>Points of the sweep.</summary>
+    public ImmutableArray<SweepPoint> Points { get; init => field = Sound(value); } = Sound(Points);
+
     /// <summary>1 or 2.</summary>
     public int Ports => Points[0].S21 is null ? 1 : 2;
 
@@ -37,6 +40,15 @@ public sealed record Sweep(ImmutableArray<SweepPoint> Points, Resistance Referen
     /// <remarks>Method: chain matrix. Source: pozar-microwave.</remarks>
     public static Sweep Of(Ladder ladder, IEnumerable<Frequency> frequencies, Resistance source, Resistance load) =>
         new([.. frequencies.Select(f => Point(f, ladder.At(f), source, load))], source, load);
+
+    private static ImmutableArray<SweepPoint> Sound(ImmutableArray<SweepPoint> points)
+    {
+        if (points.IsDefaultOrEmpty) throw new ArgumentException("A sweep needs at least one point.", nameof(points));
+        foreach (var point in points) Guard.Finite(point.LargestPowerOut, nameof(points));
+        for (var i = 1; i < points.Length; i++)
+            if (points[i].Frequency <= points[i - 1].Frequency) throw new ArgumentException($"The frequency does not rise at {points[i].Frequency}.", nameof(points));
+        return points;
+    }
 
     private static SweepPoint Point(Frequency f, TwoPort chain, Resistance source, Resistance load)
     {

@@ -1,4 +1,3 @@
-using System.Numerics;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Sweeps;
@@ -23,18 +22,17 @@ public static class SweepReference
 
     private static SweepPoint? Moved(SweepPoint p, Port one, Port two)
     {
-        if (p.S21 is null) return Quotient(p.S11 - one.Reflection, 1 - (one.Reflection * p.S11)) is { } s11 ? p with { S11 = s11 } : null;
+        if (p.S21 is null) return Finite(p with { S11 = (p.S11 - one.Reflection) / (1 - (one.Reflection * p.S11)) });
         if (p is not { S21: { } s21, S12: { } s12, S22: { } s22 }) return null;
         var (p1, p2) = (one.Reflection, two.Reflection);
         var up = new Matrix2(p.S11 - p1, s12, s21, s22 - p2);
         var down = new Matrix2(1 - (p1 * p.S11), -p1 * s12, -p2 * s21, 1 - (p2 * s22));
         if (down.Inverse() is not { } inverse) return null;
         var (moved, scale) = (up.Times(inverse), one.Scale / two.Scale);
-        var point = new SweepPoint(p.Frequency, moved.A11, moved.A21 / scale, moved.A12 * scale, moved.A22);
-        return double.IsFinite(point.LargestPowerOut) ? point : null;
+        return Finite(new(p.Frequency, moved.A11, moved.A21 / scale, moved.A12 * scale, moved.A22));
     }
 
-    private static Complex? Quotient(Complex a, Complex b) => Complex.IsFinite(a / b) ? a / b : null;
+    private static SweepPoint? Finite(SweepPoint point) => double.IsFinite(point.LargestPowerOut) ? point : null;
 
     private readonly record struct Port(double OldOhm, double NewOhm)
     {

@@ -152,14 +152,15 @@ public class SweepDiagnosisTests
         Assert.Equal(0.002, SweepDiagnosis.Of(Boards.Question(Boards.Shown(Boards.Built(Boards.Example), 0.002)) with { Noise = null }).Noise, 2e-4);
 
     [Fact]
-    public void IsBeyond_CapacitorFarOut_IsAWrongPart()
+    public void LooksLike_CapacitorFarOut_IsTheWrongPart()
     {
         var scales = new double[] { 1, 1, 1, 1, 270.0 / 330 };
 
-        var part = SweepDiagnosis.Of(Boards.Question(Boards.Shown(Boards.Built(scales), 0.002)) with { CapacitorSpread = 0.2 }).Parts[4];
+        var parts = SweepDiagnosis.Of(Boards.Question(Boards.Shown(Boards.Built(scales), 0.002)) with { CapacitorSpread = 0.2 }).Parts;
 
-        Assert.True(part.IsBeyond(0.05));
-        Assert.False(part.IsBeyond(0.25));
+        Assert.Equal(270, parts[4].LooksLike(Capacitance.FromPicofarad(330), 0.05)!.Value.Picofarad, 1e-9);
+        Assert.Null(parts[4].LooksLike(Capacitance.FromPicofarad(330), 0.25));
+        Assert.Null(parts[0].LooksLike(Capacitance.FromPicofarad(390), 0.05));
     }
 
     [Fact]

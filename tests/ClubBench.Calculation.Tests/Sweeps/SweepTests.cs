@@ -84,4 +84,16 @@ public class SweepTests
     [Fact]
     public void LargestPowerOut_LosslessLadder_IsOneAtBothPorts() =>
         Assert.All(Sweep.Of(F7.ToLadder(), Frequencies, FiftyOhm, FiftyOhm).Points, p => Assert.Equal(1, p.LargestPowerOut, 1e-12));
+
+    [Fact]
+    public void Points_NoneNotRisingOrNotFinite_Throw()
+    {
+        var (one, two) = (new SweepPoint(Frequency.FromMegahertz(1), 0.1), new SweepPoint(Frequency.FromMegahertz(2), 0.1));
+        var sound = new Sweep([one, two], FiftyOhm, FiftyOhm);
+
+        Assert.ThrowsAny<ArgumentException>(() => new Sweep([], FiftyOhm, FiftyOhm));
+        Assert.ThrowsAny<ArgumentException>(() => sound with { Points = [two, one] });
+        Assert.ThrowsAny<ArgumentException>(() => sound with { Points = [one, one] });
+        Assert.ThrowsAny<ArgumentException>(() => sound with { Points = [one with { S11 = double.NaN }] });
+    }
 }
