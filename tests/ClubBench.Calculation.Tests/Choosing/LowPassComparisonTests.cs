@@ -46,6 +46,7 @@ public class LowPassComparisonTests
     }
 
     [Fact]
+    [Evidence(typeof(ScatterTrial), EvidenceKind.IndependentRecomputation)]
     public void Of_Scatter_TellsAYieldThatIsTheOneOfTheDesign()
     {
         var scatter = new PartScatter(0.05, 0, 0.05);
@@ -59,8 +60,48 @@ public class LowPassComparisonTests
     }
 
     [Fact]
+    [Evidence(typeof(ScatterTrial), EvidenceKind.ClosedFormLimit)]
     public void Of_NoScatter_AllBoardsAreTheNominalOne() =>
         Assert.All(LowPassComparison.Of(Task(24) with { Trial = new(new(0, 0, 0), 1, 100) }).Options, o => Assert.Equal(o.MeetsAll ? 1 : 0, o.Yield!.Value.Share));
+
+    [Fact]
+    [Evidence(typeof(LowPassComparison), EvidenceKind.IndependentRecomputation)]
+    public void Of_EveryFamily_HasTheLossesOfTheNodalEquations()
+    {
+        var (task, comparison) = (Task(24), LowPassComparison.Of(Task(24)));
+
+        Assert.All(comparison.Options.Concat(comparison.Others), o =>
+        {
+            Assert.Equal(task.Requirement.Band.Points(17).Max(Loss), o.Figures!.WorstPassLoss.Db, 1e-9);
+            Assert.All(o.Figures.Harmonics, h => Assert.Equal(new[] { 7.0, 7.3 }.Min(mhz => Loss(Frequency.FromMegahertz(h.Harmonic * mhz))), h.Attenuation.Db, 1e-6));
+
+            double Loss(Frequency f) => -20 * Math.Log10(NodalEquations.Transmission(o.Ladder!, f, FiftyOhm, FiftyOhm, 150, 1000).Magnitude);
+        });
+    }
+
+    [Fact]
+    [Evidence(typeof(LowPassComparison), EvidenceKind.ClosedFormLimit)]
+    public void Of_LosslessParts_LosesTheChebyshevPolynomialAtTheHarmonics()
+    {
+        var comparison = LowPassComparison.Of(Task(24) with { CoilQ = null, CapacitorQ = null });
+
+        foreach (var option in comparison.Options.Where(o => o.Family == LowPassFamily.Chebyshev))
+        {
+            var shape = PassBandRipple.FromReflection(0.1).Epsilon * Math.Cosh(option.Order * Math.Acosh(14.0 / 8.0));
+            Assert.Equal(10 * Math.Log10(1 + (shape * shape)), option.Figures!.Harmonics[0].Attenuation.Db, 1e-6);
+        }
+    }
+
+    [Theory]
+    [InlineData(0.5)]
+    [InlineData(7)]
+    [Evidence(typeof(LowPassComparison), EvidenceKind.Identity)]
+    public void Of_EverythingWantedHarder_TakesThatMuchOffEveryMargin(double db)
+    {
+        var (easy, hard) = (LowPassComparison.Of(Task(24)), LowPassComparison.Of(Task(24) with { Requirement = Requirement(17 + db, 24 + db, 24 + db) }));
+
+        Assert.All(easy.Options.Concat(easy.Others).Zip(hard.Options.Concat(hard.Others)), x => Assert.Equal(db, (x.First.Figures!.Margin - x.Second.Figures!.Margin).Db, 1e-9));
+    }
 
     [Fact]
     public void Of_EdgeInsideTheBand_Throws() =>

@@ -11,6 +11,7 @@ public class LowPassEdgeTests
     [Theory]
     [InlineData(3.5, 4.0, 1.75)]
     [InlineData(10.1, 10.1, 2.0)]
+    [Evidence(typeof(LowPassEdge), EvidenceKind.ClosedFormLimit)]
     public void HarmonicGap_Band_IsTheRoomForTheFilter(double low, double high, double gap) =>
         Assert.Equal(gap, LowPassEdge.HarmonicGap(FrequencyRange.FromMegahertz(low, high)), 1e-12);
 
@@ -18,6 +19,7 @@ public class LowPassEdgeTests
     [InlineData(0.01, 0.01, 1.05)]
     [InlineData(0.05, 0.05, 1.0526316)]
     [InlineData(0.10, 0.10, 1.1111111)]
+    [Evidence(typeof(LowPassEdge), EvidenceKind.ClosedFormLimit)]
     public void For_WorstParts_LeavesTheBandBelowTheEdge(double coil, double capacitor, double factor)
     {
         var band = FrequencyRange.FromMegahertz(7.0, 7.3);
@@ -31,6 +33,7 @@ public class LowPassEdgeTests
     [Theory]
     [InlineData(0.05, 0.05)]
     [InlineData(0.10, 0.02)]
+    [Evidence(typeof(LowPassEdge), EvidenceKind.IndependentRecomputation)]
     public void WorstPull_AllPartsTooLarge_IsWhatTheLadderDoes(double coil, double capacitor)
     {
         var large = new Ladder(F7.ToLadder().Elements.Select(e => e.Scaled(1 + coil, 1 + capacitor)));
@@ -42,6 +45,7 @@ public class LowPassEdgeTests
     }
 
     [Fact]
+    [Evidence(typeof(LowPassEdge), EvidenceKind.RoundTrip)]
     public void FromHalfPower_CatalogueCutOff_LosesHalfThePowerThere()
     {
         var prototype = LowPassPrototype.Chebyshev(5, PassBandRipple.FromRipple(Decibels.FromDb(0.1)));

@@ -12,6 +12,7 @@ public class EllipticApproximationTests
 
     [Theory]
     [MemberData(nameof(Recomputed))]
+    [Evidence(typeof(EllipticApproximation), EvidenceKind.IndependentRecomputation)]
     public void Of_RandomCase_AgreesWithThetaFunctionsAndRootFinding(ReferenceRow row)
     {
         var wanted = Ellipses.Of(row);
@@ -23,6 +24,7 @@ public class EllipticApproximationTests
     }
 
     [Fact]
+    [Evidence(typeof(EllipticApproximation), EvidenceKind.Identity)]
     public void Attenuation_AnyFilter_HasItsRippleBelowAndItsLossAbove() => Gen.Select(Ellipses.Any, Gen.Double[0, 1]).Sample((x, share) =>
     {
         var wanted = EllipticApproximation.Of(x.Order, x.Ripple, x.Angle);
@@ -34,6 +36,7 @@ public class EllipticApproximationTests
     });
 
     [Fact]
+    [Evidence(typeof(EllipticApproximation), EvidenceKind.Identity)]
     public void Modes_AnyFilter_AreWhereReflectionAndTransmissionBalance() => Ellipses.Any.Sample(x =>
     {
         var wanted = EllipticApproximation.Of(x.Order, x.Ripple, x.Angle);
@@ -45,6 +48,7 @@ public class EllipticApproximationTests
     [Theory]
     [InlineData(45)]
     [InlineData(30)]
+    [Evidence(typeof(EllipticApproximation), EvidenceKind.RoundTrip)]
     public void FromStopBandEdge_EdgeOfAnAngle_GivesTheAngleBack(double angle)
     {
         var ripple = PassBandRipple.FromReflection(0.1);
@@ -62,21 +66,6 @@ public class EllipticApproximationTests
     [InlineData(5, 0.001, 30)]
     public void Of_OutsideItsRange_IsRefused(int order, double reflection, double angle) =>
         Assert.Throws<ArgumentOutOfRangeException>(() => EllipticApproximation.Of(order, PassBandRipple.FromReflection(reflection), angle));
-
-    [Theory]
-    [InlineData(5, 2.0)]
-    [InlineData(7, 1.6)]
-    [InlineData(3, 2.5)]
-    public void AngleDegreesFor_LowestNotch_PutsItThere(int order, double multiple)
-    {
-        var angle = NotchPlacement.AngleDegreesFor(order, multiple)!.Value;
-
-        Assert.Equal(multiple, EllipticApproximation.Of(order, PassBandRipple.FromReflection(0.1), angle).Notches[0], 1e-12);
-    }
-
-    [Fact]
-    public void LowestNotch_GrowingAngle_FallsAllTheWay() => Gen.Select(Ellipses.Order, Gen.Double[1, 79.9]).Sample((order, angle) =>
-        NotchPlacement.LowestNotch(order, angle + 0.1) < NotchPlacement.LowestNotch(order, angle));
 
     private static Complex Shape(EllipticApproximation wanted, Complex s)
     {

@@ -1,6 +1,8 @@
 using ClubBench.Calculation.Elliptic;
 using ClubBench.Calculation.Filters;
+using ClubBench.Calculation.Networks;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Elliptic;
 
@@ -12,6 +14,7 @@ public class EllipticDesignTests
     [Theory]
     [InlineData(5)]
     [InlineData(7)]
+    [Evidence(typeof(EllipticDesign), EvidenceKind.RoundTrip)]
     public void WithLowestNotchAt_SecondHarmonic_BlocksIt(int order)
     {
         var second = Frequency.FromMegahertz(14.3);
@@ -59,6 +62,40 @@ public class EllipticDesignTests
         Assert.Equal(greatest < 80 ? EllipticRefusal.NegativePart : EllipticRefusal.None, EllipticSynthesis.Of(EllipticApproximation.Of(order, ripple, Math.Min(80, greatest + 0.01))).Refusal);
         Assert.Equal(EllipticRefusal.None, EllipticSynthesis.Of(EllipticApproximation.Of(order, ripple, greatest - 0.01)).Refusal);
     }
+
+    [Theory]
+    [InlineData(3)]
+    [InlineData(5)]
+    [InlineData(7)]
+    [Evidence(typeof(EllipticDesign), EvidenceKind.IndependentRecomputation)]
+    public void Of_OrderByNodalEquations_HasItsRippleAndItsLeastLoss(int order)
+    {
+        var task = Forty with { Order = order };
+        var ladder = EllipticDesign.Of(task, 40).Filter!.ToLadder();
+        var stopBand = 8 / Math.Sin(40 * Math.PI / 180);
+
+        Assert.Equal(Forty.Ripple.Ripple.Db, Enumerable.Range(1, 800).Max(i => Loss(i * 0.01)), 1e-4);
+        Assert.Equal(EllipticApproximation.Of(order, Forty.Ripple, 40).StopBandLoss.Db, Enumerable.Range(0, 20_000).Min(i => Loss(stopBand + (i * 0.005))), 1e-4);
+
+        double Loss(double mhz) => -20 * Math.Log10(NodalEquations.Transmission(ladder, Frequency.FromMegahertz(mhz), Line, Line, 1e15, 1e15).Magnitude);
+    }
+
+    [Fact]
+    [Evidence(typeof(EllipticDesign), EvidenceKind.Identity)]
+    public void Of_EdgeAndResistanceScaled_ScalesEveryPart() => Gen.Select(Ellipses.Order, Gen.Double[5, 50], Gen.Double[0.2, 3], Gen.Double[0.2, 3]).Sample((order, angle, k, m) =>
+    {
+        var task = Forty with { Order = order };
+
+        var (first, scaled) = (Arms(task), Arms(task with { Edge = k * task.Edge, Resistance = m * task.Resistance }));
+
+        Assert.All(first.Zip(scaled), x =>
+        {
+            if (x.First.Inductance is { } l) Assert.Equal(m / k, x.Second.Inductance!.Value / l, 1e-9);
+            if (x.First.Capacitance is { } c) Assert.Equal(1 / (m * k), x.Second.Capacitance!.Value / c, 1e-9);
+        });
+
+        IEnumerable<LadderElement> Arms(EllipticTask t) => EllipticDesign.Of(t, angle).Filter!.ToLadder().Elements;
+    });
 
     [Fact]
     public void Of_AngleWithANegativePart_TellsTheReachThatHasNone()

@@ -7,6 +7,7 @@ namespace ClubBench.Calculation.Tests.Elliptic;
 
 public class EllipticPrototypeTests
 {
+    private const double Lossless = 1e15;
     private static readonly Resistance Line = Resistance.FromOhm(50);
 
     public static TheoryData<ReferenceRow> Cases => ReferenceTable.Theory("elliptic-prototype");
@@ -15,7 +16,7 @@ public class EllipticPrototypeTests
 
     [Theory]
     [MemberData(nameof(Cases))]
-    public void Of_PublishedCase_HasItsPartsNotchesAndModes(ReferenceRow row)
+    public void Of_Case_HasThePartsNotchesAndModesOfTheTable(ReferenceRow row)
     {
         var wanted = Ellipses.Of(row);
 
@@ -47,6 +48,7 @@ public class EllipticPrototypeTests
     [InlineData(3)]
     [InlineData(5)]
     [InlineData(7)]
+    [Evidence(typeof(EllipticSynthesis), EvidenceKind.ClosedFormLimit)]
     public void Of_AngleTowardsNothing_IsChebyshev(int order)
     {
         var ripple = PassBandRipple.FromReflection(0.2);
@@ -94,6 +96,49 @@ public class EllipticPrototypeTests
         iter: 200);
 
     [Fact]
+    [Evidence(typeof(EllipticSynthesis), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(EllipticPrototype), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(EllipticFilter), EvidenceKind.IndependentRecomputation)]
+    public void ToLadder_AnyFilterByNodalEquations_LosesWhatIsWanted() => Gen.Select(Ellipses.AnyWithParts, Gen.Double[0.1, 4], Gen.Bool).Sample(
+        (wanted, multiple, coilFirst) =>
+        {
+            var form = coilFirst ? LowPassForm.SeriesInductorFirst : LowPassForm.ShuntCapacitorFirst;
+            var filter = EllipticSynthesis.Of(wanted).Prototype!.Denormalise(Frequency.FromMegahertz(8), Line, form);
+
+            var passed = NodalEquations.Transmission(filter.ToLadder(), filter.Edge * multiple, Line, Line, Lossless, Lossless).Magnitude;
+
+            Assert.Equal(Math.Pow(10, -wanted.Attenuation(multiple).Db / 20), passed, 1e-6);
+        },
+        iter: 200);
+
+    [Fact]
+    [Evidence(typeof(EllipticSynthesis), EvidenceKind.RoundTrip)]
+    public void Of_AnyFilter_ShowsTheNotchesAndReflectionZerosThatWereWanted() => Ellipses.AnyWithParts.Sample(wanted =>
+    {
+        var prototype = EllipticSynthesis.Of(wanted).Prototype!;
+        var ladder = prototype.Denormalise(Frequency.FromMegahertz(8), Line).ToLadder();
+
+        Assert.Equal(wanted.Notches, prototype.Traps.Select(t => t.Notch).Order(), (e, a) => Math.Abs((a / e) - 1) < 1e-9);
+        Assert.All(wanted.ReflectionZeros, w => Assert.Equal(0, ladder.At(Frequency.FromMegahertz(8 * w)).S11(Line, Line).Magnitude, 1e-6));
+    });
+
+    [Fact]
+    [Evidence(typeof(EllipticPrototype), EvidenceKind.RoundTrip)]
+    [Evidence(typeof(EllipticFilter), EvidenceKind.RoundTrip)]
+    public void Denormalise_AnyEdgeAndResistance_ScalesBackToThePrototype() => Gen.Select(Ellipses.AnyWithParts, Gen.Double[1, 60], Gen.Double[10, 600]).Sample((wanted, mhz, ohm) =>
+    {
+        var prototype = EllipticSynthesis.Of(wanted).Prototype!;
+        var radians = 2 * Math.PI * mhz * 1e6;
+
+        var arms = prototype.Denormalise(Frequency.FromMegahertz(mhz), Resistance.FromOhm(ohm)).ToLadder().Elements;
+
+        var back = arms.SelectMany(e => new[] { e.Inductance?.Henry * radians / ohm, e.Capacitance?.Farad * radians * ohm }).OfType<double>();
+        Assert.Equal(Ellipses.InLadderOrder(prototype), back, (e, a) => Math.Abs((a / e) - 1) < 1e-12);
+    });
+
+    [Fact]
+    [Evidence(typeof(EllipticPrototype), EvidenceKind.Identity)]
+    [Evidence(typeof(EllipticFilter), EvidenceKind.Identity)]
     public void ToLadder_CoilFirst_IsTheDualWithTheSameLoss()
     {
         var prototype = EllipticSynthesis.Of(EllipticApproximation.Of(5, PassBandRipple.FromReflection(0.1), 35)).Prototype!;
@@ -107,6 +152,7 @@ public class EllipticPrototypeTests
     }
 
     [Fact]
+    [Evidence(typeof(EllipticFilter), EvidenceKind.ClosedFormLimit)]
     public void ToLadder_LosslessAtItsNotch_StaysFinite()
     {
         var prototype = EllipticSynthesis.Of(EllipticApproximation.Of(7, PassBandRipple.FromReflection(0.1), 45)).Prototype!;

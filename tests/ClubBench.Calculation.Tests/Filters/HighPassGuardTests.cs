@@ -26,6 +26,8 @@ public class HighPassGuardTests
     }
 
     [Fact]
+    [Evidence(typeof(HighPassGuard), EvidenceKind.Identity)]
+    [Evidence(typeof(HighPassGuard), EvidenceKind.RoundTrip)]
     public void Attenuation_AnyFrequency_IsThatOfTheLowPassMirroredAtTheEdge() =>
         Gen.Select(Gen.Int[1, 5], Gen.Double[0.2, 5], Gen.Double[0.01, 1]).Sample((half, ratio, rippleDb) =>
         {
@@ -48,6 +50,15 @@ public class HighPassGuardTests
     }
 
     [Fact]
+    [Evidence(typeof(HighPassGuard), EvidenceKind.IndependentRecomputation)]
+    public void ToLadder_AnyGuardByNodalEquations_LosesTheIdealAttenuation() => Gen.Select(Gen.Int[1, 4], Gen.Double[0.2, 5]).Sample((half, ratio) =>
+    {
+        var guard = new HighPassGuard(LowPassPrototype.Chebyshev((2 * half) + 1, TwentyDb), Frequency.FromMegahertz(1.75), FiftyOhm);
+
+        Assert.Equal(guard.Attenuation(guard.Edge * ratio).Db, NodalLossDb(guard, guard.Edge * ratio), 1e-6);
+    });
+
+    [Fact]
     public void ToLadder_EvenOrder_Throws() =>
         Assert.Throws<InvalidOperationException>(() => new HighPassGuard(LowPassPrototype.Chebyshev(4, TwentyDb), Frequency.FromMegahertz(1.75), FiftyOhm).ToLadder());
 
@@ -62,6 +73,7 @@ public class HighPassGuardTests
     }
 
     [Fact]
+    [Evidence(typeof(HighPassChoice), EvidenceKind.RoundTrip)]
     public void Of_TopBandAgainstItsNeighbour_SaysThatNoSmallFilterHelpsAndFromWhereOneWould()
     {
         var (station, wanted) = (Frequency.FromMegahertz(1.6), Decibels.FromDb(25));
@@ -76,6 +88,32 @@ public class HighPassGuardTests
     }
 
     [Fact]
+    [Evidence(typeof(HighPassChoice), EvidenceKind.IndependentRecomputation)]
+    public void Of_AnyStation_IsTheFirstThatReachesItByNodalEquations() => Gen.Select(Gen.Double[0.3, 1.65], Gen.Double[1, 70]).Sample((mhz, db) =>
+    {
+        var (station, edge) = (Frequency.FromMegahertz(mhz), Frequency.FromMegahertz(0.95 * 1.8));
+        int? first = new[] { 3, 5, 7 }.Where(n => NodalLossDb(new(LowPassPrototype.Chebyshev(n, TwentyDb), edge, FiftyOhm), station) >= db).Cast<int?>().FirstOrDefault();
+
+        var choice = HighPassChoice.Of(Frequency.FromMegahertz(1.8), station, Decibels.FromDb(db), TwentyDb, FiftyOhm);
+
+        Assert.Equal(first is null ? HighPassRefusal.StationTooNear : HighPassRefusal.None, choice.Refusal);
+        Assert.Equal(first ?? 7, choice.Filter!.Prototype.Order);
+    });
+
+    [Theory]
+    [InlineData(25, 1.6)]
+    [InlineData(60, 1.0)]
+    [Evidence(typeof(HighPassChoice), EvidenceKind.ClosedFormLimit)]
+    public void Of_StationTooNear_TellsTheLowestThatTheHyperbolicCosineAllows(double db, double mhz)
+    {
+        var stretch = Math.Cosh(Math.Acosh(Math.Sqrt(Math.Pow(10, db / 10) - 1) / TwentyDb.Epsilon) / 7);
+
+        var choice = HighPassChoice.Of(Frequency.FromMegahertz(mhz / 0.9), Frequency.FromMegahertz(mhz), Decibels.FromDb(db), TwentyDb, FiftyOhm);
+
+        Assert.Equal(mhz * stretch / 0.95, choice.LowestThatWorks!.Value.Megahertz, 1e-9);
+    }
+
+    [Fact]
     public void Of_StationInsideTheBand_HasNoFilter()
     {
         var choice = HighPassChoice.Of(Frequency.FromMegahertz(1.8), Frequency.FromMegahertz(1.75), Decibels.FromDb(10), TwentyDb, FiftyOhm);
@@ -83,4 +121,7 @@ public class HighPassGuardTests
         Assert.Equal(HighPassRefusal.StationNotBelow, choice.Refusal);
         Assert.Null(choice.Filter);
     }
+
+    private static double NodalLossDb(HighPassGuard guard, Frequency f) =>
+        -20 * Math.Log10(NodalEquations.Transmission(guard.ToLadder(), f, FiftyOhm, FiftyOhm, 1e15, 1e15).Magnitude);
 }

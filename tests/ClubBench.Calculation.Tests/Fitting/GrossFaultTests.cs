@@ -9,6 +9,7 @@ namespace ClubBench.Calculation.Tests.Fitting;
 public class GrossFaultTests
 {
     [Fact]
+    [Evidence(typeof(GrossFaultSearch), EvidenceKind.RoundTrip)]
     public void Of_EveryShortAndOpenWithScatteredParts_RanksFirstAndIsNamed()
     {
         for (var seed = 1UL; seed <= 5; seed++)
@@ -46,6 +47,7 @@ public class GrossFaultTests
     }
 
     [Fact]
+    [Evidence(typeof(GrossFaultSearch), EvidenceKind.Identity)]
     public void Of_TransmissionAlone_CannotTellAShortFromItsMirrorImage()
     {
         var question = Boards.Question(Boards.Shown(Faulty(0, GrossFaultKind.Open, 1))) with { Data = FittedData.Transmission };
@@ -97,5 +99,4 @@ public class GrossFaultTests
         scales[arm] = (arm % 2 == 0) == (kind == GrossFaultKind.Open) ? 1e-4 : 1e4;
         return Boards.Built(scales);
     }
-
 }

@@ -11,6 +11,7 @@ public class TouchstoneReaderTests
 
     [Theory]
     [MemberData(nameof(Cases))]
+    [Evidence(typeof(TouchstoneReader), EvidenceKind.ClosedFormLimit)]
     public void Read_Case_HasTheParametersOfTheTable(ReferenceRow row)
     {
         var result = TouchstoneReader.Read(row["text"].Replace(" / ", "\n", StringComparison.Ordinal), "sweep" + row["extension"]);
