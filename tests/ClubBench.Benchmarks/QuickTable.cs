@@ -5,6 +5,8 @@ namespace ClubBench.Benchmarks;
 /// <summary>Medians of a few runs each, where a full benchmark takes too long.</summary>
 internal static class QuickTable
 {
+    private static readonly TimeSpan WarmUpTime = TimeSpan.FromSeconds(3);
+
     public static void Print(TextWriter output, IReadOnlyList<Workload> workloads, int runs)
     {
         Median(Yardstick.Run, runs);
@@ -19,7 +21,7 @@ internal static class QuickTable
 
     private static (double Median, double Least) Median<T>(Func<T> run, int runs)
     {
-        var kept = run();
+        var kept = WarmUp(run);
         var times = new double[runs];
         for (var i = 0; i < runs; i++)
         {
@@ -31,5 +33,14 @@ internal static class QuickTable
         GC.KeepAlive(kept);
         Array.Sort(times);
         return (times[runs / 2], times[0]);
+    }
+
+    // Until the compiler has had time to replace its first, quick code.
+    private static T WarmUp<T>(Func<T> run)
+    {
+        var start = TimeProvider.System.GetTimestamp();
+        var kept = run();
+        while (TimeProvider.System.GetElapsedTime(start) < WarmUpTime) kept = run();
+        return kept;
     }
 }
