@@ -25,6 +25,7 @@ internal static class FilterWorksheets
         LadderSheets.FiveElements,
         LadderSheets.SevenElements,
         LowPassSearchSheet.Sheet,
+        .. NotchedFilterSheets.All,
         BandPassSheets.Coupled,
         BandPassSheets.Trap,
     ];
