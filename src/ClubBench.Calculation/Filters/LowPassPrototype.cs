@@ -6,7 +6,7 @@ namespace ClubBench.Calculation.Filters;
 /// <summary>A low-pass filter scaled to 1 ohm and an edge at 1 rad/s, and its ideal attenuation. Immutable, thread safe.</summary>
 /// <remarks>
 /// Method: doubly terminated ladder prototypes, closed form.
-/// Valid: order 1 to 11; Chebyshev ripple 0.0001 to 3 dB. An even Chebyshev order ends in another resistance than it starts with.
+/// Valid: order 1 to 12; Chebyshev ripple 0.0001 to 3 dB. An even Chebyshev order ends in another resistance than it starts with.
 /// Source: matthaei-young-jones, sections 4.03 to 4.05.
 /// </remarks>
 public sealed class LowPassPrototype
@@ -32,14 +32,14 @@ public sealed class LowPassPrototype
     /// <summary>Flattest loss; the edge is the half-power frequency.</summary>
     public static LowPassPrototype Butterworth(int order)
     {
-        Guard.Within(order, 1, 11, nameof(order));
+        Guard.Within(order, 1, 12, nameof(order));
         return new([.. Enumerable.Range(1, order).Select(k => 2 * Math.Sin(((2 * k) - 1) * Math.PI / (2 * order)))], 1, null);
     }
 
     /// <summary>Equal ripple in the pass-band; the edge is the last frequency with that ripple.</summary>
     public static LowPassPrototype Chebyshev(int order, PassBandRipple ripple)
     {
-        Guard.Within(order, 1, 11, nameof(order));
+        Guard.Within(order, 1, 12, nameof(order));
         var rippleDb = ripple.DesignRippleDb(nameof(ripple));
         var beta = -Math.Log(Math.Tanh(rippleDb * Math.Log(10) / 40));
         var gamma = Math.Sinh(beta / (2 * order));
