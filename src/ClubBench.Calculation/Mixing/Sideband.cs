@@ -42,6 +42,17 @@ public static class Sidebands
     };
 
     /// <summary>
+    /// How far the carrier oscillator has to move when a set goes from one scheme to another and keeps its filter, Hz, either sign: the sum of the
+    /// audio edges where one of the two inverts, zero otherwise. The sidebands on the air must be stated.
+    /// </summary>
+    public static double CarrierMoveHertz(Sideband signalBefore, FrequencyScheme before, Sideband signalAfter, FrequencyScheme after, FrequencyRange audio)
+    {
+        // Any filter centre gives the same difference.
+        var filter = Frequency.FromMegahertz(9);
+        return CarrierFor(AtIntermediate(signalAfter, after), filter, audio).Hertz - CarrierFor(AtIntermediate(signalBefore, before), filter, audio).Hertz;
+    }
+
+    /// <summary>
     /// Suppression of the unwanted sideband by phasing, from the ratio of the two amplitudes (above zero) and the error of the phase in degrees.
     /// Null when both are perfect: the suppression is then without limit.
     /// </summary>

@@ -1,5 +1,6 @@
 using ClubBench.Calculation.Mixing;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
 
 namespace ClubBench.Calculation.Tests.Mixing;
 
@@ -10,27 +11,23 @@ public class SpuriousResponsesTests
 
     public static TheoryData<ReferenceRow> SidebandRows => ReferenceTable.Theory("sidebands");
 
+    public static TheoryData<ReferenceRow> RankedRows => ReferenceTable.Theory("spurious-responses");
+
+    public static TheoryData<ReferenceRow> BirdieRows => ReferenceTable.Theory("birdies");
+
     [Fact]
     public void Of_20Metres_FindsAllToOrder7() => Assert.Equal(49, TwentyMetres.Count);
 
     [Theory]
     [Evidence(typeof(SpuriousResponses), EvidenceKind.ClosedFormLimit)]
-    [InlineData(0, 3.94, 1, 1, 0)]
-    [InlineData(1, 14.06, 1, 1, 0)]
-    [InlineData(2, 6.18, 3, 1, 9.54)]
-    [InlineData(3, 24.18, 3, 1, 9.54)]
-    [InlineData(4, 16.30, 5, 1, 13.98)]
-    [InlineData(5, 34.30, 5, 1, 13.98)]
-    [InlineData(6, 9.0, 0, 1, 25)]
-    [InlineData(7, 1.12, 2, 1, 31.02)]
-    [InlineData(8, 19.12, 2, 1, 31.02)]
-    public void Of_20Metres_RanksTheFirst(int index, double mhz, int m, int n, double rankDb)
+    [MemberData(nameof(RankedRows))]
+    public void Of_20Metres_RanksLikeTheTable(ReferenceRow row)
     {
-        var response = TwentyMetres[index];
+        var response = TwentyMetres[(int)row.Number("place")];
 
-        Assert.Equal(mhz * 1e6, response.Frequency.Hertz, 1.0);
-        Assert.Equal((m, n), (response.OscillatorOrder, response.SignalOrder));
-        Assert.Equal(rankDb, response.Rank.Db, 0.05);
+        Assert.Equal(row.Number("expected_mhz") * 1e6, response.Frequency.Hertz, row.Number("tolerance_hz"));
+        Assert.Equal((row.Number("oscillator_order"), row.Number("signal_order")), (response.OscillatorOrder, response.SignalOrder));
+        Assert.Equal(row.Number("expected_rank_db"), response.Rank.Db, row.Number("tolerance_db"));
     }
 
     [Fact]
@@ -52,16 +49,24 @@ public class SpuriousResponsesTests
 
     [Theory]
     [Evidence(typeof(Birdies), EvidenceKind.ClosedFormLimit)]
-    [InlineData(InjectionSide.SumToIntermediate, 9, 3.5, 3.8, 3.6, 1, 4, true)]
-    [InlineData(InjectionSide.SumToIntermediate, 9, 3.5, 3.8, 3.6, 3, 2, true)]
-    [InlineData(InjectionSide.HighSide, 9, 3.5, 3.8, 3.6, 1, 6, true)]
-    [InlineData(InjectionSide.HighSide, 4.7, 14.0, 14.35, 14.1, 2, 3, true)]
-    [InlineData(InjectionSide.LowSide, 10.7, 21.0, 21.45, 21.4, 1, 0, true)]
-    [InlineData(InjectionSide.LowSide, 9, 18.068, 18.168, 18.0, 1, 0, false)]
-    public void WithSignal_KnownBirdie_IsFound(
-        InjectionSide side, double mid, double low, double high, double mhz, int m, int n, bool inside) =>
-        Assert.Contains(Find(side, mid, low, high), b =>
-            Math.Abs(b.Signal.Hertz - (mhz * 1e6)) < 1 && (b.OscillatorOrder, b.OtherOrder, b.IsInside) == (m, n, inside));
+    [MemberData(nameof(BirdieRows))]
+    public void Birdies_ReferenceRow_AreFound(ReferenceRow row)
+    {
+        var (scheme, band) = (Scheme(Enum.Parse<InjectionSide>(row["side"]), row.Number("if_mhz")), Band(row.Number("low_mhz"), row.Number("high_mhz")));
+
+        var found = row["kind"] == "signal" ? Birdies.WithSignal(scheme, band) : Birdies.Internal(scheme, band, Frequency.FromMegahertz(row.Number("beat_mhz")));
+
+        Assert.Contains(found, b => Math.Abs(b.Signal.Hertz - (row.Number("expected_mhz") * 1e6)) < row.Number("tolerance_hz")
+            && (b.OscillatorOrder, b.OtherOrder, b.IsInside) == ((int)row.Number("oscillator_order"), (int)row.Number("other_order"), row["inside"] == "yes"));
+    }
+
+    [Fact]
+    public void WithSignal_AnyScheme_CrossesWhereTheProductIsTheIntermediate() => Gen.Select(Gen.Double[3, 29], Gen.Double[0.455, 11], Gen.Int[2, 4]).Sample((low, mid, side) =>
+    {
+        var scheme = Scheme((InjectionSide)side, mid);
+        return Birdies.WithSignal(scheme, Band(low, low + 0.3)).All(b => scheme.OscillatorFor(b.Signal) is not { } lo
+            || new[] { 1, -1 }.Any(n => Math.Abs(Math.Abs((b.OscillatorOrder * lo.Hertz) + (n * b.OtherOrder * b.Signal.Hertz)) - (mid * 1e6)) < 1));
+    });
 
     [Fact]
     public void WithSignal_17MetresWith9Megahertz_HasNoneInside() =>
@@ -70,15 +75,6 @@ public class SpuriousResponsesTests
     [Fact]
     public void WithSignal_KeptCrystalsOf80MetreSetOn40Metres_WhistlesAtTheEdge() =>
         Assert.Contains(Find(InjectionSide.LowSide, 5.9991, 7.0, 7.08), b => b.OscillatorOrder == 6 && b.OtherOrder == 0 && Math.Abs(b.Signal.Megahertz - 6.99895) < 1e-5);
-
-    [Fact]
-    public void Internal_ThirdHarmonicOfTheBeatOscillator_IsFoundOnDialAndIntermediate()
-    {
-        var whistles = Birdies.Internal(Scheme(InjectionSide.HighSide, 4.7), Band(14.0, 14.35), Frequency.FromMegahertz(4.6985));
-
-        Assert.Contains(whistles, b => (b.OscillatorOrder, b.OtherOrder) == (0, 3) && Math.Abs(b.Signal.Hertz - 14_095_500) < 1);
-        Assert.Contains(whistles, b => (b.OscillatorOrder, b.OtherOrder) == (1, 3) && Math.Abs(b.Signal.Hertz - 14_095_500) < 1);
-    }
 
     [Fact]
     public void Internal_CleanScheme_FindsNoneToOrder8() =>
@@ -103,6 +99,9 @@ public class SpuriousResponsesTests
             "bandwidth_single_hz" => Sidebands.NecessaryBandwidthHertz(Audio(row), doubleSideband: false),
             "carrier_hz" => Sidebands.CarrierFor(
                 Sidebands.AtIntermediate(Sideband.Upper, Scheme(InjectionSide.HighSide, 9)), Frequency.FromMegahertz(9), Audio(row)).Hertz,
+            "carrier_low_hz" => Sidebands.CarrierFor(
+                Sidebands.AtIntermediate(Sideband.Upper, Scheme(InjectionSide.LowSide, 9)), Frequency.FromMegahertz(9), Audio(row)).Hertz,
+            "carrier_move_hz" => Sidebands.CarrierMoveHertz(Sideband.Upper, Scheme(InjectionSide.LowSide, 9), Sideband.Upper, Scheme(InjectionSide.HighSide, 9), Audio(row)),
             var other => throw new InvalidOperationException(other),
         };
 
@@ -110,12 +109,34 @@ public class SpuriousResponsesTests
     }
 
     [Fact]
-    public void AtIntermediate_OscillatorBelow_KeepsTheSideband()
-    {
-        var carrier = Sidebands.CarrierFor(
-            Sidebands.AtIntermediate(Sideband.Upper, Scheme(InjectionSide.LowSide, 9)), Frequency.FromMegahertz(9), new FrequencyRange(Frequency.FromHertz(300), Frequency.FromHertz(2700)));
+    public void CarrierMove_SidebandOnTheAirChangesWithTheInversion_IsNone() => Assert.Equal(
+        0,
+        Sidebands.CarrierMoveHertz(
+            Sideband.Lower, Scheme(InjectionSide.LowSide, 9), Sideband.Upper, Scheme(InjectionSide.HighSide, 9), new(Frequency.FromHertz(300), Frequency.FromHertz(2700))),
+        1e-9);
 
-        Assert.Equal(8_998_500, carrier.Hertz, 1e-6);
+    [Fact]
+    public void Behind_ResonatorAtTheSignal_PutsTheImageBelowTheSignal()
+    {
+        var signal = Frequency.FromMegahertz(14.06);
+
+        var behind = SpuriousResponses.Behind(TwentyMetres, f => Decibels.FromPowerRatio(1 + Math.Pow(20 * ((f / signal) - (signal / f)), 2)), signal);
+
+        Assert.Equal(signal.Hertz, behind[0].Frequency.Hertz, 1e-3);
+        Assert.Equal(0, behind[0].Total.Db, 1e-9);
+        Assert.Equal(36.4, behind.Single(r => Math.Abs(r.Frequency.Megahertz - 3.94) < 1e-6).Total.Db, 0.1);
+        Assert.Equal(TwentyMetres.Count, behind.Count);
+    }
+
+    [Fact]
+    public void OfDirectConversion_Seven_AnswersOnHarmonicsAndTheirFractions()
+    {
+        var responses = SpuriousResponses.OfDirectConversion(Frequency.FromMegahertz(7.03));
+
+        Assert.Equal((7.03, 0.0), (Math.Round(responses[0].Frequency.Megahertz, 6), responses[0].Rank.Db));
+        Assert.Equal(21.09, responses[1].Frequency.Megahertz, 1e-9);
+        Assert.Contains(responses, r => (r.OscillatorOrder, r.SignalOrder) == (1, 2) && Math.Abs(r.Frequency.Megahertz - 3.515) < 1e-9);
+        Assert.Equal(responses.Count, responses.Select(r => Math.Round(r.Frequency.Hertz)).Distinct().Count());
     }
 
     [Fact]
