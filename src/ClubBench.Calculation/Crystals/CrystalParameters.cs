@@ -1,4 +1,3 @@
-using System.Numerics;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.Crystals;
@@ -12,7 +11,7 @@ namespace ClubBench.Calculation.Crystals;
 /// <param name="MotionalCapacitance">Cm, above zero; some 10..30 fF for a quartz fundamental.</param>
 /// <param name="StaticCapacitance">C0 with its holder, above zero.</param>
 /// <param name="MotionalResistance">Rm; zero means not stated, and then nothing that depends on loss is given.</param>
-public sealed record CrystalParameters(
+public sealed partial record CrystalParameters(
     Frequency SeriesResonance, Capacitance MotionalCapacitance, Capacitance StaticCapacitance, Resistance MotionalResistance)
 {
     /// <summary>C0/Cm of a bare AT plate on its fundamental, (pi/(2 k))^2/2 with coupling k = 0.088, rounded down. Source: vig-quartz-tutorial.</summary>
@@ -74,14 +73,6 @@ public sealed record CrystalParameters(
     /// <summary>Series resistance seen with a load capacitance, Rm (1 + C0/CL)^2. The load must be above zero.</summary>
     public Resistance EffectiveResistance(Capacitance load) =>
         MotionalResistance * Squared(1 + (StaticCapacitance / AboveZero(load, nameof(load))));
-
-    /// <summary>Impedance in ohm at a frequency, C0 across the motional arm. A crystal that states no resistance has a pole at fp: a milliohm stands in for it.</summary>
-    public Complex Impedance(Frequency f)
-    {
-        var (w, ws) = (f.RadiansPerSecond, SeriesResonance.RadiansPerSecond);
-        var motional = new Complex(Math.Max(MotionalResistance.Ohm, 1e-3), MotionalInductance.Henry * (w - ws) * (w + ws) / w);
-        return 1 / ((1 / motional) + new Complex(0, w * StaticCapacitance.Farad));
-    }
 
     /// <summary>Everything wrong or unusual about these parameters; empty for an ordinary crystal.</summary>
     public IReadOnlyList<CrystalIssue> Issues()
