@@ -54,6 +54,13 @@ public static class MotionalMeasurement
         return Checked(fs, motionalF, staticCapacitance.Farad);
     }
 
+    /// <summary>
+    /// The same by rule of thumb, 2 (Cs + C0) times the relative shift: reads some 3 % low, because the load is not the series capacitor alone. Only
+    /// where the capacitance of the oscillator is unknown. Null when the frequency does not rise.
+    /// </summary>
+    public static Capacitance? ByRuleFromOscillatorShift(Frequency alone, Frequency withSeries, Capacitance series, Capacitance staticCapacitance) =>
+        withSeries > alone ? (series + staticCapacitance) * (2 * ((withSeries / alone) - 1)) : null;
+
     private static MeasuredCrystal Checked(Frequency series, double motionalF, double staticF) => motionalF > 0 && staticF > 0
         ? new MeasuredCrystal(new CrystalParameters(series, Capacitance.FromFarad(motionalF), Capacitance.FromFarad(staticF), default), MeasurementRefusal.None)
         : Refused(MeasurementRefusal.NoSuchCrystal);

@@ -34,4 +34,7 @@ public sealed record TransmissionMeasurement(
 
     /// <summary>The crystal, with its static capacitance measured apart (above zero).</summary>
     public CrystalParameters WithStatic(Capacitance staticCapacitance) => new(Peak, MotionalCapacitance, staticCapacitance, MotionalResistance);
+
+    /// <summary>Whether a resolution in Hz (above zero) is fine enough for the width: ten steps. Source: common practice.</summary>
+    public bool IsResolvedBy(double resolutionHertz) => Bandwidth3dBHertz >= 10 * Guard.Positive(resolutionHertz, nameof(resolutionHertz));
 }

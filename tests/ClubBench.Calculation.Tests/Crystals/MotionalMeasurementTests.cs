@@ -12,6 +12,8 @@ public class MotionalMeasurementTests
 
     public static TheoryData<ReferenceRow> Counted => ReferenceTable.Theory("motional-measurement");
 
+    public static TheoryData<ReferenceRow> Ruled => ReferenceTable.Theory("motional-rule");
+
     public static TheoryData<ReferenceRow> Swept => ReferenceTable.Theory("transmission-measurement");
 
     [Theory]
@@ -91,6 +93,52 @@ public class MotionalMeasurementTests
         Assert.Equal(
             MeasurementRefusal.NoSuchCrystal,
             MotionalMeasurement.FromOscillatorShift(Frequency.FromMegahertz(9), Frequency.FromMegahertz(40), Pf(33), Pf(235), Pf(4)).Refusal);
+
+    [Theory]
+    [MemberData(nameof(Ruled))]
+    public void OscillatorShiftByRule_ReferenceRow_GivesTheLowFigure(ReferenceRow row) => Assert.Equal(
+        row.Number("expected_cm_ff"),
+        MotionalMeasurement.ByRuleFromOscillatorShift(
+            Frequency.FromHertz(row.Number("alone_hz")), Frequency.FromHertz(row.Number("with_series_hz")), Pf(row.Number("series_pf")), Pf(row.Number("c0_pf")))!.Value.Farad * 1e15,
+        row.Number("tolerance_cm_ff"));
+
+    [Fact]
+    public void OscillatorShiftByRule_FrequencyThatDoesNotRise_IsNotGiven() =>
+        Assert.Null(MotionalMeasurement.ByRuleFromOscillatorShift(Frequency.FromMegahertz(9), Frequency.FromMegahertz(9), Pf(33), Pf(4)));
+
+    [Theory]
+    [InlineData(48, true)]
+    [InlineData(49, false)]
+    public void Transmission_Resolution_WantsTenSteps(double resolutionHz, bool fine) => Assert.Equal(fine, new TransmissionMeasurement(
+        Frequency.FromMegahertz(9), 480, Decibels.FromDb(3), Resistance.FromOhm(12.5), Resistance.FromOhm(12.5)).IsResolvedBy(resolutionHz));
+
+    [Fact]
+    public void Transmission_SweepOfACrystal_GivesThatCrystalBack()
+    {
+        // A sweep of the whole equivalent circuit, half-power points found by halving.
+        var crystal = NineMegahertz with { MotionalResistance = Resistance.FromOhm(11) };
+        double Passed(double hz) => 25 / (25 + crystal.Impedance(Frequency.FromHertz(hz))).Magnitude;
+        var peakHz = crystal.ZeroPhaseResonance!.Value.Hertz;
+        var width = Edge(peakHz + 2000) - Edge(peakHz - 2000);
+        var ends = Resistance.FromOhm(12.5);
+
+        var swept = new TransmissionMeasurement(Frequency.FromHertz(peakHz), width, Decibels.FromAmplitudeRatio(1 / Passed(peakHz)), ends, ends);
+
+        Assert.Equal(11, swept.MotionalResistance.Ohm, 0.02);
+        Assert.Equal(17, swept.MotionalCapacitance.Farad * 1e15, 17 * 0.003);
+
+        double Edge(double outside)
+        {
+            var inside = peakHz;
+            for (var i = 0; i < 60; i++)
+            {
+                var middle = 0.5 * (inside + outside);
+                (inside, outside) = Passed(middle) >= Passed(peakHz) / Math.Sqrt(2) ? (middle, outside) : (inside, middle);
+            }
+
+            return inside;
+        }
+    }
 
     [Fact]
     public void Transmission_NegativeLoss_Throws() => Assert.Throws<ArgumentOutOfRangeException>(() => new TransmissionMeasurement(
