@@ -54,10 +54,6 @@ public class ExternalNoiseTests
         Assert.Throws<ArgumentOutOfRangeException>(() => ExternalNoise.ManMade(NoiseSite.City, Frequency.FromMegahertz(mhz)));
 
     [Fact]
-    public void FromMeasuredRise_TenDecibelsOverNoiseFigure15_Gives24Point56() =>
-        Assert.Equal(24.56, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.FromDb(10)).Db, 0.01);
-
-    [Fact]
     [Evidence(typeof(ExternalNoise), EvidenceKind.ClosedFormLimit)]
     public void FromMeasuredRise_NoRise_IsNoMoreThanTheLoadItself() =>
         Assert.Equal(0, ExternalNoise.FromMeasuredRise(Decibels.FromDb(15), Decibels.Zero).Db, 1e-12);

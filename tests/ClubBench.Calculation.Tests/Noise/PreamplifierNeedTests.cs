@@ -7,6 +7,8 @@ public class PreamplifierNeedTests
 {
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("preamplifier-need");
 
+    public static TheoryData<ReferenceRow> GainRows => ReferenceTable.Theory("preamplifier-gain");
+
     [Theory]
     [MemberData(nameof(Rows))]
     public void Need_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
@@ -39,16 +41,6 @@ public class PreamplifierNeedTests
         Assert.Equal(0.98, judgement.AtQuietHour.Db, 0.01);
     }
 
-    [Theory]
-    [InlineData(false, 0.27)]
-    [InlineData(true, 0.13)]
-    public void Degradation_QuietRuralMedian_IsHalfForDirectConversion(bool direct, double expectedDb)
-    {
-        var own = Decibels.FromDb(15) - (direct ? PreamplifierNeed.DirectConversionCredit : Decibels.Zero);
-
-        Assert.Equal(expectedDb, PreamplifierNeed.Degradation(own, Decibels.FromDb(26.83)).Db, 0.01);
-    }
-
     [Fact]
     [Evidence(typeof(PreamplifierNeed), EvidenceKind.ClosedFormLimit)]
     public void Degradation_NoiselessReceiver_IsNone() =>
@@ -64,10 +56,14 @@ public class PreamplifierNeedTests
     }
 
     [Theory]
-    [InlineData(1, 7.07)]
-    [InlineData(0, 5.71)]
-    public void RequiredGain_QuietSiteAt28Megahertz_GivesThePrintedGain(double lossDb, double expectedDb) =>
-        Assert.Equal(expectedDb, Gain(15, 4, lossDb, 19.02)!.Value.Db, 0.02);
+    [MemberData(nameof(GainRows))]
+    public void Preamplifier_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    {
+        var figure = Figure(row)?.Db;
+
+        Assert.Equal(row.Has("expected"), figure is not null);
+        if (figure is { } db) Assert.Equal(row.Number("expected"), db, row.Number("tolerance"));
+    }
 
     [Fact]
     [Evidence(typeof(PreamplifierNeed), EvidenceKind.IndependentRecomputation)]
@@ -85,11 +81,25 @@ public class PreamplifierNeedTests
     }
 
     [Fact]
-    public void RequiredGain_LossEatsEverything_HasNoSolution() => Assert.Null(Gain(15, 6, 10, 5));
-
-    [Fact]
     [Evidence(typeof(PreamplifierNeed), EvidenceKind.ClosedFormLimit)]
     public void RequiredGain_NoneNeeded_IsZero() => Assert.Equal(Decibels.Zero, Gain(15, 4, 0, 40));
+
+    private static Decibels? Figure(ReferenceRow row)
+    {
+        var receiver = Decibels.FromDb(row.Number("receiver_db"));
+        return row["quantity"] switch
+        {
+            "degradation_db" => PreamplifierNeed.Degradation(receiver, Db(row, "external_db")),
+            "degradation_direct_db" => PreamplifierNeed.Degradation(receiver - PreamplifierNeed.DirectConversionCredit, Db(row, "external_db")),
+            "gain_db" => PreamplifierNeed.RequiredGain(receiver, Db(row, "preamplifier_db"), Db(row, "loss_db"), Db(row, "external_db"), Db(row, "degradation_db")),
+            "external_db" => ExternalNoise.FromMeasuredRise(receiver, Db(row, "degradation_db")),
+            "rise_degradation_db" => PreamplifierNeed.Degradation(receiver, ExternalNoise.FromMeasuredRise(receiver, Db(row, "degradation_db"))),
+            "pad_db" => ReceiverStage.Loss(receiver, Temperature.FromCelsius(400 - 273.15)).NoiseFigure,
+            var other => throw new InvalidOperationException(other),
+        };
+    }
+
+    private static Decibels Db(ReferenceRow row, string column) => Decibels.FromDb(row.Number(column));
 
     private static Decibels? Gain(double receiverDb, double preamplifierDb, double lossDb, double externalDb) => PreamplifierNeed.RequiredGain(
         Decibels.FromDb(receiverDb), Decibels.FromDb(preamplifierDb), Decibels.FromDb(lossDb), Decibels.FromDb(externalDb), Decibels.FromDb(0.5));
