@@ -53,6 +53,9 @@ public sealed record MixerFigures(
     Typical<PowerLevel> InputIntercept,
     SourceRef Source)
 {
+    /// <summary>Least isolation from oscillator to signal port at HF.</summary>
+    public Decibels LeastIsolation { get; init; }
+
     /// <summary>Loss of an ideal switching mixer, 20 log10(pi/2). Source: derived.</summary>
     public static Decibels IdealSwitchingLoss { get; } = Decibels.FromAmplitudeRatio(Math.PI / 2);
 
@@ -66,7 +69,10 @@ public sealed record MixerFigures(
         Pair(r, "lo_dbm", PowerLevel.FromDbm),
         Pair(r, "lo_vpp", Voltage.FromVolt),
         Pair(r, "iip3_dbm", PowerLevel.FromDbm)!,
-        r.Source());
+        r.Source())
+    {
+        LeastIsolation = Decibels.FromDb(r.Number("isolation_db_min")),
+    };
 
     private static Typical<T>? Pair<T>(CsvRow r, string column, Func<double, T> from) =>
         (r.OptionalNumber(column + "_min"), r.OptionalNumber(column + "_max")) is ({ } low, { } high) ? new Typical<T>(from(low), from(high)) : null;
