@@ -38,4 +38,8 @@ public static class TemperatureBudget
     public static Frequency HighestFrequency(double driftHertz, double residualPpmPerKelvin, TemperatureRise rise) =>
         Frequency.FromHertz(Guard.Positive(driftHertz, nameof(driftHertz)) * 1e6
             / (Math.Abs(residualPpmPerKelvin) * Guard.Positive(rise.Kelvin, nameof(rise))));
+
+    /// <summary>Drift in Hz from a coefficient (ppm/K, either sign) over a rise.</summary>
+    public static double DriftHertz(Frequency frequency, double ppmPerKelvin, TemperatureRise rise) =>
+        frequency.Hertz * 1e-6 * Guard.Finite(ppmPerKelvin, nameof(ppmPerKelvin)) * rise.Kelvin;
 }

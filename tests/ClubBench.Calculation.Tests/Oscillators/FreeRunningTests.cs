@@ -87,6 +87,8 @@ public class FreeRunningTests
             "share" => TemperatureBudget.CompensatingShare(a, b, c)!.Value,
             "highest_mhz" => TemperatureBudget.HighestFrequency(a, b, TemperatureRise.FromKelvin(c)).Megahertz,
             "shift_hz" => FreeRunning.ShiftHertz(Frequency.FromMegahertz(a), b, Pf(c)),
+            "drift_hz" => TemperatureBudget.DriftHertz(Frequency.FromMegahertz(a), b, TemperatureRise.FromKelvin(c)),
+            "coverage_percent" => 100 * OscillatorChoice.Coverage(FrequencyRange.FromMegahertz(a, b)),
             var other => throw new InvalidOperationException(other),
         };
     }

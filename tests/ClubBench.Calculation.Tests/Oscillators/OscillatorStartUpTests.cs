@@ -12,6 +12,8 @@ public class OscillatorStartUpTests
 
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("start-up-and-drift");
 
+    public static TheoryData<ReferenceRow> Pairs => ReferenceTable.Theory("negative-resistance");
+
     public static TheoryData<ReferenceRow> Orders => ReferenceTable.Theory("crystal-order");
 
     [Theory]
@@ -33,13 +35,23 @@ public class OscillatorStartUpTests
         Assert.Equal(row.Number("expected"), figure, row.Number("tolerance"));
     }
 
-    [Fact]
-    public void NegativeResistance_220PicofaradPairAt7Megahertz_Is212Ohm() =>
-        Assert.Equal(211.8, new FeedbackPair(Pf(220), Pf(220)).NegativeResistance(Gm, Frequency.FromMegahertz(7.03)).Ohm, 0.1);
+    [Theory]
+    [MemberData(nameof(Pairs))]
+    public void FeedbackPair_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    {
+        var (gm, f) = (row.Number("gm_ms") * 1e-3, Frequency.FromMegahertz(row.Number("f_mhz")));
 
-    [Fact]
-    public void NegativeResistance_KitAPairAt14Megahertz_Is114Ohm() =>
-        Assert.Equal(113.9, KitAPair.NegativeResistance(Gm, Frequency.FromMegahertz(14.06)).Ohm, 0.11);
+        var figure = row["quantity"] switch
+        {
+            "negative_ohm" => Pair(row).NegativeResistance(gm, f).Ohm,
+            "margin" => new OscillatorStartUp(Resistance.FromOhm(row.Number("loop_ohm")), Pair(row).NegativeResistance(gm, f)).Margin,
+            _ => FeedbackPair.LargestEqual(gm, f, Resistance.FromOhm(row.Number("loop_ohm")), row.Number("margin")).BaseEmitter.Picofarad,
+        };
+
+        Assert.Equal(row.Number("expected"), figure, row.Number("tolerance"));
+
+        static FeedbackPair Pair(ReferenceRow row) => new(Pf(row.Number("pair_pf")), Pf(row.Number("pair_pf")));
+    }
 
     [Fact]
     [Evidence(typeof(FeedbackPair), EvidenceKind.Identity)]
@@ -55,7 +67,6 @@ public class OscillatorStartUpTests
 
         var pair = FeedbackPair.LargestEqual(Gm, f, Resistance.FromOhm(30), 5);
 
-        Assert.Equal(130.7, pair.BaseEmitter.Picofarad, 0.13);
         Assert.Equal(150, pair.NegativeResistance(Gm, f).Ohm, 1e-9);
     }
 

@@ -11,6 +11,8 @@ public class PulledCrystalDesignTests
 
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("series-inductance");
 
+    public static TheoryData<ReferenceRow> SafeRows => ReferenceTable.Theory("safe-range");
+
     [Theory]
     [MemberData(nameof(Rows))]
     public void Inductance_ReferenceRow_IsFound(ReferenceRow row)
@@ -79,26 +81,19 @@ public class PulledCrystalDesignTests
         Assert.All(candidates, c => Assert.False(c.LiesInside));
     }
 
-    [Fact]
-    public void LargestSafe_ThirdOvertoneAt28Megahertz_PullsAboutOneKilohertzWithoutACoil()
+    [Theory]
+    [MemberData(nameof(SafeRows))]
+    public void LargestSafe_ReferenceRow_GivesTheSpanAndThePullOfTheTable(ReferenceRow row)
     {
-        var loop = Plain(28.06, 2.1, 5.3, 0) with { HolderCapacitance = Pf(1), OscillatorCapacitance = Pf(60) };
+        var loop = Plain(row) with { CrystalCount = (int)row.Number("crystals"), HolderCapacitance = Pf(1), OscillatorCapacitance = Pf(row.Number("oscillator_pf")) };
 
         var safe = PulledCrystalDesign.LargestSafe(loop);
+        var range = loop.WithInductance(safe).Range();
 
-        Assert.Equal(1308, loop.Range().SpanHertz, 2.0);
-        Assert.Equal(3.53, safe.Microhenry, 0.018);
-        Assert.Equal(5326, loop.WithInductance(safe).Range().SpanHertz, 27.0);
-    }
-
-    [Fact]
-    public void LargestSafe_FundamentalAt14Megahertz_DoubledPullsTenTimesFurther()
-    {
-        var loop = Plain(14.03, 24, 5.5, 0) with { HolderCapacitance = Pf(1) };
-
-        var span = loop.WithInductance(PulledCrystalDesign.LargestSafe(loop)).Range().SpanHertz;
-
-        Assert.Equal(58_100, 2 * span, 291.0);
+        Assert.Equal(row.Number("span_hz"), row.Number("multiple") * range.SpanHertz, row.Number("tolerance_span_hz"));
+        if (row.Has("lowest_pull_hz")) Assert.Equal(row.Number("lowest_pull_hz"), range.AtMaximum.PullHertz, row.Number("tolerance_pull_hz"));
+        if (row.Has("expected_uh")) Assert.Equal(row.Number("expected_uh"), safe.Microhenry, row.Number("tolerance_uh"));
+        if (row.Has("no_coil_span_hz")) Assert.Equal(row.Number("no_coil_span_hz"), loop.Range().SpanHertz, 2.0);
     }
 
     [Fact]
