@@ -1,0 +1,60 @@
+using ClubBench.Calculation.Mixing;
+using ClubBench.Calculation.Quantities;
+using CsCheck;
+
+namespace ClubBench.Calculation.Tests.Mixing;
+
+public class BirdiesTests
+{
+    public static TheoryData<ReferenceRow> BirdieRows => ReferenceTable.Theory("birdies");
+
+    [Theory]
+    [InlineData(InjectionSide.LowSide, 9, 14.0, 14.35)]
+    public void WithSignal_CleanScheme_FindsNone(InjectionSide side, double mid, double low, double high) =>
+        Assert.Empty(Find(side, mid, low, high));
+
+    [Theory]
+    [Evidence(typeof(Birdies), EvidenceKind.ClosedFormLimit)]
+    [MemberData(nameof(BirdieRows))]
+    public void Birdies_ReferenceRow_AreFound(ReferenceRow row)
+    {
+        var (scheme, band) = (Scheme(Enum.Parse<InjectionSide>(row["side"]), row.Number("if_mhz")), Band(row.Number("low_mhz"), row.Number("high_mhz")));
+
+        var found = row["kind"] == "signal" ? Birdies.WithSignal(scheme, band) : Birdies.Internal(scheme, band, Frequency.FromMegahertz(row.Number("beat_mhz")));
+
+        Assert.Contains(found, b => Math.Abs(b.Signal.Hertz - (row.Number("expected_mhz") * 1e6)) < row.Number("tolerance_hz")
+            && (b.OscillatorOrder, b.OtherOrder, b.IsInside) == ((int)row.Number("oscillator_order"), (int)row.Number("other_order"), row["inside"] == "yes"));
+    }
+
+    [Fact]
+    public void WithSignal_AnyScheme_CrossesWhereTheProductIsTheIntermediate() => Gen.Select(Gen.Double[3, 29], Gen.Double[0.455, 11], Gen.Int[2, 4]).Sample((low, mid, side) =>
+    {
+        var scheme = Scheme((InjectionSide)side, mid);
+        return Birdies.WithSignal(scheme, Band(low, low + 0.3)).All(b => scheme.OscillatorFor(b.Signal) is not { } lo
+            || new[] { 1, -1 }.Any(n => Math.Abs(Math.Abs((b.OscillatorOrder * lo.Hertz) + (n * b.OtherOrder * b.Signal.Hertz)) - (mid * 1e6)) < 1));
+    });
+
+    [Fact]
+    public void WithSignal_17MetresWith9Megahertz_HasNoneInside() =>
+        Assert.DoesNotContain(Find(InjectionSide.LowSide, 9, 18.068, 18.168), b => b.IsInside);
+
+    [Fact]
+    public void WithSignal_KeptCrystalsOf80MetreSetOn40Metres_WhistlesAtTheEdge() =>
+        Assert.Contains(Find(InjectionSide.LowSide, 5.9991, 7.0, 7.08), b => b.OscillatorOrder == 6 && b.OtherOrder == 0 && Math.Abs(b.Signal.Megahertz - 6.99895) < 1e-5);
+
+    [Fact]
+    public void Internal_CleanScheme_FindsNoneToOrder8() =>
+        Assert.DoesNotContain(
+            Birdies.Internal(Scheme(InjectionSide.HighSide, 4.9152), Band(14.0, 14.35), Frequency.FromMegahertz(4.9137), 8), b => b.IsInside);
+
+    [Fact]
+    public void WithSignal_DirectConversion_IsEmpty() =>
+        Assert.Empty(Birdies.WithSignal(FrequencyScheme.DirectConversion, Band(7.0, 7.2)));
+
+    private static IReadOnlyList<Birdie> Find(InjectionSide side, double mid, double low, double high) =>
+        Birdies.WithSignal(Scheme(side, mid), Band(low, high));
+
+    private static FrequencyScheme Scheme(InjectionSide side, double mid) => new(side, Frequency.FromMegahertz(mid));
+
+    private static FrequencyRange Band(double low, double high) => FrequencyRange.FromMegahertz(low, high);
+}
