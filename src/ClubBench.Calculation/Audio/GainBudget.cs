@@ -19,4 +19,10 @@ public static class GainBudget
     /// for that much more. Negative downwards. Source: itu-r-p372, slope of the man-made noise.
     /// </summary>
     public static Decibels ExtraFor(Frequency from, Frequency to) => Decibels.FromDb(27.7 * Math.Log10(to / from));
+
+    /// <summary>
+    /// What is left of a margin of gain after a move: zero or above, and nothing in the audio chain has to change. The margin is the gain there is at most
+    /// less the gain the band noise needs now.
+    /// </summary>
+    public static Decibels MarginAfter(Decibels margin, Frequency from, Frequency to) => margin - ExtraFor(from, to);
 }

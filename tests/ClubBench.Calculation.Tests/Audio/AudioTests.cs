@@ -51,6 +51,17 @@ public class AudioTests
         Assert.Null(PitchAgreement.OddOneOut([Pitch("filter", 701), Pitch("sidetone", 687), Pitch("offset", 663)]));
 
     [Fact]
+    public void MarginAfter_OctavesUp_ShrinksByTheFallOfTheNoiseAndComesBack()
+    {
+        var (low, high) = (Frequency.FromMegahertz(7), Frequency.FromMegahertz(28));
+
+        var after = GainBudget.MarginAfter(Decibels.FromDb(10), low, high);
+
+        Assert.Equal(10 - (2 * 8.34), after.Db, 0.01);
+        Assert.Equal(10, GainBudget.MarginAfter(after, high, low).Db, 1e-12);
+    }
+
+    [Fact]
     [Evidence(typeof(MultipleFeedbackBandPass), EvidenceKind.IndependentRecomputation)]
     public void BandPass_CircuitByItsNodes_HasThatCentreGainAndWidth()
     {
