@@ -25,7 +25,8 @@ public static class CeramicResonators
         Within(resonator.CapacitanceRatio, CapacitanceRatio) && (resonator.UnloadedQ is not { } q || Within(q, UnloadedQ));
 
     /// <summary>Largest drift to expect over a rise of temperature, Hz.</summary>
-    public static double LargestDriftHertz(Frequency frequency, TemperatureRise rise) => frequency.Hertz * 1e-6 * PpmPerKelvin.High * Math.Abs(rise.Kelvin);
+    public static double LargestDriftHertz(Frequency frequency, TemperatureRise rise) =>
+        Guard.Finite(frequency.Hertz * 1e-6 * PpmPerKelvin.High * Math.Abs(rise.Kelvin), nameof(rise));
 
     private static bool Within(double value, Spread<double> spread) => value >= spread.Low && value <= spread.High;
 }

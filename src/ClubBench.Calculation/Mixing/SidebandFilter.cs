@@ -20,6 +20,9 @@ public sealed record SidebandFilter(Frequency Carrier, Decibels CarrierAttenuati
     /// <summary>Carrier and opposite sideband shall be this far down. Source: common practice.</summary>
     public static Decibels Wanted { get; } = Decibels.FromDb(40);
 
+    /// <summary>Usual width of a filter for speech. Source: common practice.</summary>
+    public static FrequencyRange UsualBandwidth { get; } = new(Frequency.FromHertz(2100), Frequency.FromHertz(2700));
+
     /// <summary>Whether carrier and opposite sideband are both far enough down.</summary>
     public bool Suffices => CarrierSuppression >= Wanted && OppositeSideband >= Wanted;
 

@@ -33,10 +33,10 @@ public static class SuppressionReading
     public static Decibels BelowOneLine(Decibels belowPeakEnvelope, SuppressionSignal signal) => belowPeakEnvelope - Offset(signal);
 
     /// <summary>
-    /// Distance in Hz from the middle of the emission at which the spurious domain begins below 30 MHz: 2.5 times the necessary bandwidth (Hz, above zero), at least 10 kHz.
+    /// Distance in Hz from the middle of the emission at which the spurious domain begins below 30 MHz: 2.5 times the necessary bandwidth (1 Hz to 1 GHz), at least 10 kHz.
     /// </summary>
     public static double SpuriousDomainFromHertz(double necessaryBandwidthHertz) =>
-        Math.Max(10_000, 2.5 * Guard.Positive(necessaryBandwidthHertz, nameof(necessaryBandwidthHertz)));
+        Math.Max(10_000, 2.5 * Guard.Within(necessaryBandwidthHertz, 1, 1e9, nameof(necessaryBandwidthHertz)));
 
     private static Decibels Offset(SuppressionSignal signal) => signal switch
     {

@@ -11,6 +11,8 @@ namespace ClubBench.Calculation.Oscillators;
 /// <param name="Nominal">Dial with a crystal exactly on frequency.</param>
 public sealed record CrystalOrder(CrystalParameters Crystal, Frequency Marked, Capacitance Load, double TolerancePpm, PulledCrystalRange Nominal)
 {
+    private const double GuardHertz = 1000;
+
     /// <summary>Highest frequency that every crystal within tolerance reaches.</summary>
     public Frequency GuaranteedHigh => Nominal.High * (1 - (TolerancePpm * 1e-6));
 
@@ -22,6 +24,11 @@ public sealed record CrystalOrder(CrystalParameters Crystal, Frequency Marked, C
 
     /// <summary>Furthest frequencies a crystal within tolerance can reach; these must stay inside the band.</summary>
     public FrequencyRange WorstReach => new(Nominal.Low * (1 - (TolerancePpm * 1e-6)), Nominal.High * (1 + (TolerancePpm * 1e-6)));
+
+    /// <summary>
+    /// Whether every crystal within tolerance keeps the dial inside a band, with 1 kHz to spare at its lower edge. Source: common practice.
+    /// </summary>
+    public bool KeepsInside(FrequencyRange band) => WorstReach.Low.Hertz >= band.Low.Hertz + GuardHertz && WorstReach.High <= band.High;
 
     /// <summary>
     /// The order that puts the top of the dial on a frequency. <paramref name="loop"/> gives every part and the crystal's Cm, C0 and Rm (its

@@ -25,5 +25,5 @@ public static class SquareWave
     public static Frequency ClockForQuadrature(Frequency signal) => signal * 4;
 
     /// <summary>Shift in Hz from an error of the reference in ppm, either sign.</summary>
-    public static double ShiftHertz(Frequency output, double referencePpm) => output.Hertz * Guard.Finite(referencePpm, nameof(referencePpm)) * 1e-6;
+    public static double ShiftHertz(Frequency output, double referencePpm) => output.Hertz * Guard.Within(referencePpm, -1e6, 1e6, nameof(referencePpm)) * 1e-6;
 }

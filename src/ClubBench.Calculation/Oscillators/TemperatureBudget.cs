@@ -41,5 +41,5 @@ public static class TemperatureBudget
 
     /// <summary>Drift in Hz from a coefficient (ppm/K, either sign) over a rise.</summary>
     public static double DriftHertz(Frequency frequency, double ppmPerKelvin, TemperatureRise rise) =>
-        frequency.Hertz * 1e-6 * Guard.Finite(ppmPerKelvin, nameof(ppmPerKelvin)) * rise.Kelvin;
+        Guard.Finite(frequency.Hertz * 1e-6 * Guard.Within(ppmPerKelvin, -1e6, 1e6, nameof(ppmPerKelvin)) * rise.Kelvin, nameof(rise));
 }

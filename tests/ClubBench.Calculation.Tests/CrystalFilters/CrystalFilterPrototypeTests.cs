@@ -59,6 +59,13 @@ public class CrystalFilterPrototypeTests
             [true, true, true],
             new[] { 4, 8, 12 }.Select(n => CrystalFilterPrototype.EqualCapacitor(n).Couplings[0]).Zip(new[] { 8, 12, 12 }, (k, n) => k >= CrystalFilterPrototype.EqualCapacitor(n).Couplings[0] && k > 0.5));
 
+    [Fact]
+    public void EndQ_EvenChebyshev_IsTheSameAtBothEnds() => Gen.Select(Gen.Int[1, 6], Gen.Double[0.01, 3]).Sample((half, ripple) =>
+    {
+        var lowPass = LowPassPrototype.Chebyshev(2 * half, PassBandRipple.FromRipple(Decibels.FromDb(ripple)));
+        return Math.Abs((lowPass.Values[^1] * lowPass.LoadRatio / lowPass.Values[0]) - 1) < 1e-9;
+    });
+
     [Theory]
     [InlineData(1)]
     [InlineData(13)]

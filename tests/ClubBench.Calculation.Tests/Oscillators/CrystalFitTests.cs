@@ -15,6 +15,8 @@ public class CrystalFitTests
 
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("crystal-fit");
 
+    public static TheoryData<ReferenceRow> Recommendations => ReferenceTable.Theory("fit-recommendation");
+
     [Theory]
     [MemberData(nameof(Rows))]
     public void Fit_ReferenceRow_GivesTheCrystal(ReferenceRow row)
@@ -42,16 +44,32 @@ public class CrystalFitTests
         Assert.InRange(fit.RmsResidualHertz, 0, 0.01);
     }
 
-    [Fact]
-    public void FittedCrystal_Recommendation_Needs24Point52Microhenry()
+    [Theory]
+    [MemberData(nameof(Recommendations))]
+    public void FittedCrystal_Recommendation_IsThatOfTheTable(ReferenceRow row)
     {
-        var fit = Fit(ReferenceTable.Read("crystal-fit").Single(r => r["kind"] == "oscillator"));
+        var fit = Fit(ReferenceTable.Read("crystal-fit").Single(r => r["case_id"] == row["fit"]));
 
-        var answer = PulledCrystalDesign.ForSpan(Bench with { Crystal = fit.Crystal! }, 12_000);
+        var answer = PulledCrystalDesign.ForSpan(Bench with { Crystal = fit.Crystal! }, row.Number("span_hz"));
 
-        Assert.Equal(24.52, answer.Inductance.Microhenry, 0.12);
-        Assert.Equal(CrystalControlState.CrystalControlled, answer.Range.State);
-        Assert.Equal(-12_450, answer.Range.AtMaximum.PullHertz, 10.0);
+        Assert.Equal(row.Number("expected_uh"), answer.Inductance.Microhenry, row.Number("expected_uh") * row.Number("relative_tolerance"));
+        Assert.Equal(Enum.Parse<CrystalControlState>(row["state"]), answer.Range.State);
+        Assert.Equal(row.Number("lowest_pull_hz"), answer.Range.AtMaximum.PullHertz, row.Number("tolerance_pull_hz"));
+        Assert.Equal(row.Number("inductor_sensitivity"), answer.Range.AtMaximum.Sensitivities.Inductor, row.Number("tolerance_sensitivity"));
+        Assert.Equal(row.Number("resonance_ratio"), answer.Range.AtMaximum.InductorResonanceRatio!.Value, row.Number("tolerance_ratio"));
+    }
+
+    [Fact]
+    public void SuspectReadings_OneFarOff_IsNamedAndSoundReadingsAreNot()
+    {
+        var sound = Fit(ReferenceTable.Read("crystal-fit").First());
+        var wrong = sound with { ResidualsHertz = [2, -3, 1, 250, -2, 4, -1] };
+        var slight = sound with { ResidualsHertz = [2, -3, 1, 19, -2, 4, -1] };
+
+        Assert.Empty(sound.SuspectReadings());
+        Assert.Equal([3], wrong.SuspectReadings());
+        Assert.Empty(slight.SuspectReadings());
+        Assert.Empty((sound with { ResidualsHertz = [] }).SuspectReadings());
     }
 
     [Fact]

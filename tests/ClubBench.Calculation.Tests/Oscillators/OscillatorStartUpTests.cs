@@ -111,6 +111,17 @@ public class OscillatorStartUpTests
     }
 
     [Fact]
+    public void OrderKeepsInside_AKilohertzToSpareBelow_AndNotOneHertzLess()
+    {
+        var order = CrystalOrder.ForTop(Frequency.FromMegahertz(7.035), Plain(7, 18, 4.5, 22), Pf(30), 20)!;
+        var (low, high) = (order.WorstReach.Low.Hertz - 1000, order.WorstReach.High);
+
+        Assert.True(order.KeepsInside(new(Frequency.FromHertz(low - 1), high)));
+        Assert.False(order.KeepsInside(new(Frequency.FromHertz(low + 1), high)));
+        Assert.False(order.KeepsInside(new(Frequency.FromHertz(low - 1), high * (1 - 1e-7))));
+    }
+
+    [Fact]
     public void OrderForTop_CoilFarTooLarge_HasNoSolution() =>
         Assert.Null(CrystalOrder.ForTop(Frequency.FromMegahertz(7.035), Plain(7, 18, 4.5, 4000), Pf(30), 20));
 }
