@@ -59,6 +59,9 @@ public sealed record MixerFigures(
     /// <summary>Loss of an ideal switching mixer, 20 log10(pi/2). Source: derived.</summary>
     public static Decibels IdealSwitchingLoss { get; } = Decibels.FromAmplitudeRatio(Math.PI / 2);
 
+    /// <summary>Single-sideband noise figure of a diode mixer from its loss (zero or above): half a decibel more. Source: mixer-terms-note.</summary>
+    public static Decibels PassiveNoiseFigure(Decibels loss) => Decibels.FromDb(Guard.NotNegative(loss.Db, nameof(loss)) + 0.5);
+
     /// <summary>Figures of every kind, from <c>Tables/mixers.csv</c>.</summary>
     public static IReadOnlyDictionary<MixerKind, MixerFigures> All { get; } = CsvTable.Read("mixers", Row).ToDictionary(m => m.Kind);
 

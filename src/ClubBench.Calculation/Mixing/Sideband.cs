@@ -70,6 +70,17 @@ public static class Sidebands
     /// <summary>Power of one sideband of double sideband without carrier, one tone: a quarter of the peak envelope power.</summary>
     public static Power OneOfTwoSidebands(Power peakEnvelope) => peakEnvelope / 4;
 
+    /// <summary>
+    /// Carriers that keep the whole emission and the carrier itself inside a band; null where the band is too narrow. An unknown sideband means both, which
+    /// take the upper audio edge on either side.
+    /// </summary>
+    public static FrequencyRange? CarriersWithin(FrequencyRange band, Sideband sideband, FrequencyRange audio)
+    {
+        var low = band.Low.Hertz + (sideband == Sideband.Upper ? 0 : audio.High.Hertz);
+        var high = band.High.Hertz - (sideband == Sideband.Lower ? 0 : audio.High.Hertz);
+        return high > 0 && high >= low ? new FrequencyRange(Frequency.FromHertz(low), Frequency.FromHertz(high)) : null;
+    }
+
     /// <summary>Necessary bandwidth in Hz: twice the upper audio edge for both sidebands, the width of the audio for one.</summary>
     public static double NecessaryBandwidthHertz(FrequencyRange audio, bool doubleSideband) =>
         doubleSideband ? 2 * audio.High.Hertz : audio.WidthHertz;

@@ -16,6 +16,9 @@ public sealed record FeedbackPair(Capacitance BaseEmitter, Capacitance EmitterGr
     /// <summary>Capacitance the circuit shows at its crystal terminal: C1 and C2 in series, plus the device.</summary>
     public Capacitance OscillatorCapacitance => InSeries(BaseEmitter, EmitterGround) + DeviceInput;
 
+    /// <summary>Whether each capacitor is at least five times the device's own, so that the device does not set the frequency. Source: common practice.</summary>
+    public bool SwampsDevice => BaseEmitter >= DeviceInput * 5 && EmitterGround >= DeviceInput * 5;
+
     /// <summary>The pair with a capacitor switched across C2.</summary>
     public FeedbackPair WithAcrossEmitter(Capacitance added) => this with { EmitterGround = EmitterGround + added };
 

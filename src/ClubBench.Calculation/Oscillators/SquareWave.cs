@@ -21,6 +21,12 @@ public static class SquareWave
         return ratio > 1e-10 ? Decibels.FromAmplitudeRatio(ratio) : null;
     }
 
+    /// <summary>
+    /// What the front end has to take off a harmonic (2 to 100) before a hard-switched mixer, at least zero; null where the clock has no such harmonic.
+    /// </summary>
+    public static Decibels? FrontEndNeeded(int harmonic, double dutyCycle) =>
+        Level(Guard.Within(harmonic, 2, 100, nameof(harmonic)), dutyCycle) is { } level ? Decibels.FromDb(Math.Max(0, WantedHarmonicRejection.Db + level.Db)) : null;
+
     /// <summary>Clock needed for quadrature by dividing by four; the part must reach it on the new band.</summary>
     public static Frequency ClockForQuadrature(Frequency signal) => signal * 4;
 

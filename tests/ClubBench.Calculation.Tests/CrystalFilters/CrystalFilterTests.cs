@@ -1,8 +1,11 @@
-using System.Numerics;
 using ClubBench.Calculation.Components;
 using ClubBench.Calculation.CrystalFilters;
 using ClubBench.Calculation.Crystals;
+using ClubBench.Calculation.Filters;
 using ClubBench.Calculation.Quantities;
+using CsCheck;
+using MathNet.Numerics.LinearAlgebra;
+using Complex = System.Numerics.Complex;
 
 namespace ClubBench.Calculation.Tests.CrystalFilters;
 
@@ -46,6 +49,17 @@ public class CrystalFilterTests
         Assert.Equal(row.Has("expected_width60_hz"), response.Band60dB is not null);
         if (row.Has("expected_width60_hz")) Assert.Equal(row.Number("expected_width60_hz"), response.Band60dB!.Value.WidthHertz, row.Number("tolerance_hz"));
     }
+
+    [Fact]
+    public void Loss_AnyFilter_IsThatOfTheNodalEquations() =>
+        Gen.Select(Gen.Int[2, 8], Gen.Double[0.05, 1], Gen.Double[300, 2400], Gen.Double[-2, 2], Gen.Double[-80, 80]).Sample((n, ripple, hz, place, off) =>
+        {
+            var prototype = CrystalFilterPrototype.Chebyshev(n, PassBandRipple.FromRipple(Decibels.FromDb(ripple)));
+            var equal = CrystalFilterDesign.Of(new(prototype, Nine, Frequency.FromHertz(hz))).Filter!;
+            var filter = equal.WithResonances([.. equal.Meshes.Select((m, i) => At(i % 2 == 0 ? off : -off))]);
+            var f = Frequency.FromHertz(filter.Middle.Hertz + (place * hz));
+            return Math.Abs(filter.Loss(f).Db - NodalLoss(filter, f)) < 1e-6;
+        });
 
     [Fact]
     public void At_AnyFrequency_IsReciprocal() =>
@@ -115,6 +129,24 @@ public class CrystalFilterTests
 
         Assert.Null(CrystalFilterResponse.Of(apart, Narrow));
         Assert.NotNull(CrystalFilterResponse.Of(Four, Narrow));
+    }
+
+    // Node voltages by solving the admittance matrix: no chain of two-ports.
+    private static double NodalLoss(CrystalFilter filter, Frequency f)
+    {
+        var n = filter.Meshes.Length + 1;
+        var y = Matrix<Complex>.Build.Dense(n, n);
+        for (var i = 0; i < n - 1; i++)
+        {
+            var impedance = filter.Meshes[i].Crystal.Impedance(f) + (filter.Meshes[i].Series is { } c ? 1 / new Complex(0, f.RadiansPerSecond * c.Farad) : 0);
+            (y[i, i], y[i + 1, i + 1], y[i, i + 1], y[i + 1, i]) = (y[i, i] + (1 / impedance), y[i + 1, i + 1] + (1 / impedance), -1 / impedance, -1 / impedance);
+            if (i < n - 2) y[i + 1, i + 1] += new Complex(0, f.RadiansPerSecond * filter.Couplings[i].Farad);
+        }
+
+        y[0, 0] += 1 / filter.Source.Ohm;
+        y[n - 1, n - 1] += 1 / filter.Load.Ohm;
+        var current = Vector<Complex>.Build.Dense(n, i => i == 0 ? 1 / filter.Source.Ohm : Complex.Zero);
+        return -20 * Math.Log10(2 * y.Solve(current)[n - 1].Magnitude);
     }
 
     private static Frequency At(double offsetHertz) => Frequency.FromHertz(8_998_000 + offsetHertz);

@@ -121,6 +121,14 @@ public class MixingTests
     }
 
     [Fact]
+    public void MixerFigures_DiodeMixers_HaveTheNoiseFigureOfTheirLoss() =>
+        Assert.All(new[] { MixerKind.DiodeRingLevel7, MixerKind.SingleBalancedDiodes }.Select(k => MixerFigures.All[k]), m =>
+        {
+            Assert.Equal(m.NoiseFigure.Low.Db, MixerFigures.PassiveNoiseFigure(-m.Gain.High).Db, 1e-9);
+            Assert.Equal(m.NoiseFigure.High.Db, MixerFigures.PassiveNoiseFigure(-m.Gain.Low).Db, 1e-9);
+        });
+
+    [Fact]
     public void MixerFigures_PassiveMixers_LoseMoreThanAnIdealSwitch() =>
         Assert.All(
             MixerFigures.All.Values.Where(m => m.Gain.High < Decibels.Zero),

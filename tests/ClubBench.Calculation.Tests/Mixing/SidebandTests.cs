@@ -53,6 +53,27 @@ public class SidebandTests
     public void Usual_Frequency_IsTheSidebandOfTheBand(double mhz, Sideband expected) =>
         Assert.Equal(expected, Sidebands.Usual(Frequency.FromMegahertz(mhz)));
 
+    [Theory]
+    [InlineData(Sideband.Upper, 14.0, 14.3473)]
+    [InlineData(Sideband.Lower, 14.0027, 14.35)]
+    [InlineData(Sideband.Unknown, 14.0027, 14.3473)]
+    public void CarriersWithin_20Metres_KeepTheEmissionInside(Sideband sideband, double low, double high)
+    {
+        var carriers = Sidebands.CarriersWithin(FrequencyRange.FromMegahertz(14.0, 14.35), sideband, Speech)!.Value;
+
+        Assert.Equal(low, carriers.Low.Megahertz, 1e-9);
+        Assert.Equal(high, carriers.High.Megahertz, 1e-9);
+    }
+
+    [Fact]
+    public void CarriersWithin_BandNarrowerThanBothSidebands_AreNone()
+    {
+        Assert.Null(Sidebands.CarriersWithin(FrequencyRange.FromMegahertz(5.3515, 5.3565), Sideband.Unknown, Speech));
+        Assert.NotNull(Sidebands.CarriersWithin(FrequencyRange.FromMegahertz(5.3515, 5.3565), Sideband.Upper, Speech));
+    }
+
+    private static FrequencyRange Speech => new(Frequency.FromHertz(300), Frequency.FromHertz(2700));
+
     private static FrequencyScheme Scheme(InjectionSide side, double mid) => new(side, Frequency.FromMegahertz(mid));
 
     private static FrequencyRange Audio(ReferenceRow row) => new(Frequency.FromHertz(row.Number("a")), Frequency.FromHertz(row.Number("b")));

@@ -53,6 +53,12 @@ public class OscillatorStartUpTests
         static FeedbackPair Pair(ReferenceRow row) => new(Pf(row.Number("pair_pf")), Pf(row.Number("pair_pf")));
     }
 
+    [Theory]
+    [InlineData(30, true)]
+    [InlineData(31, false)]
+    public void SwampsDevice_AFifthOfThePair_IsTheLimit(double devicePf, bool swamps) =>
+        Assert.Equal(swamps, (KitAPair with { DeviceInput = Pf(devicePf) }).SwampsDevice);
+
     [Fact]
     [Evidence(typeof(FeedbackPair), EvidenceKind.Identity)]
     public void NegativeResistance_TwiceTheFrequency_IsAQuarter() =>

@@ -40,6 +40,13 @@ public class SquareWaveTests
     }
 
     [Fact]
+    public void FrontEndNeeded_ThirdHarmonic_IsWhatTheClockDoesNotGive()
+    {
+        Assert.Equal(50 - 9.54, SquareWave.FrontEndNeeded(3, 0.5)!.Value.Db, 0.01);
+        Assert.Null(SquareWave.FrontEndNeeded(2, 0.5));
+    }
+
+    [Fact]
     public void Clock_14Megahertz_IsFourTimesAndShiftsByItsReference()
     {
         var signal = Frequency.FromMegahertz(14.06);
