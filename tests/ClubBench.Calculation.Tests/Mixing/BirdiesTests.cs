@@ -1,3 +1,4 @@
+using System.Globalization;
 using ClubBench.Calculation.Mixing;
 using ClubBench.Calculation.Quantities;
 using CsCheck;
@@ -6,6 +7,8 @@ namespace ClubBench.Calculation.Tests.Mixing;
 
 public class BirdiesTests
 {
+    public static TheoryData<ReferenceRow> Followed => ReferenceTable.Theory("birdies-followed");
+
     public static TheoryData<ReferenceRow> BirdieRows => ReferenceTable.Theory("birdies");
 
     [Theory]
@@ -24,6 +27,17 @@ public class BirdiesTests
 
         Assert.Contains(found, b => Math.Abs(b.Signal.Hertz - (row.Number("expected_mhz") * 1e6)) < row.Number("tolerance_hz")
             && (b.OscillatorOrder, b.OtherOrder, b.IsInside) == ((int)row.Number("oscillator_order"), (int)row.Number("other_order"), row["inside"] == "yes"));
+    }
+
+    [Theory]
+    [MemberData(nameof(Followed))]
+    public void WithSignal_ProductsFollowedAcrossTheBand_AreAllFoundAndNoOthers(ReferenceRow row)
+    {
+        var found = Find(Enum.Parse<InjectionSide>(row["side"]), row.Number("if_mhz"), row.Number("low_mhz"), row.Number("high_mhz")).Where(b => b.IsInside).ToList();
+        var expected = row["expected"].Split(' ', StringSplitOptions.RemoveEmptyEntries).Select(Triple).ToList();
+
+        Assert.Equal(expected.Count, found.Count);
+        Assert.All(expected, e => Assert.Contains(found, b => Math.Abs(b.Signal.Hertz - e[0]) <= row.Number("tolerance_hz") && (b.OscillatorOrder, b.OtherOrder) == ((int)e[1], (int)e[2])));
     }
 
     [Fact]
@@ -50,6 +64,8 @@ public class BirdiesTests
     [Fact]
     public void WithSignal_DirectConversion_IsEmpty() =>
         Assert.Empty(Birdies.WithSignal(FrequencyScheme.DirectConversion, Band(7.0, 7.2)));
+
+    private static double[] Triple(string text) => [.. text.Split(':').Select(t => double.Parse(t, CultureInfo.InvariantCulture))];
 
     private static IReadOnlyList<Birdie> Find(InjectionSide side, double mid, double low, double high) =>
         Birdies.WithSignal(Scheme(side, mid), Band(low, high));
