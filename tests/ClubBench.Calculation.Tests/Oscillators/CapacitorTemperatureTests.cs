@@ -41,5 +41,6 @@ public class CapacitorTemperatureTests
         t => Assert.Equal(0, TemperatureBudget.PpmPerKelvin(120, [new(PulledCrystals.Pf(100 * t.Share), t.Type.PpmPerKelvin.Usual), new(PulledCrystals.Pf(100 * (1 - t.Share)), 30)]), 1e-9));
 
     [Fact]
-    public void Compensating_CoilThatFalls_HasNone() => Assert.Empty(CapacitorTemperature.Compensating(-40, 0).Where(t => t.Type.PpmPerKelvin.Usual < 0));
+    public void Compensating_CoilThatFalls_NeedsATypeThatRises() =>
+        Assert.Equal(["silver mica"], CapacitorTemperature.Compensating(-40, 0).Select(t => t.Type.Type));
 }
