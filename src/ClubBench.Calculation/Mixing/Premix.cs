@@ -21,6 +21,8 @@ public enum PremixLaw
 /// <summary>Premixing: a low, stable tunable oscillator moved up by a crystal; its drift is that of both and does not grow with the band. Source: derived.</summary>
 public static class Premix
 {
+    private const double LowestCrystalHz = 1000;
+
     /// <summary>The laws there are.</summary>
     public static IReadOnlyList<PremixLaw> Laws { get; } = [PremixLaw.CrystalPlusOscillator, PremixLaw.CrystalMinusOscillator, PremixLaw.OscillatorMinusCrystal];
 
@@ -37,15 +39,17 @@ public static class Premix
     };
 
     /// <summary>
-    /// Crystals that would give a whole range with the tunable oscillator there is; null when its own range is too narrow or no crystal above zero does it.
+    /// Crystals that would give a whole range with the tunable oscillator there is; null when its own range is too narrow or no crystal from 1 kHz up does it.
     /// </summary>
     public static FrequencyRange? CrystalsFor(PremixLaw law, FrequencyRange oscillator, FrequencyRange wanted) => law switch
     {
-        PremixLaw.CrystalPlusOscillator => Range(wanted.High.Hertz - oscillator.High.Hertz, wanted.Low.Hertz - oscillator.Low.Hertz),
-        PremixLaw.CrystalMinusOscillator => Range(wanted.High.Hertz + oscillator.Low.Hertz, wanted.Low.Hertz + oscillator.High.Hertz),
-        PremixLaw.OscillatorMinusCrystal => Range(oscillator.Low.Hertz - wanted.Low.Hertz, oscillator.High.Hertz - wanted.High.Hertz),
+        PremixLaw.CrystalPlusOscillator => Crystals(wanted.High.Hertz - oscillator.High.Hertz, wanted.Low.Hertz - oscillator.Low.Hertz),
+        PremixLaw.CrystalMinusOscillator => Crystals(wanted.High.Hertz + oscillator.Low.Hertz, wanted.Low.Hertz + oscillator.High.Hertz),
+        PremixLaw.OscillatorMinusCrystal => Crystals(oscillator.Low.Hertz - wanted.Low.Hertz, oscillator.High.Hertz - wanted.High.Hertz),
         _ => throw new ArgumentOutOfRangeException(nameof(law), law, "The law must be stated."),
     };
+
+    private static FrequencyRange? Crystals(double lowHz, double highHz) => Range(Math.Max(lowHz, LowestCrystalHz), highHz);
 
     private static FrequencyRange? Range(double lowHz, double highHz) =>
         lowHz > 0 && highHz >= lowHz ? new FrequencyRange(Frequency.FromHertz(lowHz), Frequency.FromHertz(highHz)) : null;

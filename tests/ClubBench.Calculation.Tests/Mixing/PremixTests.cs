@@ -76,6 +76,35 @@ public class PremixTests
     });
 
     [Fact]
+    public void CrystalsFor_AnyLaw_HoldExactlyThoseTheOscillatorCovers() => Gen.Select(Gen.Int[1, 3], Gen.Double[0.1, 40], Gen.Double[1, 12], Gen.Double[0.1, 2]).Sample((law, crystal, low, width) =>
+    {
+        var (available, wanted, x) = (FrequencyRange.FromMegahertz(low, low + width), FrequencyRange.FromMegahertz(12.0, 12.1), Frequency.FromMegahertz(crystal));
+        var covered = Premix.OscillatorFor((PremixLaw)law, x, wanted) is { } needed && available.Contains(needed.Low) && available.Contains(needed.High);
+        return (Premix.CrystalsFor((PremixLaw)law, available, wanted)?.Contains(x) ?? false) == covered;
+    });
+
+    [Fact]
+    public void Search_ForwardAndBackward_ForwardComesFirstThoughItsImageIsNearer()
+    {
+        var task = new PremixTask(FrequencyRange.FromMegahertz(10.100, 10.150), Megahertz("4.9152"), FrequencyRange.FromMegahertz(5.0, 5.5), Megahertz("10 20.3"));
+
+        var found = PremixSearch.Of(task).Found;
+
+        Assert.Equal([10, 20.3], found.Select(s => s.Crystal.Megahertz));
+        Assert.Equal([false, true], found.Select(s => s.DialRunsBackwards));
+        Assert.Equal(PremixSearch.Of(task with { Stock = Megahertz("20.3 10") }).Found, found);
+    }
+
+    [Theory]
+    [InlineData(8.9951, 1)]
+    [InlineData(8.9949, null)]
+    [InlineData(3.0016, 3)]
+    [InlineData(3.0017, null)]
+    [InlineData(1.5, null)]
+    public void CrystalHarmonics_WithinFiveKilohertz_AreHeardUpToTheFifth(double mhz, int? harmonic) =>
+        Assert.Equal(harmonic, CrystalHarmonics.Near(Frequency.FromMegahertz(9), Frequency.FromMegahertz(mhz)));
+
+    [Fact]
     public void CrystalsFor_OscillatorNarrowerThanTheBand_AreNone() =>
         Assert.Null(Premix.CrystalsFor(PremixLaw.CrystalPlusOscillator, FrequencyRange.FromMegahertz(5.0, 5.05), FrequencyRange.FromMegahertz(12.0, 12.1)));
 
@@ -113,6 +142,16 @@ public class PremixTests
         Assert.Equal([10.4, 18], found.Select(c => c.Crystal.Megahertz));
         Assert.Equal([false, true], found.Select(c => c.DialRunsBackwards));
     }
+
+    [Fact]
+    public void Converter_ForwardWithTheNearerImage_StillComesFirst() => Assert.Equal(
+        [3.61, 10.72],
+        ConverterSearch.Of(FrequencyRange.FromMegahertz(3.5, 3.6), FrequencyRange.FromMegahertz(7.0, 7.4), Megahertz("10.72 3.61")).Select(c => c.Crystal.Megahertz));
+
+    [Fact]
+    public void Converter_AnyScheme_IsTheConversionOfItsSide() => Gen.Select(Gen.Double[3, 25], Gen.Double[1, 40]).Sample((mhz, crystal) =>
+        ConverterSearch.Of(FrequencyRange.FromMegahertz(mhz, mhz + 0.1), FrequencyRange.FromMegahertz(0.1, 60), [Frequency.FromMegahertz(crystal)]).All(c =>
+            Math.Abs(new FrequencyScheme(c.Side, c.AtBandLow).OscillatorFor(Frequency.FromMegahertz(mhz))!.Value.Megahertz - crystal) < 1e-9));
 
     internal static IReadOnlyList<Frequency> Megahertz(string text) =>
         [.. text.Split(' ').Select(t => Frequency.FromMegahertz(double.Parse(t, CultureInfo.InvariantCulture)))];

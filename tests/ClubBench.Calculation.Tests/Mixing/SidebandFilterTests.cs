@@ -62,6 +62,7 @@ public class SidebandFilterTests
         var filter = SidebandFilter.Of(Six.Loss, carrier, Sideband.Lower, Audio, Balance);
 
         Assert.InRange(filter.PassBandDroop.Db, 2.5, 3.5);
+        Assert.Equal(Six.Loss(Frequency.FromHertz(carrier.Hertz + 300)).Db - Response.Loss.Db, filter.OppositeSideband.Db, 0.05);
         Assert.Equal(Six.Loss(carrier).Db + 30, filter.CarrierSuppression.Db + Response.Loss.Db, 0.05);
     }
 
