@@ -24,6 +24,9 @@ public static class ExternalNoise
     /// <summary>Source of the constants of a site category.</summary>
     public static SourceRef SourceOf(NoiseSite site) => LawOf(site).Source;
 
+    /// <summary>How far the noise of a site lies below its median in the quiet tenth of the hours and above it in the loud tenth.</summary>
+    public static (Decibels Below, Decibels Above) DecilesOf(NoiseSite site) => (LawOf(site).LowerDecile, LawOf(site).UpperDecile);
+
     /// <summary>Median man-made noise of a site in dB above kT0B. Throws outside 0.3 to 250 MHz and for an unknown site.</summary>
     public static Decibels ManMade(NoiseSite site, Frequency frequency) => LawOf(site).Median(Within(frequency));
 
@@ -69,7 +72,7 @@ public static class ExternalNoise
         _ => throw new ArgumentOutOfRangeException(nameof(site), site, "The site category must be stated."),
     };
 
-    private sealed record NoiseLaw(string Category, double InterceptDb, double SlopeDb, FrequencyRange StatedFor, Decibels LowerDecile, SourceRef Source)
+    private sealed record NoiseLaw(string Category, double InterceptDb, double SlopeDb, FrequencyRange StatedFor, Decibels LowerDecile, Decibels UpperDecile, SourceRef Source)
     {
         public Decibels Median(Frequency f) => Decibels.FromDb(InterceptDb - (SlopeDb * Math.Log10(f.Megahertz)));
 
@@ -79,6 +82,7 @@ public static class ExternalNoise
             r.Number("d_db_per_decade"),
             FrequencyRange.FromMegahertz(r.Number("f_min_mhz"), r.Number("f_max_mhz")),
             Decibels.FromDb(r.Number("lower_decile_db")),
+            Decibels.FromDb(r.Number("upper_decile_db")),
             r.Source());
     }
 }

@@ -8,6 +8,8 @@ public class ExternalNoiseTests
 {
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("external-noise-figures");
 
+    public static TheoryData<ReferenceRow> Deciles => ReferenceTable.Theory("noise-deciles");
+
     [Theory]
     [MemberData(nameof(Rows))]
     public void Noise_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
@@ -22,6 +24,16 @@ public class ExternalNoiseTests
         };
 
         Assert.Equal(row.Number("expected_db"), figure.Db, row.Number("tolerance_db"));
+    }
+
+    [Theory]
+    [MemberData(nameof(Deciles))]
+    public void Deciles_ReferenceRow_AreThoseOfTheRecommendation(ReferenceRow row)
+    {
+        var (below, above) = ExternalNoise.DecilesOf(Enum.Parse<NoiseSite>(row["site"]));
+
+        Assert.Equal(row.Number("below_db"), below.Db, row.Number("tolerance_db"));
+        Assert.Equal(row.Number("above_db"), above.Db, row.Number("tolerance_db"));
     }
 
     [Fact]
