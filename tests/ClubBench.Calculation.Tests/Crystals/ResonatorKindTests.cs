@@ -70,6 +70,17 @@ public class ResonatorKindTests
     public void Ceramic_SixtyKelvin_DriftsByItsTolerance() =>
         Assert.Equal(0.003 * 3.92e6, CeramicResonators.LargestDriftHertz(Ceramic.SeriesResonance, TemperatureRise.FromKelvin(60)), 1e-6);
 
+    [Fact]
+    public void Stability_EconomicalCrystalAt14Megahertz_MayBeNearlyAKilohertzOff()
+    {
+        var reach = CrystalStability.Economical.Reach(Frequency.FromMegahertz(14.06));
+
+        Assert.Equal(65, CrystalStability.Economical.WorstPpm);
+        Assert.Equal(2 * 913.9, reach.WidthHertz, 0.1);
+        Assert.Equal(14.06, reach.Middle.Megahertz, 1e-9);
+        Assert.Equal(0, new CrystalStability(0, 0, 0).Reach(Frequency.FromMegahertz(14.06)).WidthHertz);
+    }
+
     [Theory]
     [InlineData(17.0, 17.8, MeasurementAgreement.Good)]
     [InlineData(17.0, 18.5, MeasurementAgreement.Fair)]
