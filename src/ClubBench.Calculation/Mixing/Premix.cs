@@ -29,6 +29,19 @@ public static class Premix
     /// <summary>Whether the result falls as the tunable oscillator rises.</summary>
     public static bool RunsBackwards(PremixLaw law) => law == PremixLaw.CrystalMinusOscillator;
 
+    /// <summary>Drift of the result from that of crystal and tunable oscillator (Hz each, either sign): the band does not multiply it.</summary>
+    public static double DriftHertz(PremixLaw law, double crystalHertz, double oscillatorHertz)
+    {
+        var (x, v) = (Guard.Within(crystalHertz, -1e9, 1e9, nameof(crystalHertz)), Guard.Within(oscillatorHertz, -1e9, 1e9, nameof(oscillatorHertz)));
+        return law switch
+        {
+            PremixLaw.CrystalPlusOscillator => x + v,
+            PremixLaw.CrystalMinusOscillator => x - v,
+            PremixLaw.OscillatorMinusCrystal => v - x,
+            _ => throw new ArgumentOutOfRangeException(nameof(law), law, "The law must be stated."),
+        };
+    }
+
     /// <summary>Tunable oscillator that a crystal needs to give a range, or null when an end would be zero or negative.</summary>
     public static FrequencyRange? OscillatorFor(PremixLaw law, Frequency crystal, FrequencyRange wanted) => law switch
     {

@@ -105,6 +105,16 @@ public class PremixTests
         Assert.Equal(harmonic, CrystalHarmonics.Near(Frequency.FromMegahertz(9), Frequency.FromMegahertz(mhz)));
 
     [Fact]
+    public void DriftHertz_AnyLaw_IsWhatTheMixedFrequencyMovesBy() => Assert.All(Premix.Laws, law =>
+    {
+        double Needed(double crystalMhz) => Premix.OscillatorFor(law, Frequency.FromMegahertz(crystalMhz), FrequencyRange.FromMegahertz(4.0, 4.1))!.Value.Low.Hertz;
+
+        // Where crystal and oscillator move together so that the result stands still, the drift is none.
+        Assert.Equal(0, Premix.DriftHertz(law, 100, Needed(law == PremixLaw.CrystalPlusOscillator ? 1.0001 : 9.0001) - Needed(law == PremixLaw.CrystalPlusOscillator ? 1 : 9)), 1e-3);
+        Assert.Equal(40, Math.Abs(Premix.DriftHertz(law, 0, 40)));
+    });
+
+    [Fact]
     public void CrystalsFor_OscillatorNarrowerThanTheBand_AreNone() =>
         Assert.Null(Premix.CrystalsFor(PremixLaw.CrystalPlusOscillator, FrequencyRange.FromMegahertz(5.0, 5.05), FrequencyRange.FromMegahertz(12.0, 12.1)));
 
