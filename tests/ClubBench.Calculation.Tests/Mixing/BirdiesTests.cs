@@ -7,14 +7,23 @@ namespace ClubBench.Calculation.Tests.Mixing;
 
 public class BirdiesTests
 {
+    public static TheoryData<ReferenceRow> Free => ReferenceTable.Theory("birdie-free");
+
     public static TheoryData<ReferenceRow> Followed => ReferenceTable.Theory("birdies-followed");
 
     public static TheoryData<ReferenceRow> BirdieRows => ReferenceTable.Theory("birdies");
 
     [Theory]
-    [InlineData(InjectionSide.LowSide, 9, 14.0, 14.35)]
-    public void WithSignal_CleanScheme_FindsNone(InjectionSide side, double mid, double low, double high) =>
-        Assert.Empty(Find(side, mid, low, high));
+    [MemberData(nameof(Free))]
+    public void Birdies_ReferenceRowWithoutAny_AreNone(ReferenceRow row)
+    {
+        var (scheme, band) = (Scheme(Enum.Parse<InjectionSide>(row["side"]), row.Number("if_mhz")), Band(row.Number("low_mhz"), row.Number("high_mhz")));
+        var order = (int)row.Number("order");
+
+        var found = row["kind"] == "signal" ? Birdies.WithSignal(scheme, band, order) : Birdies.Internal(scheme, band, Frequency.FromMegahertz(row.Number("beat_mhz")), order);
+
+        Assert.DoesNotContain(found, b => b.IsInside);
+    }
 
     [Theory]
     [Evidence(typeof(Birdies), EvidenceKind.ClosedFormLimit)]
@@ -49,17 +58,8 @@ public class BirdiesTests
     });
 
     [Fact]
-    public void WithSignal_17MetresWith9Megahertz_HasNoneInside() =>
-        Assert.DoesNotContain(Find(InjectionSide.LowSide, 9, 18.068, 18.168), b => b.IsInside);
-
-    [Fact]
     public void WithSignal_KeptCrystalsOf80MetreSetOn40Metres_WhistlesAtTheEdge() =>
         Assert.Contains(Find(InjectionSide.LowSide, 5.9991, 7.0, 7.08), b => b.OscillatorOrder == 6 && b.OtherOrder == 0 && Math.Abs(b.Signal.Megahertz - 6.99895) < 1e-5);
-
-    [Fact]
-    public void Internal_CleanScheme_FindsNoneToOrder8() =>
-        Assert.DoesNotContain(
-            Birdies.Internal(Scheme(InjectionSide.HighSide, 4.9152), Band(14.0, 14.35), Frequency.FromMegahertz(4.9137), 8), b => b.IsInside);
 
     [Fact]
     public void WithSignal_DirectConversion_IsEmpty() =>

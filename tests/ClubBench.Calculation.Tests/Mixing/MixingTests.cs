@@ -8,6 +8,8 @@ public class MixingTests
 {
     public static TheoryData<ReferenceRow> Schemes => ReferenceTable.Theory("mixing");
 
+    public static TheoryData<ReferenceRow> Leakages => ReferenceTable.Theory("oscillator-leakage");
+
     public static TheoryData<ReferenceRow> Levels => ReferenceTable.Theory("oscillator-level");
 
     [Theory]
@@ -107,10 +109,20 @@ public class MixingTests
     public void Judge_RingWantingPlus7_HasAWindowOf3Decibels(double dbm, MixerDrive expected) =>
         Assert.Equal(expected, OscillatorLevel.Judge(PowerLevel.FromDbm(dbm), PowerLevel.FromDbm(7)));
 
-    [Fact]
+    [Theory]
     [Evidence(typeof(OscillatorLevel), EvidenceKind.ClosedFormLimit)]
-    public void AtAntenna_Plus7Less40_IsMinus33() =>
-        Assert.Equal(-33, OscillatorLevel.AtAntenna(PowerLevel.FromDbm(7), Decibels.FromDb(40), Decibels.Zero).Dbm, 1e-12);
+    [MemberData(nameof(Leakages))]
+    public void AtAntenna_ReferenceRow_GivesTheLevel(ReferenceRow row) => Assert.Equal(
+        row.Number("expected_dbm"),
+        OscillatorLevel.AtAntenna(
+            PowerLevel.FromDbm(row.Number("oscillator_dbm")), Decibels.FromDb(row.Number("isolation_db")), Decibels.FromDb(row.Number("other_loss_db"))).Dbm,
+        row.Number("tolerance_db"));
+
+    [Theory]
+    [InlineData(0)]
+    [InlineData(-3)]
+    public void AtAntenna_WithoutIsolation_Throws(double isolationDb) => Assert.Throws<ArgumentOutOfRangeException>(
+        () => OscillatorLevel.AtAntenna(PowerLevel.FromDbm(7), Decibels.FromDb(isolationDb), Decibels.Zero));
 
     [Fact]
     public void MixerFigures_EveryKind_HasOrderedTypicalFigures()
