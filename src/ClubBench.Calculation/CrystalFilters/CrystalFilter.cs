@@ -33,8 +33,12 @@ public sealed record CrystalFilter(ImmutableArray<CrystalMesh> Meshes, Immutable
         ? Couplings
         : throw new ArgumentException("A crystal filter has two crystals or more and a capacitor above zero between every two.", nameof(Couplings));
 
-    /// <summary>Mean of the frequencies the meshes are tuned to: where the pass-band begins to be looked for.</summary>
+    /// <summary>Mean of the frequencies the meshes are tuned to, C0 left out: the f0 of the design formulas.</summary>
     public Frequency Middle => Frequency.FromHertz(Enumerable.Range(0, Meshes.Length).Average(i => MeshFrequency(i).Hertz));
+
+    /// <summary>The same with C0 counted: where the pass-band begins to be looked for.</summary>
+    public Frequency LoadedMiddle => Frequency.FromHertz(
+        Enumerable.Range(0, Meshes.Length).Average(i => Meshes[i].Crystal.LoadedFrequency(Capacitance.FromFarad(1 / Elastance(i))).Hertz));
 
     /// <summary>The network between its ends at one frequency.</summary>
     public TwoPort At(Frequency f)
@@ -52,10 +56,7 @@ public sealed record CrystalFilter(ImmutableArray<CrystalMesh> Meshes, Immutable
     public Frequency MeshFrequency(int mesh)
     {
         var crystal = Meshes[mesh].Crystal;
-        var elastance = mesh > 0 ? 1 / Couplings[mesh - 1].Farad : 0;
-        if (mesh < Couplings.Length) elastance += 1 / Couplings[mesh].Farad;
-        if (Meshes[mesh].Series is { } series) elastance += 1 / series.Farad;
-        return crystal.SeriesResonance * Math.Sqrt(1 + (crystal.MotionalCapacitance.Farad * elastance));
+        return crystal.SeriesResonance * Math.Sqrt(1 + (crystal.MotionalCapacitance.Farad * Elastance(mesh)));
     }
 
     /// <summary>The same filter built from crystals of these series resonances, one per mesh in order; Cm stays, so Lm follows.</summary>
@@ -71,6 +72,9 @@ public sealed record CrystalFilter(ImmutableArray<CrystalMesh> Meshes, Immutable
         Couplings = [.. Couplings.Select(c => Nearest(c, series))],
         Meshes = [.. Meshes.Select(m => m with { Series = m.Series is { } c ? Nearest(c, series) : null })],
     };
+
+    private double Elastance(int mesh) =>
+        (mesh > 0 ? 1 / Couplings[mesh - 1].Farad : 0) + (mesh < Couplings.Length ? 1 / Couplings[mesh].Farad : 0) + (Meshes[mesh].Series is { } series ? 1 / series.Farad : 0);
 
     private static Capacitance Nearest(Capacitance c, ESeries series) => Capacitance.FromPicofarad(PreferredValues.Nearest(c.Picofarad, series));
 

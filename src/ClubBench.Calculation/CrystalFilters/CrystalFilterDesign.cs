@@ -1,4 +1,6 @@
+using ClubBench.Calculation.BandPass;
 using ClubBench.Calculation.Crystals;
+using ClubBench.Calculation.Oscillators;
 using ClubBench.Calculation.Quantities;
 
 namespace ClubBench.Calculation.CrystalFilters;
@@ -21,8 +23,11 @@ public enum CrystalFilterRefusal
     /// <summary>Wider than about a third of the distance from series to parallel resonance.</summary>
     TooWide,
 
-    /// <summary>No design bandwidth gives the wanted one once C0 and loss are in.</summary>
+    /// <summary>No design bandwidth gives the wanted one once C0 is in: wider couplings no longer widen the filter.</summary>
     NotReached,
+
+    /// <summary>Loss makes it wider than wanted whatever the couplings: take crystals of higher Q or of a lower frequency.</summary>
+    WidenedByLoss,
 }
 
 /// <summary>What is to be said with a crystal filter that works.</summary>
@@ -48,7 +53,7 @@ public enum CrystalFilterRemark
 /// <param name="Refusal">The reason.</param>
 /// <param name="Remarks">What is to be said with it.</param>
 /// <param name="DesignBandwidth">Bandwidth the formulas were given; wider than wanted when corrected.</param>
-/// <param name="WidestBandwidth">Widest that these crystals are accepted for.</param>
+/// <param name="WidestBandwidth">Widest that these crystals are accepted for; where the wanted one is not reached, the widest found.</param>
 /// <param name="EstimatedLoss">4.343 sum(g) f0/(BW Qu), good to 0.3 dB up to 6 dB; null where the crystals state no resistance.</param>
 public sealed record CrystalFilterDesign(
     CrystalFilter? Filter, CrystalFilterRefusal Refusal, IReadOnlyList<CrystalFilterRemark> Remarks, Frequency DesignBandwidth, Frequency WidestBandwidth, Decibels? EstimatedLoss)
@@ -56,7 +61,7 @@ public sealed record CrystalFilterDesign(
     private const double WidestShare = 0.35;
     private const double FormulaShare = 0.1;
     private const double UncorrectedShare = 0.05;
-    private const int MostCorrections = 60;
+    private const double Step = 1.2;
 
     /// <summary>Designs the filter by the formulas alone.</summary>
     public static CrystalFilterDesign Of(CrystalFilterTask task) => task.Bandwidth3dB.Hertz > WidestShare * task.SpacingHertz
@@ -64,23 +69,44 @@ public sealed record CrystalFilterDesign(
         : Result(task, CrystalFilterParts.For(task, task.Bandwidth3dB), CrystalFilterRefusal.None, task.Bandwidth3dB);
 
     /// <summary>
-    /// Designs the filter so that its analysed half-power bandwidth is the wanted one to 1e-6. Method: the design bandwidth scaled by wanted over
-    /// analysed until they agree.
+    /// Designs the filter so that its analysed half-power bandwidth is the wanted one to 1e-5. Method: steps of 1.2 in the design bandwidth from half the wanted
+    /// one, then halving. The analysed width saturates, with Butterworth at 0.3 of fp - fs for six crystals and 0.2 for eight: what lies beyond is
+    /// not reached, and the widest found is told.
     /// </summary>
     public static CrystalFilterDesign Corrected(CrystalFilterTask task)
     {
         if (Of(task) is { Refusal: not CrystalFilterRefusal.None } refused) return refused;
-        var design = task.Bandwidth3dB;
-        for (var i = 0; i < MostCorrections && design.Hertz < task.SpacingHertz; i++)
+        var (belowHz, widestHz) = (0.0, 0.0);
+        for (var designHz = 0.5 * task.Bandwidth3dB.Hertz; designHz < task.SpacingHertz; designHz *= Step)
         {
-            var filter = CrystalFilterParts.For(task, design);
-            if (CrystalFilterResponse.Of(filter, task.Bandwidth3dB) is not { } response) break;
-            var correction = task.Bandwidth3dB.Hertz / response.Width3dBHertz;
-            if (Math.Abs(correction - 1) < 1e-6) return Result(task, filter, CrystalFilterRefusal.None, design);
-            design *= correction;
+            var widthHz = AnalysedHertz(task, designHz);
+            widestHz = Math.Max(widestHz, widthHz);
+            if (widthHz >= task.Bandwidth3dB.Hertz) return Between(task, belowHz, designHz) ?? WidenedByLoss(task);
+            belowHz = designHz;
         }
 
-        return Result(task, null, CrystalFilterRefusal.NotReached, design);
+        return widestHz > 0
+            ? Result(task, null, CrystalFilterRefusal.NotReached, task.Bandwidth3dB) with { WidestBandwidth = Frequency.FromHertz(widestHz) }
+            : WidenedByLoss(task);
+    }
+
+    // Null where the width jumps past the wanted one: loss then sets it, not the couplings.
+    private static CrystalFilterDesign? Between(CrystalFilterTask task, double lowHz, double highHz)
+    {
+        var wantedHz = task.Bandwidth3dB.Hertz;
+        var designHz = Bisection.TurningPoint(hz => AnalysedHertz(task, hz) >= wantedHz, Math.Max(lowHz, 1e-3 * highHz), highHz, 1e-6 * highHz);
+        if (Math.Abs(AnalysedHertz(task, designHz) - wantedHz) > (1e-5 * wantedHz) + (4e-9 * task.Crystal.SeriesResonance.Hertz)) return null;
+        var design = Frequency.FromHertz(designHz);
+        return Result(task, CrystalFilterParts.For(task, design), CrystalFilterRefusal.None, design);
+    }
+
+    private static CrystalFilterDesign WidenedByLoss(CrystalFilterTask task) => Result(task, null, CrystalFilterRefusal.WidenedByLoss, task.Bandwidth3dB);
+
+    // Zero where no pass-band is found.
+    private static double AnalysedHertz(CrystalFilterTask task, double designHz)
+    {
+        var filter = CrystalFilterParts.For(task, Frequency.FromHertz(designHz));
+        return BandPassResponse.Of(filter.Loss, filter.LoadedMiddle, task.Bandwidth3dB)?.Band.WidthHertz ?? 0;
     }
 
     private static CrystalFilterDesign Result(CrystalFilterTask task, CrystalFilter? filter, CrystalFilterRefusal refusal, Frequency design) => new(

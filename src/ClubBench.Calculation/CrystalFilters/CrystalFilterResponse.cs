@@ -35,7 +35,7 @@ public sealed record CrystalFilterResponse(BandPassResponse PassBand, Decibels R
     /// <summary>Analyses a filter of about this bandwidth; null where no pass-band is found near its middle.</summary>
     public static CrystalFilterResponse? Of(CrystalFilter filter, Frequency bandwidth)
     {
-        if (BandPassResponse.Of(filter.Loss, filter.Middle, bandwidth) is not { } passBand) return null;
+        if (BandPassResponse.Of(filter.Loss, filter.LoadedMiddle, bandwidth) is not { } passBand) return null;
         var stepHz = bandwidth.Hertz / StepsPerBandwidth;
         return SkirtsAt(filter, passBand, Six, stepHz) is { } six
             ? new(passBand, RippleOf(filter, passBand), six, SkirtsAt(filter, passBand, Sixty, stepHz))

@@ -59,6 +59,49 @@ public class CrystalFilterDesignTests
         Assert.Equal(0.35 * spacing, design.WidestBandwidth.Hertz, 1e-6);
     }
 
+    [Theory]
+    [InlineData(2, 6300)]
+    [InlineData(4, 6300)]
+    [InlineData(8, 3900)]
+    public void Corrected_NearTheWidest_IsReached(int crystals, double hz)
+    {
+        var task = new CrystalFilterTask(CrystalFilterPrototype.Butterworth(crystals), Nine, Frequency.FromHertz(hz));
+
+        var design = CrystalFilterDesign.Corrected(task);
+
+        Assert.Equal(CrystalFilterRefusal.None, design.Refusal);
+        Assert.Equal(hz, CrystalFilterResponse.Of(design.Filter!, task.Bandwidth3dB)!.Width3dBHertz, 0.12);
+        Assert.True(design.DesignBandwidth > task.Bandwidth3dB);
+    }
+
+    [Fact]
+    public void Corrected_ManyCrystalsAtTheWidestPermitted_SaturateAndAreNotReached()
+    {
+        var task = new CrystalFilterTask(CrystalFilterPrototype.Butterworth(8), Nine, Frequency.FromHertz(6300));
+
+        Assert.Equal(CrystalFilterRefusal.None, CrystalFilterDesign.Of(task).Refusal);
+        var design = CrystalFilterDesign.Corrected(task);
+        Assert.Equal(CrystalFilterRefusal.NotReached, design.Refusal);
+        Assert.Null(design.Filter);
+        Assert.InRange(design.WidestBandwidth.Hertz, 3900, 4200);
+        Assert.Equal(CrystalFilterRefusal.None, CrystalFilterDesign.Corrected(task with { Bandwidth3dB = design.WidestBandwidth * 0.99 }).Refusal);
+    }
+
+    [Theory]
+    [InlineData(12, CrystalFilterRefusal.None)]
+    [InlineData(60, CrystalFilterRefusal.None)]
+    [InlineData(300, CrystalFilterRefusal.WidenedByLoss)]
+    [InlineData(2000, CrystalFilterRefusal.WidenedByLoss)]
+    public void Corrected_LossThatRoundsThePassBand_IsTheWidthOrRefused(double rm, CrystalFilterRefusal refusal)
+    {
+        var task = new CrystalFilterTask(CrystalFilterPrototype.EqualCapacitor(4), Nine with { MotionalResistance = Resistance.FromOhm(rm) }, Frequency.FromHertz(400));
+
+        var design = CrystalFilterDesign.Corrected(task);
+
+        Assert.Equal(refusal, design.Refusal);
+        if (design.Filter is { } filter) Assert.Equal(400, CrystalFilterResponse.Of(filter, task.Bandwidth3dB)!.Width3dBHertz, 0.05);
+    }
+
     [Fact]
     public void Corrected_TooWide_IsRefusedToo() =>
         Assert.Equal(CrystalFilterRefusal.TooWide, CrystalFilterDesign.Corrected(new(CrystalFilterPrototype.Butterworth(4), Nine, Frequency.FromHertz(7000))).Refusal);

@@ -53,6 +53,16 @@ public class CrystalFilterPrototypeTests
         Assert.Equal(1, prototype.EndQ * prototype.Couplings[0], 1e-12);
     }
 
+    [Theory]
+    [InlineData(5, false)]
+    [InlineData(6, true)]
+    public void EqualCapacitor_FromSixCrystalsOn_DipsBelowHalfThePowerInside(int order, bool dips)
+    {
+        var prototype = CrystalFilterPrototype.EqualCapacitor(order);
+
+        Assert.Equal(dips, Enumerable.Range(0, 990).Any(i => prototype.Loss(0.001 * i).Db > 3.0103));
+    }
+
     [Fact]
     public void EqualCapacitor_ManyCrystals_NarrowsTowardsHalfTheBandOfAnEndlessLadder() =>
         Assert.Equal(
