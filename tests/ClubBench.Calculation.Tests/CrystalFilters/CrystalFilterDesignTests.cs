@@ -14,6 +14,7 @@ public class CrystalFilterDesignTests
     public static TheoryData<ReferenceRow> Cases => ReferenceTable.Theory("crystal-filter-design");
 
     [Theory]
+    [Evidence(typeof(CrystalFilterDesign), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Cases))]
     public void Design_ReferenceRow_HasThePartsOfTheTable(ReferenceRow row)
     {
@@ -28,6 +29,7 @@ public class CrystalFilterDesignTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalFilterDesign), EvidenceKind.Identity)]
     public void Design_AnyTask_TunesEveryMeshAlike() => Gen.Select(Gen.Int[2, 12], Gen.Double[0.01, 1], Gen.Double[300, 2400]).Sample((n, ripple, hz) =>
     {
         var filter = CrystalFilterDesign.Of(new(CrystalFilterPrototype.Chebyshev(n, PassBandRipple.FromRipple(Decibels.FromDb(ripple))), Nine, Frequency.FromHertz(hz))).Filter!;
@@ -35,6 +37,7 @@ public class CrystalFilterDesignTests
     });
 
     [Fact]
+    [Evidence(typeof(CrystalFilterDesign), EvidenceKind.RoundTrip)]
     public void Corrected_AnalysedAgain_IsTheWidthWanted()
     {
         foreach (var hz in new[] { 500, 1200, 2400, 4000 })
@@ -60,6 +63,7 @@ public class CrystalFilterDesignTests
     }
 
     [Theory]
+    [Evidence(typeof(CrystalFilterDesign), EvidenceKind.RoundTrip)]
     [InlineData(2, 6300)]
     [InlineData(4, 6300)]
     [InlineData(8, 3900)]
@@ -129,6 +133,7 @@ public class CrystalFilterDesignTests
         Assert.Null(CrystalFilterDesign.Of(new(CrystalFilterPrototype.Butterworth(4), Nine with { MotionalResistance = default }, Frequency.FromHertz(500))).EstimatedLoss);
 
     [Theory]
+    [Evidence(typeof(CrystalFilterChoice), EvidenceKind.ClosedFormLimit)]
     [InlineData(500, true, false, CrystalFilterShape.EqualCapacitor)]
     [InlineData(2400, false, false, CrystalFilterShape.EqualCapacitor)]
     [InlineData(2400, true, false, CrystalFilterShape.Chebyshev)]

@@ -13,6 +13,7 @@ public class CrystalFilterPrototypeTests
     public static TheoryData<ReferenceRow> Cases => ReferenceTable.Theory("crystal-filter-prototype");
 
     [Theory]
+    [Evidence(typeof(CrystalFilterPrototype), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Cases))]
     public void Shape_PublishedCase_HasTheFiguresOfTheTable(ReferenceRow row)
     {
@@ -23,14 +24,17 @@ public class CrystalFilterPrototypeTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalFilterPrototype), EvidenceKind.Identity)]
     public void Loss_AtBothEdges_IsHalfThePower() => Any.Sample(p =>
         Math.Abs(p.Loss(1).Db - 3.0103) < 1e-4 && Math.Abs(p.Loss(-1).Db - 3.0103) < 1e-4);
 
     [Fact]
+    [Evidence(typeof(CrystalFilterPrototype), EvidenceKind.ClosedFormLimit)]
     public void Loss_Butterworth_IsTheClosedForm() => Gen.Select(Gen.Int[2, 12], Gen.Double[-3, 3]).Sample((n, w) =>
         Math.Abs(CrystalFilterPrototype.Butterworth(n).Loss(w).Db - (10 * Math.Log10(1 + Math.Pow(w * w, n)))) < 1e-6);
 
     [Fact]
+    [Evidence(typeof(CrystalFilterPrototype), EvidenceKind.IndependentRecomputation)]
     public void Loss_Chebyshev_IsTheClosedFormOfTheLowPass() => Gen.Select(Gen.Int[2, 12], Gen.Double[0.01, 3], Gen.Double[0, 3]).Sample((n, ripple, w) =>
     {
         var quality = PassBandRipple.FromRipple(Decibels.FromDb(ripple));

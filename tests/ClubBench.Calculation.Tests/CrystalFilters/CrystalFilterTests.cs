@@ -36,6 +36,8 @@ public class CrystalFilterTests
     }
 
     [Theory]
+    [Evidence(typeof(CrystalFilter), EvidenceKind.IndependentRecomputation)]
+    [Evidence(typeof(CrystalFilterResponse), EvidenceKind.IndependentRecomputation)]
     [MemberData(nameof(Nodal))]
     public void Response_NodalRow_IsThatOfTheNodeVoltages(ReferenceRow row)
     {
@@ -51,6 +53,7 @@ public class CrystalFilterTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalFilter), EvidenceKind.IndependentRecomputation)]
     public void Loss_AnyFilter_IsThatOfTheNodalEquations() =>
         Gen.Select(Gen.Int[2, 8], Gen.Double[0.05, 1], Gen.Double[300, 2400], Gen.Double[-2, 2], Gen.Double[-80, 80]).Sample((n, ripple, hz, place, off) =>
         {
@@ -62,10 +65,13 @@ public class CrystalFilterTests
         });
 
     [Fact]
+    [Evidence(typeof(CrystalFilter), EvidenceKind.Identity)]
     public void At_AnyFrequency_IsReciprocal() =>
         Assert.All(Enumerable.Range(-10, 21), i => Assert.Equal(0, (Four.At(Frequency.FromHertz(8_998_000 + (i * 400))).Determinant - Complex.One).Magnitude, 1e-6));
 
     [Fact]
+    [Evidence(typeof(CrystalFilter), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(CrystalFilterResponse), EvidenceKind.ClosedFormLimit)]
     public void Response_LosslessCrystalsWithoutStaticCapacitance_IsTheWidthDesigned()
     {
         var ideal = Nine with { MotionalResistance = default, StaticCapacitance = Capacitance.FromPicofarad(1e-3) };
@@ -99,6 +105,7 @@ public class CrystalFilterTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalFilter), EvidenceKind.Identity)]
     public void Response_TurnedAround_IsTheSame()
     {
         var turned = Four with { Meshes = [.. Four.Meshes.Reverse()], Couplings = [.. Four.Couplings.Reverse()] };

@@ -17,6 +17,7 @@ public class CrystalSpreadTests
     public static TheoryData<ReferenceRow> Drawers => ReferenceTable.Theory("filter-matching");
 
     [Fact]
+    [Evidence(typeof(CrystalSpread), EvidenceKind.ClosedFormLimit)]
     public void Of_EqualCrystals_CostsNothing()
     {
         var spread = CrystalSpread.Of(Four, Off(20, 20, 20, 20), Narrow)!;
@@ -50,6 +51,7 @@ public class CrystalSpreadTests
         Assert.Equal(CrystalSpreadTrial.Of(Four, Narrow, 100, 7, 20), CrystalSpreadTrial.Of(Four, Narrow, 100, 7, 20));
 
     [Fact]
+    [Evidence(typeof(CrystalSpreadTrial), EvidenceKind.IndependentRecomputation)]
     public void Trial_SameDrawsByHand_LeaveNineOutOfTenWithinEachFigure()
     {
         var trial = CrystalSpreadTrial.Of(Four, Narrow, 200, 3, 20)!;
@@ -63,6 +65,7 @@ public class CrystalSpreadTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalSpreadTrial), EvidenceKind.Identity)]
     public void Trial_WithinATenthOfTheBandwidth_CostsLittleAndBeyondItMuch()
     {
         var (none, matched, wild) = (Trial(0), Trial(FilterMatching.LimitFor(Narrow)), Trial(500));
@@ -76,6 +79,7 @@ public class CrystalSpreadTests
     }
 
     [Theory]
+    [Evidence(typeof(FilterMatching), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Drawers))]
     public void Matching_ReferenceRow_TakesTheTightestWithinTheLimit(ReferenceRow row)
     {

@@ -11,6 +11,7 @@ public class CrystalImpedanceTests
     private static readonly Gen<CrystalParameters> Any = Gen.Select(Gen.Double[3, 25], Gen.Double[5, 28], Gen.Double[3, 7], Gen.Double[5, 60]).Select(Quartz);
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.Identity)]
     public void ZeroPhaseResonance_AnyCrystal_IsWhereTheReactanceVanishes() => Any.Sample(crystal =>
     {
         var impedance = crystal.Impedance(crystal.ZeroPhaseResonance!.Value);
@@ -37,6 +38,7 @@ public class CrystalImpedanceTests
         Assert.Equal(20, FortyMetres.Impedance(FortyMetres.SeriesResonance).Magnitude, 0.01);
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.ClosedFormLimit)]
     public void Impedance_FarBelow_IsThatOfBothCapacitances() => Any.Sample(crystal =>
     {
         var f = Frequency.FromHertz(1000);
@@ -69,6 +71,7 @@ public class CrystalImpedanceTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalParameters), EvidenceKind.RoundTrip)]
     public void FromResonances_AnyCrystal_ComesBack() => Any.Sample(crystal =>
     {
         var back = CrystalParameters.FromResonances(crystal.SeriesResonance, crystal.ParallelResonance, crystal.MotionalCapacitance, crystal.MotionalResistance)!;

@@ -8,6 +8,7 @@ public class CrystalPoolTests
     private static readonly CrystalParameters[] Eleven = [.. Enumerable.Range(0, 11).Select(i => Board(7_030_000 + (10 * i), 15 + i))];
 
     [Fact]
+    [Evidence(typeof(CrystalPool), EvidenceKind.ClosedFormLimit)]
     public void Pool_ElevenBoards_HasTheirMedianAndOuterTenths()
     {
         var pool = CrystalPool.Of(Eleven);
@@ -29,6 +30,7 @@ public class CrystalPoolTests
     }
 
     [Fact]
+    [Evidence(typeof(CrystalPool), EvidenceKind.ClosedFormLimit)]
     public void Pool_EqualBoards_IsThatCrystal()
     {
         var pool = CrystalPool.Of([Eleven[3], Eleven[3], Eleven[3]]);

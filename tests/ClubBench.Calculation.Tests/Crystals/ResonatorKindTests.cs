@@ -13,6 +13,7 @@ public class ResonatorKindTests
     public static TheoryData<ReferenceRow> Plates => ReferenceTable.Theory("quartz-plate");
 
     [Theory]
+    [Evidence(typeof(QuartzPlate), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Plates))]
     public void Plate_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -24,6 +25,7 @@ public class ResonatorKindTests
     }
 
     [Fact]
+    [Evidence(typeof(QuartzPlate), EvidenceKind.Identity)]
     public void Plate_TwiceTheFrequency_HasHalfTheThicknessAndTwiceTheCapacitance()
     {
         var doubled = Plate with { Fundamental = Frequency.FromMegahertz(20) };
@@ -67,10 +69,12 @@ public class ResonatorKindTests
         Assert.InRange(Ceramic.ParallelResonance / Ceramic.SeriesResonance, 1.05, 1.10);
 
     [Fact]
+    [Evidence(typeof(CeramicResonators), EvidenceKind.ClosedFormLimit)]
     public void Ceramic_SixtyKelvin_DriftsByItsTolerance() =>
         Assert.Equal(0.003 * 3.92e6, CeramicResonators.LargestDriftHertz(Ceramic.SeriesResonance, TemperatureRise.FromKelvin(60)), 1e-6);
 
     [Fact]
+    [Evidence(typeof(CrystalStability), EvidenceKind.ClosedFormLimit)]
     public void Stability_EconomicalCrystalAt14Megahertz_MayBeNearlyAKilohertzOff()
     {
         var reach = CrystalStability.Economical.Reach(Frequency.FromMegahertz(14.06));
@@ -82,6 +86,7 @@ public class ResonatorKindTests
     }
 
     [Theory]
+    [Evidence(typeof(MeasurementComparison), EvidenceKind.ClosedFormLimit)]
     [InlineData(17.0, 17.8, MeasurementAgreement.Good)]
     [InlineData(17.0, 18.5, MeasurementAgreement.Fair)]
     [InlineData(17.0, 19.0, MeasurementAgreement.SuspectFixture)]

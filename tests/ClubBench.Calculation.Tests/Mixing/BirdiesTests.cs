@@ -39,6 +39,7 @@ public class BirdiesTests
     }
 
     [Theory]
+    [Evidence(typeof(Birdies), EvidenceKind.IndependentRecomputation)]
     [MemberData(nameof(Followed))]
     public void WithSignal_ProductsFollowedAcrossTheBand_AreAllFoundAndNoOthers(ReferenceRow row)
     {
@@ -50,6 +51,7 @@ public class BirdiesTests
     }
 
     [Fact]
+    [Evidence(typeof(Birdies), EvidenceKind.Identity)]
     public void WithSignal_AnyScheme_CrossesWhereTheProductIsTheIntermediate() => Gen.Select(Gen.Double[3, 29], Gen.Double[0.455, 11], Gen.Int[2, 4]).Sample((low, mid, side) =>
     {
         var scheme = Scheme((InjectionSide)side, mid);

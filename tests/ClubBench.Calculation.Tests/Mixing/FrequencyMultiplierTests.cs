@@ -11,6 +11,7 @@ public class FrequencyMultiplierTests
     public static TheoryData<ReferenceRow> Losses => ReferenceTable.Theory("ring-mixer-loss");
 
     [Theory]
+    [Evidence(typeof(FrequencyMultiplier), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
     public void Multiplier_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -27,6 +28,7 @@ public class FrequencyMultiplierTests
     }
 
     [Theory]
+    [Evidence(typeof(FrequencyMultiplier), EvidenceKind.IndependentRecomputation)]
     [InlineData(2, 120)]
     [InlineData(3, 80)]
     [InlineData(4, 60)]
@@ -40,6 +42,7 @@ public class FrequencyMultiplierTests
     }
 
     [Fact]
+    [Evidence(typeof(FrequencyMultiplier), EvidenceKind.IndependentRecomputation)]
     public void OutputCurrent_Pulses_IsTheFourierIntegral()
     {
         // Sampled top of a sine, summed: no closed form.
@@ -71,11 +74,13 @@ public class FrequencyMultiplierTests
         Assert.Throws<ArgumentOutOfRangeException>(() => new FrequencyMultiplier(multiple, ConductionAngle.FromDegrees(120), 10));
 
     [Theory]
+    [Evidence(typeof(RingMixerLoss), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Losses))]
     public void RingLoss_ReferenceRow_IsThatOfTheTable(ReferenceRow row) =>
         Assert.Equal(row.Number("expected_db"), RingMixerLoss.At(PowerLevel.FromDbm(row.Number("drive_dbm")))!.Value.Db, row.Number("tolerance_db"));
 
     [Fact]
+    [Evidence(typeof(RingMixerLoss), EvidenceKind.Identity)]
     public void RingLoss_MoreDrive_NeverLosesMore()
     {
         var losses = Enumerable.Range(0, 121).Select(i => RingMixerLoss.At(PowerLevel.FromDbm(-2 + (0.1 * i)))!.Value.Db).ToList();

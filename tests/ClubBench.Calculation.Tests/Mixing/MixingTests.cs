@@ -133,6 +133,7 @@ public class MixingTests
     }
 
     [Fact]
+    [Evidence(typeof(MixerFigures), EvidenceKind.Identity)]
     public void MixerFigures_DiodeMixers_HaveTheNoiseFigureOfTheirLoss() =>
         Assert.All(new[] { MixerKind.DiodeRingLevel7, MixerKind.SingleBalancedDiodes }.Select(k => MixerFigures.All[k]), m =>
         {

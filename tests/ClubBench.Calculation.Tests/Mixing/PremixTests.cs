@@ -17,6 +17,7 @@ public class PremixTests
     public static TheoryData<ReferenceRow> Converters => ReferenceTable.Theory("converter");
 
     [Theory]
+    [Evidence(typeof(PremixSearch), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Schemes))]
     public void Search_ReferenceRow_FindsTheSchemeAtItsPlace(ReferenceRow row)
     {
@@ -33,6 +34,7 @@ public class PremixTests
     }
 
     [Theory]
+    [Evidence(typeof(PremixSearch), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Windows))]
     public void Search_NoCrystalDoes_NamesThoseThatWould(ReferenceRow row)
     {
@@ -69,6 +71,7 @@ public class PremixTests
     }
 
     [Fact]
+    [Evidence(typeof(PremixSearch), EvidenceKind.RoundTrip)]
     public void Search_AnyScheme_MixesBackToTheSignal() => Gen.Select(Gen.Double[3.5, 28], Gen.Double[2, 30], Gen.Double[0.455, 11]).Sample((mhz, crystal, mid) =>
     {
         var task = new PremixTask(FrequencyRange.FromMegahertz(mhz, mhz + 0.05), [Frequency.FromMegahertz(mid)], FrequencyRange.FromMegahertz(1, 20), [Frequency.FromMegahertz(crystal)]);
@@ -76,6 +79,7 @@ public class PremixTests
     });
 
     [Fact]
+    [Evidence(typeof(Premix), EvidenceKind.Identity)]
     public void CrystalsFor_AnyLaw_HoldExactlyThoseTheOscillatorCovers() => Gen.Select(Gen.Int[1, 3], Gen.Double[0.1, 40], Gen.Double[1, 12], Gen.Double[0.1, 2]).Sample((law, crystal, low, width) =>
     {
         var (available, wanted, x) = (FrequencyRange.FromMegahertz(low, low + width), FrequencyRange.FromMegahertz(12.0, 12.1), Frequency.FromMegahertz(crystal));
@@ -96,6 +100,7 @@ public class PremixTests
     }
 
     [Theory]
+    [Evidence(typeof(CrystalHarmonics), EvidenceKind.ClosedFormLimit)]
     [InlineData(8.9951, 1)]
     [InlineData(8.9949, null)]
     [InlineData(3.0016, 3)]
@@ -105,6 +110,7 @@ public class PremixTests
         Assert.Equal(harmonic, CrystalHarmonics.Near(Frequency.FromMegahertz(9), Frequency.FromMegahertz(mhz)));
 
     [Fact]
+    [Evidence(typeof(Premix), EvidenceKind.Identity)]
     public void DriftHertz_AnyLaw_IsWhatTheMixedFrequencyMovesBy() => Assert.All(Premix.Laws, law =>
     {
         double Needed(double crystalMhz) => Premix.OscillatorFor(law, Frequency.FromMegahertz(crystalMhz), FrequencyRange.FromMegahertz(4.0, 4.1))!.Value.Low.Hertz;
@@ -115,6 +121,7 @@ public class PremixTests
     });
 
     [Fact]
+    [Evidence(typeof(Premix), EvidenceKind.ClosedFormLimit)]
     public void CrystalsFor_OscillatorNarrowerThanTheBand_AreNone() =>
         Assert.Null(Premix.CrystalsFor(PremixLaw.CrystalPlusOscillator, FrequencyRange.FromMegahertz(5.0, 5.05), FrequencyRange.FromMegahertz(12.0, 12.1)));
 
@@ -123,6 +130,7 @@ public class PremixTests
         Assert.Throws<ArgumentOutOfRangeException>(() => Premix.OscillatorFor(PremixLaw.Unknown, Frequency.FromMegahertz(9), FrequencyRange.FromMegahertz(12.0, 12.1)));
 
     [Theory]
+    [Evidence(typeof(ConverterSearch), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Converters))]
     public void Converter_ReferenceRow_IsTheOnlyOne(ReferenceRow row)
     {
@@ -159,6 +167,7 @@ public class PremixTests
         ConverterSearch.Of(FrequencyRange.FromMegahertz(3.5, 3.6), FrequencyRange.FromMegahertz(7.0, 7.4), Megahertz("10.72 3.61")).Select(c => c.Crystal.Megahertz));
 
     [Fact]
+    [Evidence(typeof(ConverterSearch), EvidenceKind.RoundTrip)]
     public void Converter_AnyScheme_IsTheConversionOfItsSide() => Gen.Select(Gen.Double[3, 25], Gen.Double[1, 40]).Sample((mhz, crystal) =>
         ConverterSearch.Of(FrequencyRange.FromMegahertz(mhz, mhz + 0.1), FrequencyRange.FromMegahertz(0.1, 60), [Frequency.FromMegahertz(crystal)]).All(c =>
             Math.Abs(new FrequencyScheme(c.Side, c.AtBandLow).OscillatorFor(Frequency.FromMegahertz(mhz))!.Value.Megahertz - crystal) < 1e-9));

@@ -18,6 +18,7 @@ public class SchemeSurveyTests
     }
 
     [Theory]
+    [Evidence(typeof(SchemeSurvey), EvidenceKind.ClosedFormLimit)]
     [InlineData(21.0, 21.45, 10.7, InjectionSide.LowSide, SchemeVerdict.Refused)]
     [InlineData(18.068, 18.168, 9, InjectionSide.LowSide, SchemeVerdict.Blemished)]
     [InlineData(3.5, 3.8, 9, InjectionSide.SumToIntermediate, SchemeVerdict.Blemished)]
@@ -37,6 +38,7 @@ public class SchemeSurveyTests
     }
 
     [Fact]
+    [Evidence(typeof(StockProducts), EvidenceKind.ClosedFormLimit)]
     public void StockProducts_20Metres_AreTheMultiplesSumsAndDifferencesThatLandThere()
     {
         var found = StockProducts.In(FrequencyRange.FromMegahertz(14.0, 14.35), PremixTests.Megahertz("3.58 4 7.03 10 18"), 4);

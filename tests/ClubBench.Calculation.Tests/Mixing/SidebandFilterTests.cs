@@ -20,6 +20,7 @@ public class SidebandFilterTests
     private static readonly CrystalFilterResponse Response = CrystalFilterResponse.Of(Six, Width)!;
 
     [Fact]
+    [Evidence(typeof(SidebandFilter), EvidenceKind.ClosedFormLimit)]
     public void Of_BrickWall_GivesItsDepthAndNoDroop()
     {
         static Decibels Loss(Frequency f) => Decibels.FromDb(f.Hertz is >= 9_000_250 and <= 9_002_750 ? 2 : 62);
@@ -32,6 +33,7 @@ public class SidebandFilterTests
     }
 
     [Theory]
+    [Evidence(typeof(SidebandFilter), EvidenceKind.RoundTrip)]
     [InlineData(Sideband.Upper)]
     [InlineData(Sideband.Lower)]
     public void Nearest_SixCrystals_SufficesAndTenHertzNearerDoesNot(Sideband side)
@@ -75,6 +77,7 @@ public class SidebandFilterTests
         Assert.Throws<ArgumentOutOfRangeException>(() => SidebandFilter.Of(Six.Loss, Response.Center, Sideband.Unknown, Audio, Balance));
 
     [Theory]
+    [Evidence(typeof(SuppressionReading), EvidenceKind.RoundTrip)]
     [InlineData(SuppressionSignal.SingleSidebandOneTone)]
     [InlineData(SuppressionSignal.SingleSidebandTwoTone)]
     [InlineData(SuppressionSignal.DoubleSideband)]
@@ -82,6 +85,7 @@ public class SidebandFilterTests
         Assert.Equal(43, SuppressionReading.BelowOneLine(SuppressionReading.BelowPeakEnvelope(Decibels.FromDb(43), signal), signal).Db, 1e-12);
 
     [Fact]
+    [Evidence(typeof(SuppressionReading), EvidenceKind.Identity)]
     public void SuppressionReading_DoubleSideband_AgreesWithThePowers() => Assert.Equal(
         10 * Math.Log10(Power.FromWatt(5).Watt / Sidebands.OneOfTwoSidebands(Power.FromWatt(5)).Watt),
         SuppressionReading.BelowPeakEnvelope(Decibels.Zero, SuppressionSignal.DoubleSideband).Db,

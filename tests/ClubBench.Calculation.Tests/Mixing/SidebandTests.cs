@@ -9,6 +9,7 @@ public class SidebandTests
 
     [Theory]
     [Evidence(typeof(Sidebands), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(SuppressionReading), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(SidebandRows))]
     public void Sidebands_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {

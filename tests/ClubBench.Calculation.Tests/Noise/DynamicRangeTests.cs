@@ -12,6 +12,7 @@ public class DynamicRangeTests
     public static TheoryData<ReferenceRow> Powers => ReferenceTable.Theory("noise-power");
 
     [Theory]
+    [Evidence(typeof(DynamicRange), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Ranges))]
     public void Range_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -49,6 +50,7 @@ public class DynamicRangeTests
     }
 
     [Fact]
+    [Evidence(typeof(DynamicRange), EvidenceKind.Identity)]
     public void Intermodulation_TwoSignalsAtItsTop_MakeAProductAsStrongAsTheNoise()
     {
         var range = DynamicRange.Of(Ring, 500);
@@ -59,10 +61,12 @@ public class DynamicRangeTests
     }
 
     [Fact]
+    [Evidence(typeof(DynamicRange), EvidenceKind.Identity)]
     public void Range_TenTimesTheBandwidth_CostsTwoThirdsOfTenDecibels() =>
         Assert.Equal(20.0 / 3, DynamicRange.Of(Ring, 500).Intermodulation!.Value.Db - DynamicRange.Of(Ring, 5000).Intermodulation!.Value.Db, 1e-9);
 
     [Fact]
+    [Evidence(typeof(DynamicRange), EvidenceKind.ClosedFormLimit)]
     public void CompressionFromIntercept_CubicCurve_LosesADecibel()
     {
         // y = x (1 - (3/4) a x^2) for the fundamental; the intercept is where both lines meet.
@@ -73,6 +77,7 @@ public class DynamicRangeTests
     }
 
     [Theory]
+    [Evidence(typeof(AntennaEfficiency), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Powers))]
     public void NoisePower_ReferenceRow_IsThatOfTheSite(ReferenceRow row)
     {
@@ -96,6 +101,7 @@ public class DynamicRangeTests
     }
 
     [Fact]
+    [Evidence(typeof(AntennaEfficiency), EvidenceKind.ClosedFormLimit)]
     public void AntennaLoss_NoLossResistance_IsNone() => Assert.Equal(0, AntennaEfficiency.Loss(Resistance.FromOhm(36), default).Db, 1e-12);
 
     [Fact]

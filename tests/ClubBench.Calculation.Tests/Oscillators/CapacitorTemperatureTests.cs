@@ -25,6 +25,7 @@ public class CapacitorTemperatureTests
     }
 
     [Fact]
+    [Evidence(typeof(CapacitorTemperature), EvidenceKind.ClosedFormLimit)]
     public void Compensating_CoilOf95_NeedsTheSharesOfTheBudget()
     {
         var types = CapacitorTemperature.Compensating(95, 0);
@@ -36,6 +37,7 @@ public class CapacitorTemperatureTests
     }
 
     [Fact]
+    [Evidence(typeof(CapacitorTemperature), EvidenceKind.RoundTrip)]
     public void Compensating_AnyType_LeavesNoDriftAtItsShare() => Assert.All(
         CapacitorTemperature.Compensating(120, 30),
         t => Assert.Equal(0, TemperatureBudget.PpmPerKelvin(120, [new(PulledCrystals.Pf(100 * t.Share), t.Type.PpmPerKelvin.Usual), new(PulledCrystals.Pf(100 * (1 - t.Share)), 30)]), 1e-9));

@@ -60,6 +60,7 @@ public class CrystalFitTests
     }
 
     [Fact]
+    [Evidence(typeof(FittedCrystal), EvidenceKind.ClosedFormLimit)]
     public void SuspectReadings_OneFarOff_IsNamedAndSoundReadingsAreNot()
     {
         var sound = Fit(ReferenceTable.Read("crystal-fit").First());

@@ -13,6 +13,7 @@ public class OvertoneOscillatorTests
     private static readonly FeedbackPair Pair = new(Pf(47), Pf(68));
 
     [Theory]
+    [Evidence(typeof(OvertoneOscillator), EvidenceKind.RoundTrip)]
     [InlineData(3)]
     [InlineData(5)]
     public void For_Overtone_RunsThereAndOnNoLowerMode(int overtone)
@@ -29,12 +30,14 @@ public class OvertoneOscillatorTests
         9, Pair.NegativeResistance(Gm, Ten / 3) / Pair.NegativeResistance(Gm, Ten), 1e-9);
 
     [Fact]
+    [Evidence(typeof(OvertoneOscillator), EvidenceKind.ClosedFormLimit)]
     public void NegativeResistance_FarAboveTheTrap_IsThatOfThePair() => Assert.Equal(
         1,
         OvertoneOscillator.For(Pair, Ten, 3).NegativeResistance(Gm, Ten * 100)!.Value / Pair.NegativeResistance(Gm, Ten * 100),
         1e-4);
 
     [Fact]
+    [Evidence(typeof(OvertoneOscillator), EvidenceKind.IndependentRecomputation)]
     public void NegativeResistance_AnyFrequency_IsTheRealPartOfTheInputImpedance() => Gen.Double[0.2, 5].Sample(ratio =>
     {
         var oscillator = OvertoneOscillator.For(Pair, Ten, 3);

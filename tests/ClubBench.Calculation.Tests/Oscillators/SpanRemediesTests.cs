@@ -9,6 +9,7 @@ public class SpanRemediesTests
     private static readonly PulledCrystalLoop Forty = Plain(7.03, 18, 4.5, 0) with { HolderCapacitance = Pf(1) };
 
     [Fact]
+    [Evidence(typeof(SpanRemedies), EvidenceKind.ClosedFormLimit)]
     public void Of_SpanWithinWhatIsSafe_AreNone() => Assert.Empty(SpanRemedies.Of(Forty, 12_900));
 
     [Fact]
@@ -17,6 +18,7 @@ public class SpanRemediesTests
         SpanRemedies.Of(Forty, 14_000).Select(r => r.Kind));
 
     [Fact]
+    [Evidence(typeof(SpanRemedies), EvidenceKind.RoundTrip)]
     public void Of_AnyRemedyApplied_GivesTheSpanWithTheCrystalInControl() => Assert.All(SpanRemedies.Of(Forty, 14_000), r =>
     {
         var range = r.Loop.Range();

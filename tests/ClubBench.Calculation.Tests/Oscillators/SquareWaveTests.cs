@@ -9,6 +9,7 @@ public class SquareWaveTests
     public static TheoryData<ReferenceRow> Rows => ReferenceTable.Theory("square-wave");
 
     [Theory]
+    [Evidence(typeof(SquareWave), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
     public void Level_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
     {
@@ -19,6 +20,7 @@ public class SquareWaveTests
     }
 
     [Fact]
+    [Evidence(typeof(SquareWave), EvidenceKind.Identity)]
     public void Level_AnyDutyCycle_IsThatOfItsComplement() => Gen.Select(Gen.Int[1, 20], Gen.Double[0.02, 0.98]).Sample((n, d) =>
         Math.Abs((SquareWave.Level(n, d)?.AmplitudeRatio ?? 0) - (SquareWave.Level(n, 1 - d)?.AmplitudeRatio ?? 0)) < 1e-9);
 
@@ -26,6 +28,7 @@ public class SquareWaveTests
     public void Level_NarrowPulses_FallOnlyWithTheOrderOfTheirWidth() => Assert.Equal(0, SquareWave.Level(3, 0.01)!.Value.Db, 0.02);
 
     [Fact]
+    [Evidence(typeof(SquareWave), EvidenceKind.IndependentRecomputation)]
     public void Level_SummedRectangle_IsThatOfTheSeries()
     {
         const int Samples = 100_000;
