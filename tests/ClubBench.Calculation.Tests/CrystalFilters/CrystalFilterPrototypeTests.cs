@@ -15,7 +15,7 @@ public class CrystalFilterPrototypeTests
     [Theory]
     [Evidence(typeof(CrystalFilterPrototype), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Cases))]
-    public void Shape_PublishedCase_HasTheFiguresOfTheTable(ReferenceRow row)
+    public void Shape_ReferenceRow_HasTheFiguresOfTheTable(ReferenceRow row)
     {
         var prototype = CrystalFilterRows.Prototype(row);
 
