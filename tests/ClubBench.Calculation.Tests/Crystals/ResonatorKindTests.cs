@@ -15,7 +15,7 @@ public class ResonatorKindTests
     [Theory]
     [Evidence(typeof(QuartzPlate), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Plates))]
-    public void Plate_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void Plate_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var plate = new QuartzPlate(Frequency.FromMegahertz(row.Number("fundamental_mhz")), Length.FromMillimetre(row.Number("electrode_mm")));
 
