@@ -13,7 +13,7 @@ public class FrequencyMultiplierTests
     [Theory]
     [Evidence(typeof(FrequencyMultiplier), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
-    public void Multiplier_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void Multiplier_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var multiplier = new FrequencyMultiplier((int)row.Number("multiple"), ConductionAngle.FromDegrees(row.Number("degrees")), row.Number("loaded_q"));
 

@@ -35,6 +35,7 @@ public class PremixTests
 
     [Theory]
     [Evidence(typeof(PremixSearch), EvidenceKind.ClosedFormLimit)]
+    [Evidence(typeof(Premix), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Windows))]
     public void Search_NoCrystalDoes_NamesThoseThatWould(ReferenceRow row)
     {

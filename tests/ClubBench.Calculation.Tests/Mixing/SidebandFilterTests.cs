@@ -68,6 +68,23 @@ public class SidebandFilterTests
         Assert.Equal(Six.Loss(carrier).Db + 30, filter.CarrierSuppression.Db + Response.Loss.Db, 0.05);
     }
 
+    [Theory]
+    [Evidence(typeof(SidebandFilter), EvidenceKind.Identity)]
+    [InlineData(8_996_500)]
+    [InlineData(8_997_500)]
+    [InlineData(9_000_500)]
+    public void Of_FilterMirroredAndTheOtherSideband_IsTheSame(double carrierHz)
+    {
+        Decibels Mirrored(Frequency f) => Six.Loss(Frequency.FromHertz(18_000_000 - f.Hertz));
+
+        var straight = SidebandFilter.Of(Six.Loss, Frequency.FromHertz(carrierHz), Sideband.Upper, Audio, Balance);
+        var mirrored = SidebandFilter.Of(Mirrored, Frequency.FromHertz(18_000_000 - carrierHz), Sideband.Lower, Audio, Balance);
+
+        Assert.Equal(straight.CarrierSuppression.Db, mirrored.CarrierSuppression.Db, 1e-6);
+        Assert.Equal(straight.OppositeSideband.Db, mirrored.OppositeSideband.Db, 1e-6);
+        Assert.Equal(straight.PassBandDroop.Db, mirrored.PassBandDroop.Db, 1e-6);
+    }
+
     [Fact]
     public void Nearest_FilterThatIsNone_IsNotFound() =>
         Assert.Null(SidebandFilter.Nearest(_ => Decibels.FromDb(1), Response.PassBand.Band, Sideband.Upper, Audio, Balance));
