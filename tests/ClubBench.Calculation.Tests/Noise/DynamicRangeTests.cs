@@ -14,7 +14,7 @@ public class DynamicRangeTests
     [Theory]
     [Evidence(typeof(DynamicRange), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Ranges))]
-    public void Range_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void Range_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var range = DynamicRange.Of(
             [.. row["chain"].Split(' ').Select(CascadeTests.Stage)],

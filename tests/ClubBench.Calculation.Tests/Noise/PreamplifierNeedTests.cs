@@ -57,7 +57,7 @@ public class PreamplifierNeedTests
 
     [Theory]
     [MemberData(nameof(GainRows))]
-    public void Preamplifier_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void Preamplifier_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var figure = Figure(row)?.Db;
 

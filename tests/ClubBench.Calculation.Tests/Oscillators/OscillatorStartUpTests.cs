@@ -37,7 +37,7 @@ public class OscillatorStartUpTests
 
     [Theory]
     [MemberData(nameof(Pairs))]
-    public void FeedbackPair_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void FeedbackPair_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var (gm, f) = (row.Number("gm_ms") * 1e-3, Frequency.FromMegahertz(row.Number("f_mhz")));
 

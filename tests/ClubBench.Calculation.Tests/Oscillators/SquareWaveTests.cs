@@ -11,7 +11,7 @@ public class SquareWaveTests
     [Theory]
     [Evidence(typeof(SquareWave), EvidenceKind.ClosedFormLimit)]
     [MemberData(nameof(Rows))]
-    public void Level_ReferenceRow_GivesThePrintedFigure(ReferenceRow row)
+    public void Level_ReferenceRow_GivesItsFigure(ReferenceRow row)
     {
         var level = SquareWave.Level((int)row.Number("harmonic"), row.Number("duty_cycle"));
 
