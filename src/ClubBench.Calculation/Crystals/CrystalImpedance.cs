@@ -17,7 +17,7 @@ public sealed partial record CrystalParameters
 
     /// <summary>
     /// Frequency at which the crystal is a pure resistance near series resonance: what a pi-network in phase measures, fs/(2 Q M) above fs to first
-    /// order. Null where the crystal states no resistance or is nowhere inductive. Method: exact zero of the reactance, C0 taken at the result.
+    /// order. Null where the crystal states no resistance, is nowhere inductive, or is so lossy that there is none below fp. Method: exact zero of the reactance, C0 taken at the result.
     /// </summary>
     public Frequency? ZeroPhaseResonance
     {
@@ -31,7 +31,7 @@ public sealed partial record CrystalParameters
                 zero = AtMotionalReactance(2 * b * r * r / (1 + Math.Sqrt(Math.Max(0, 1 - (4 * b * b * r * r)))));
             }
 
-            return zero;
+            return zero <= ParallelResonance ? zero : null;
         }
     }
 
@@ -65,7 +65,8 @@ public sealed partial record CrystalParameters
 
     private Frequency AtMotionalReactance(double ohm)
     {
-        var (half, ws) = (0.5 * ohm / MotionalInductance.Henry, SeriesResonance.RadiansPerSecond);
-        return Frequency.FromHertz((half + Math.Sqrt((half * half) + (ws * ws))) / (2 * Math.PI));
+        // As a shift, so that the smallest one is not lost in the rounding of the whole frequency.
+        var (half, fs) = (ohm / (4 * Math.PI * MotionalInductance.Henry), SeriesResonance.Hertz);
+        return Frequency.FromHertz(fs + half + (half * half / (Math.Sqrt((half * half) + (fs * fs)) + fs)));
     }
 }
