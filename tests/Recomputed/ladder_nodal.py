@@ -54,7 +54,8 @@ def solve(matrix, right):
     return [rows[i][n] / rows[i][i] for i in range(n)]
 
 
-def response(elements, frequency_hz, rs, rl):
+def node_voltages(elements, frequency_hz, rs, rl, emf=1):
+    """Returns (arms, voltage of every node) for a source of this electromotive force behind its resistance."""
     w = 2 * math.pi * frequency_hz
     arms = [arm(e, w) for e in elements]
     size = 1 + sum(1 for series, _ in arms if series)
@@ -69,7 +70,11 @@ def response(elements, frequency_hz, rs, rl):
             y[node][node] += admittance
     y[0][0] += 1 / rs
     y[size - 1][size - 1] += 1 / rl
-    v = solve(y, [1 / rs + 0j] + [0j] * (size - 1))
+    return arms, solve(y, [emf / rs + 0j] + [0j] * (size - 1))
+
+
+def response(elements, frequency_hz, rs, rl):
+    _, v = node_voltages(elements, frequency_hz, rs, rl)
     return 2 * v[-1] * cmath.sqrt(rs / rl), 2 * v[0] - 1
 
 

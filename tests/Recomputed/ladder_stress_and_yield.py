@@ -4,7 +4,7 @@ import cmath
 import math
 import random
 
-from ladder_nodal import arm, solve
+from ladder_nodal import node_voltages, solve
 
 C, L, MIDDLE = 387.23e-12, 1.36503e-6, 717.46e-12
 
@@ -12,24 +12,6 @@ C, L, MIDDLE = 387.23e-12, 1.36503e-6, 717.46e-12
 def filter_arms(factors=(1, 1, 1, 1, 1), coil_q=150, capacitor_q=1000):
     values = [v * x for v, x in zip((C, L, MIDDLE, L, C), factors)]
     return [f"{'L' if k % 2 else 'C'}:{v}:{coil_q if k % 2 else capacitor_q}" for k, v in enumerate(values)]
-
-
-def node_voltages(elements, frequency_hz, source_ohm, load_ohm, emf):
-    w = 2 * math.pi * frequency_hz
-    arms = [arm(e, w) for e in elements]
-    size = 1 + sum(1 for series, _ in arms if series)
-    y = [[0j] * size for _ in range(size)]
-    node = 0
-    for series, admittance in arms:
-        if series:
-            for a, b, sign in ((node, node, 1), (node + 1, node + 1, 1), (node, node + 1, -1), (node + 1, node, -1)):
-                y[a][b] += sign * admittance
-            node += 1
-        else:
-            y[node][node] += admittance
-    y[0][0] += 1 / source_ohm
-    y[-1][-1] += 1 / load_ohm
-    return arms, solve(y, [emf / source_ohm + 0j] + [0j] * (size - 1))
 
 
 def stress(load_ohm, coil_q=150, capacitor_q=1000):
