@@ -1,3 +1,4 @@
+using System.Text.Json.Serialization;
 using ClubBench.Planning.Advising;
 using ClubBench.Planning.Drawings;
 using ClubBench.Planning.Figures;
@@ -57,7 +58,12 @@ public sealed record CardNotes(IReadOnlyList<Line> BeforePower, Figure? SupplyLi
 /// <param name="PiecesPerPlace">Pieces in one place (2 for a parallel pair).</param>
 /// <param name="IsTuned">Whether only low-loss parts may go here.</param>
 /// <param name="Pocket">Compartment of the bag: a, b, c.</param>
-public sealed record FittingRow(IReadOnlyList<string> Designators, Part Part, IReadOnlyList<string> MarkingOnPart, int PiecesPerPlace, bool IsTuned, string Pocket);
+public sealed record FittingRow(IReadOnlyList<string> Designators, Part Part, IReadOnlyList<string> MarkingOnPart, int PiecesPerPlace, bool IsTuned, string Pocket)
+{
+    /// <summary>Whether to say that only this type may go in; of a coil the core says so itself.</summary>
+    [JsonIgnore]
+    public bool AsksForItsType => IsTuned && Part.Value(PartValue.Turns) is null && Part.Type.Length > 0;
+}
 
 /// <summary>One winding to make.</summary>
 /// <param name="Designator">Coil.</param>

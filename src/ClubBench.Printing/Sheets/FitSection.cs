@@ -57,7 +57,7 @@ internal static class FitSection
     private static IEnumerable<string> Notes(PrintedCard card)
     {
         var label = card.Context.BandColour.Length > 0 ? card.Context.BandColour : card.Context.ToBand;
-        var tuned = card.Content.Fit.Where(r => r.IsTuned && r.Part.Value(PartValue.Turns) is null && r.Part.Type.Length > 0).GroupBy(r => r.Part.Type, StringComparer.Ordinal);
+        var tuned = card.Content.Fit.Where(r => r.AsksForItsType).GroupBy(r => r.Part.Type, StringComparer.Ordinal);
         return [.. tuned.Select(g => Texts.Say("card.tuned", Places.Text([.. g.SelectMany(r => r.Designators)]), g.Key)), Texts.Say("card.fit-note", card.Content.Stage, label)];
     }
 }

@@ -77,7 +77,7 @@ public sealed class BenchWords(IStringLocalizer<NightTexts> texts)
     {
         if (row.MarkingOnPart.Count > 0) yield return texts["bench.parts.marked", string.Join(" + ", row.MarkingOnPart)];
         if (row.PiecesPerPlace > 1) yield return texts["bench.parts.pieces", row.PiecesPerPlace];
-        if (row.IsTuned) yield return texts["bench.parts.tuned"];
+        if (row.AsksForItsType) yield return texts["bench.parts.tuned"];
         yield return $"{texts["bench.parts.bag"]} {row.Pocket}";
     }
 
