@@ -13,8 +13,6 @@ public sealed record OpenCardInput(Guid CardId);
 
 /// <summary>A build card with everything its sheet needs.</summary>
 /// <param name="PlanRevision">First plan revision with this content.</param>
-/// <param name="Plots">Response plots of the stage as stored with that revision.</param>
-/// <param name="NewestNumber">Number of the newest card of this stage: another number means that this card was replaced.</param>
 public sealed record OpenedCard(
     Guid Id,
     Guid PlanId,
@@ -25,10 +23,7 @@ public sealed record OpenedCard(
     string Stage,
     int Number,
     int PlanRevision,
-    CardContent Content,
-    IReadOnlyList<ClubBench.Planning.Drawings.Plot> Plots,
-    int NewestNumber,
-    DateTime PlannedUtc);
+    CardContent Content);
 
 /// <summary>A build card as it was stored: the same words and figures next year.</summary>
 public sealed class OpenCard(ClubStore store, PlanArchive archive) : Query<OpenCardInput, OpenedCard>(store)
@@ -50,11 +45,9 @@ internal static class CardSheets
     public static async Task<OpenedCard> OfAsync(ClubContext db, PlanArchive archive, Card card, CancellationToken cancellation)
     {
         var plan = await archive.OpenAsync(db, card.PlanId, card.FirstPlanRevision, cancellation) ?? throw new InvalidOperationException($"Card {card.Id} lost its plan.");
-        var newest = await db.Cards.Where(c => c.PlanId == card.PlanId && c.Stage == card.Stage).MaxAsync(c => c.Number, cancellation);
-        var planned = await db.PlanRevisions.Where(r => r.PlanId == card.PlanId && r.Revision == card.FirstPlanRevision).Select(r => r.AtUtc).SingleAsync(cancellation);
         var kit = plan.Plan.Inputs.Kit;
         return new OpenedCard(
             card.Id, card.PlanId, plan.Row.Name, plan.Plan.Inputs.Target.BandName, kit.Name, kit.BoardIssue, card.Stage, card.Number, card.FirstPlanRevision,
-            StoredJson.Read<CardContent>(card.ContentJson), plan.Plan.Stage(card.Stage).Plots, newest, planned);
+            StoredJson.Read<CardContent>(card.ContentJson));
     }
 }

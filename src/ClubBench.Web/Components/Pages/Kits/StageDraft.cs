@@ -37,9 +37,6 @@ public sealed class ValueDraft(string part, string name, QuantityKind kind, stri
 /// <summary>A stage while somebody edits its values. Fields come from the kind's roles, so every kind is edited alike.</summary>
 public sealed class StageDraft
 {
-    /// <summary>A crystal is measured to a part in a hundred million; nothing is known better.</summary>
-    private const int MostDigits = 9;
-
     private readonly List<ValueDraft> _fields;
 
     public StageDraft(Kit kit, string key)
@@ -80,15 +77,9 @@ public sealed class StageDraft
         part.ValuesSi.Keys.Union(role?.Values ?? [], StringComparer.Ordinal).Select(name =>
         {
             var kind = KindOf(name);
-            var written = part.Value(name) is { } si ? QuantityText.Split(kind, si, MostDigits) : new QuantityParts("", QuantityUnits.Of(kind)[0].Symbol);
-            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false, Shortest(written.Number), part.Value(name));
+            var written = part.Value(name) is { } si ? QuantityText.Entry(kind, si) : new QuantityParts("", QuantityUnits.Of(kind)[0].Symbol);
+            return new ValueDraft(part.Designator, name, kind, written.Unit.Length == 0 ? null : written.Unit, role?.Values.Contains(name, StringComparer.Ordinal) ?? false, written.Number, part.Value(name));
         });
-
-    /// <summary>Without the zeros at the end, so that 270 pF stands as 270.</summary>
-    private static string Shortest(string number) =>
-        number.Contains(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator, StringComparison.Ordinal)
-            ? number.TrimEnd('0').TrimEnd(CultureInfo.CurrentCulture.NumberFormat.NumberDecimalSeparator[0])
-            : number;
 
     /// <summary>The unit at the end of a value's name says what it measures.</summary>
     private static QuantityKind KindOf(string name) => name switch
